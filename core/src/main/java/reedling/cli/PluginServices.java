@@ -1,0 +1,17 @@
+// SPDX-License-Identifier: Apache-2.0
+package reedling.cli;
+
+import java.util.List;
+import reedling.output.SnapshotWriter;
+import reedling.plugin.PluginService;
+
+/** Every service interface that plugins may provide. */
+final class PluginServices {
+
+    static final PluginService<SnapshotWriter.Provider> SNAPSHOT =
+            new PluginService<>("snapshot", SnapshotWriter.Provider.class);
+
+    static final List<PluginService<?>> ALL = List.of(SNAPSHOT);
+
+    private PluginServices() {}
+}

@@ -1,0 +1,61 @@
+// SPDX-License-Identifier: Apache-2.0
+package reedling.cli;
+
+import java.io.PrintWriter;
+import java.util.List;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Spec;
+import reedling.plugin.Parameter;
+import reedling.plugin.PluginDescription;
+
+/** Lists every plugin with where it came from and what it takes. */
+@Command(
+        name = "plugins",
+        description = "Lists the plugins found, where each came from and which parameters it takes.",
+        mixinStandardHelpOptions = true)
+final class PluginsCommand implements Runnable {
+
+    @Mixin
+    private final PluginFolder pluginFolder = new PluginFolder();
+
+    @Option(names = "--json", description = "Print a JSON list.")
+    private boolean json;
+
+    @Spec
+    @SuppressWarnings("NullAway.Init") // set by the command line library before the command runs
+    private CommandSpec spec;
+
+    @Override
+    public void run() {
+        List<PluginDescription> plugins = pluginFolder.load().descriptions();
+        PrintWriter out = spec.commandLine().getOut();
+        if (json) {
+            out.println(PluginsJson.of(plugins));
+        } else if (plugins.isEmpty()) {
+            out.println("No plugins were found.");
+        } else {
+            plugins.forEach(plugin -> print(out, plugin));
+        }
+        out.flush();
+    }
+
+    private static void print(PrintWriter out, PluginDescription plugin) {
+        out.printf("%-9s %s %s%n", plugin.kind(), plugin.name(), plugin.version());
+        out.printf("          %s%n", plugin.summary());
+        out.printf("          Source: %s%n", plugin.source());
+        out.printf("          Jar: %s%n", plugin.jar());
+        for (Parameter parameter : plugin.parameters()) {
+            out.printf(
+                    "          %s (%s, %s .. %s, %s): %s%n",
+                    parameter.name(),
+                    parameter.dimension().siUnit(),
+                    parameter.minimum(),
+                    parameter.maximum(),
+                    parameter.obligatory() ? "no default" : "default " + parameter.defaultValue(),
+                    parameter.meaning());
+        }
+    }
+}
