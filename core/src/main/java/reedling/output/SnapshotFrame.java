@@ -32,7 +32,11 @@ public record SnapshotFrame(double time, long step, GrainCloud grains, List<Line
      * @param cellFields named arrays, one tuple an element
      */
     public record LineMesh(
-            String name, double[] points, int[] connectivity, List<NamedArray> pointFields, List<NamedArray> cellFields) {}
+            String name,
+            double[] points,
+            int[] connectivity,
+            List<NamedArray> pointFields,
+            List<NamedArray> cellFields) {}
 
     /** A named array, tuples of {@code components} values one after the other; the name ends in its unit where it has one. */
     public sealed interface NamedArray {

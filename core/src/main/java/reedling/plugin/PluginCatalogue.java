@@ -20,7 +20,8 @@ public final class PluginCatalogue {
     /** Provider of a name, if there is one. */
     public <P extends Provider> Optional<P> find(PluginService<P> service, String name) {
         return plugins.stream()
-                .filter(plugin -> plugin.service().equals(service) && plugin.name().equals(name))
+                .filter(plugin ->
+                        plugin.service().equals(service) && plugin.name().equals(name))
                 .map(plugin -> service.type().cast(plugin.provider()))
                 .findFirst();
     }

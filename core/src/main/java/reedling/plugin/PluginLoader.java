@@ -77,8 +77,8 @@ public final class PluginLoader {
     private void loadJar(Path jar) {
         try (JarFile opened = new JarFile(jar.toFile())) {
             boolean provides = services.stream()
-                    .anyMatch(service -> opened.getEntry("META-INF/services/"
-                                    + service.type().getName())
+                    .anyMatch(service -> opened.getEntry(
+                                    "META-INF/services/" + service.type().getName())
                             != null);
             if (!provides) {
                 findings.add(new Finding(
@@ -91,7 +91,11 @@ public final class PluginLoader {
             }
         } catch (IOException unreadable) {
             findings.add(new Finding(
-                    jar.toString(), "", "not a readable jar (" + unreadable.getMessage() + ")", "a jar", "Take it away."));
+                    jar.toString(),
+                    "",
+                    "not a readable jar (" + unreadable.getMessage() + ")",
+                    "a jar",
+                    "Take it away."));
             return;
         }
         ClassLoader jarLoader = openJar(jar);
@@ -129,8 +133,7 @@ public final class PluginLoader {
     private static Finding brokenProvider(String jar, Throwable failure) {
         Throwable cause = failure.getCause() == null ? failure : failure.getCause();
         String reason = cause == failure ? String.valueOf(failure.getMessage()) : failure.getMessage() + ": " + cause;
-        return new Finding(
-                jar, "plugin", "unusable (" + reason + ")", "", "Repair the plugin, or take the jar away.");
+        return new Finding(jar, "plugin", "unusable (" + reason + ")", "", "Repair the plugin, or take the jar away.");
     }
 
     private void add(PluginService<?> service, Provider provider, String jar) {

@@ -36,7 +36,10 @@ final class ProviderCheck {
                     "Take a version of this plugin that was built for this version of Reedling."));
             return false;
         }
-        return hasKebabCaseName(provider) & describesItself(provider) & declaresSoundParameters(provider);
+        boolean named = hasKebabCaseName(provider);
+        boolean described = describesItself(provider);
+        boolean declared = declaresSoundParameters(provider);
+        return named && described && declared;
     }
 
     private boolean hasKebabCaseName(Provider provider) {
@@ -51,16 +54,14 @@ final class ProviderCheck {
     private boolean describesItself(Provider provider) {
         String summary = provider.summary();
         String source = provider.source();
-        return require(
-                        summary != null && !summary.isBlank(),
-                        "summary of " + provider.name(),
-                        quoted(summary),
-                        "one sentence")
-                & require(
-                        source != null && !source.isBlank(),
-                        "source of " + provider.name(),
-                        quoted(source),
-                        "author, title, year of its formula");
+        boolean summarised = require(
+                summary != null && !summary.isBlank(), "summary of " + provider.name(), quoted(summary), "one sentence");
+        boolean sourced = require(
+                source != null && !source.isBlank(),
+                "source of " + provider.name(),
+                quoted(source),
+                "author, title, year of its formula");
+        return summarised && sourced;
     }
 
     private boolean declaresSoundParameters(Provider provider) {
