@@ -1,0 +1,35 @@
+// SPDX-License-Identifier: Apache-2.0
+package reedling.contact;
+
+/**
+ * A law bound to one material pair and contact kind: reads and writes the columns of a block, nothing else.
+ *
+ * <p>Contract: a row's result depends on that row only; stored history is multiplied by TOUCH; no allocation; a
+ * tangential or rolling kernel leaves 0 in its output where TOUCH is 0.
+ *
+ * <p>Threads: immutable, called by many workers at once, each with a block of its own.
+ */
+public interface ContactKernel {
+
+    /** Works through all rows of a block. */
+    void apply(ContactBlock block);
+
+    /**
+     * Time an impact would last, s, for the step limit of bodies about to touch; asked of normal kernels only.
+     *
+     * @param speed closing speed, m/s, > 0
+     * @param radius effective radius, m
+     * @param mass effective mass, kg
+     */
+    default double duration(double speed, double radius, double mass) {
+        return Double.POSITIVE_INFINITY;
+    }
+
+    /**
+     * Largest ratio of the dashpot to the critical one, c / (2 sqrt(k m*)), over all overlaps; asked of normal kernels
+     * only, for the limit of persistent contacts.
+     */
+    default double dampingRatio() {
+        return 0;
+    }
+}

@@ -1,0 +1,97 @@
+// SPDX-License-Identifier: Apache-2.0
+package reedling.contact;
+
+import java.util.ArrayList;
+import java.util.EnumMap;
+import java.util.List;
+import java.util.Map;
+import org.jspecify.annotations.Nullable;
+import reedling.material.MaterialPair;
+import reedling.material.MaterialTable;
+
+/**
+ * The contact laws of a case, bound to every contact kind and material pair; immutable. Column 0 of a row's history is
+ * the engine's (contact radius of the step before); each law's own columns follow.
+ */
+public final class LawSet {
+
+    /**
+     * Kernels of one contact kind and material pair.
+     *
+     * @param tangential null where the case has no friction law
+     * @param rolling null where the case has no rolling law
+     */
+    public record Bound(
+            ContactKernel normal, @Nullable ContactKernel tangential, @Nullable ContactKernel rolling) {}
+
+    private final Map<Stage, ContactLaw> laws;
+    private final Map<ContactKind, List<Bound>> bound = new EnumMap<>(ContactKind.class);
+    private final boolean[] signedColumns;
+    private final double largestDampingRatio;
+
+    /** Binds laws (one a stage, the normal stage obligatory) to all pairs of a table. */
+    public LawSet(Map<Stage, ContactLaw> lawByStage, MaterialTable table) {
+        laws = new EnumMap<>(lawByStage);
+        if (!laws.containsKey(Stage.NORMAL)) {
+            throw new IllegalArgumentException("a normal law is needed");
+        }
+        List<Boolean> signed = new ArrayList<>(List.of(false));
+        Map<Stage, Integer> start = new EnumMap<>(Stage.class);
+        laws.forEach((stage, law) -> {
+            start.put(stage, signed.size());
+            for (HistoryColumn column : law.history()) {
+                for (int k = 0; k < column.components(); k++) {
+                    signed.add(column.components() == 3);
+                }
+            }
+        });
+        signedColumns = new boolean[signed.size()];
+        for (int c = 0; c < signedColumns.length; c++) {
+            signedColumns[c] = signed.get(c);
+        }
+        double damping = 0;
+        for (ContactKind kind : ContactKind.values()) {
+            List<Bound> list = new ArrayList<>();
+            for (MaterialPair pair : table.pairs()) {
+                Bound one = bind(pair, kind, start);
+                damping = Math.max(damping, one.normal().dampingRatio());
+                list.add(one);
+            }
+            bound.put(kind, List.copyOf(list));
+        }
+        largestDampingRatio = damping;
+    }
+
+    private Bound bind(MaterialPair pair, ContactKind kind, Map<Stage, Integer> start) {
+        return new Bound(
+                laws.get(Stage.NORMAL).bind(pair, kind, start.get(Stage.NORMAL)),
+                optional(Stage.TANGENTIAL, pair, kind, start),
+                optional(Stage.ROLLING, pair, kind, start));
+    }
+
+    private @Nullable ContactKernel optional(
+            Stage stage, MaterialPair pair, ContactKind kind, Map<Stage, Integer> start) {
+        ContactLaw law = laws.get(stage);
+        return law == null ? null : law.bind(pair, kind, start.get(stage));
+    }
+
+    /** Kernels for a contact kind and the number of a material pair. */
+    public Bound bound(ContactKind kind, int materialPair) {
+        return bound.get(kind).get(materialPair);
+    }
+
+    /** For each history column of a row, whether it turns its sign when first and second are exchanged. */
+    public boolean[] signedColumns() {
+        return signedColumns.clone();
+    }
+
+    /** Doubles of history a row. */
+    public int historyColumns() {
+        return signedColumns.length;
+    }
+
+    /** Largest damping ratio of all normal kernels. */
+    public double largestDampingRatio() {
+        return largestDampingRatio;
+    }
+}
