@@ -1,0 +1,34 @@
+// SPDX-License-Identifier: Apache-2.0
+package reedling.particle;
+
+import reedling.error.RangeCheck;
+
+/**
+ * Every diameter between two bounds equally likely.
+ *
+ * <p>Formula: mean of d^3 = (b^4 - a^4)/(4 (b - a)) = (a + b)(a^2 + b^2)/4.
+ * <p>Errors: bounds not positive or in the wrong order. Threads: immutable.
+ *
+ * @param smallest a, m
+ * @param largest b, m
+ */
+public record UniformSize(double smallest, double largest) implements SizeDistribution {
+
+    public UniformSize {
+        new RangeCheck("size")
+                .positive("smallest", smallest, "m")
+                .positive("largest", largest, "m")
+                .require(!(largest < smallest), "largest", largest, "m", "at least the smallest, " + smallest + " m")
+                .finish();
+    }
+
+    @Override
+    public double diameter(RandomStream random) {
+        return Math.min(random.uniform(smallest, largest), largest);
+    }
+
+    @Override
+    public double meanCube() {
+        return 0.25 * (smallest + largest) * (smallest * smallest + largest * largest);
+    }
+}

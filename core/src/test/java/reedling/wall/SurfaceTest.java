@@ -1,0 +1,167 @@
+// SPDX-License-Identifier: Apache-2.0
+package reedling.wall;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
+import static org.assertj.core.api.Assertions.within;
+
+import java.util.EnumSet;
+import net.jqwik.api.Arbitraries;
+import net.jqwik.api.Arbitrary;
+import net.jqwik.api.ForAll;
+import net.jqwik.api.Property;
+import net.jqwik.api.Provide;
+import net.jqwik.api.constraints.DoubleRange;
+import org.junit.jupiter.api.Test;
+import reedling.error.ReedlingException;
+
+class SurfaceTest {
+
+    private static final EnumSet<BoxInside.Face> OPEN_TOP = EnumSet.of(BoxInside.Face.HIGH_Z);
+    private final double[] normal = new double[3];
+    private final double[] second = new double[3];
+
+    @Provide
+    Arbitrary<Surface> surfaces() {
+        return Arbitraries.of(
+                new HalfSpace(),
+                new Rectangle(0.3, 0.2),
+                new BoxInside(0.3, 0.2, 0.4, EnumSet.noneOf(BoxInside.Face.class)),
+                new BoxInside(0.3, 0.2, 0.4, OPEN_TOP),
+                new BoxInside(0.3, 0.2, 0.4, EnumSet.of(BoxInside.Face.LOW_X, BoxInside.Face.HIGH_Z)),
+                new BoxOutside(0.3, 0.2, 0.4),
+                new CylinderInside(0.15, 0.4),
+                new CylinderInside(0.15, 0.4, true, false),
+                new CylinderInside(0.15, 0.4, true, true),
+                new CylinderOutside(0.15, 0.4));
+    }
+
+    @Property
+    void normalIsUnitAndLeadsToThePointOfZeroGap(
+            @ForAll("surfaces") Surface surface,
+            @ForAll @DoubleRange(min = -0.4, max = 0.4) double x,
+            @ForAll @DoubleRange(min = -0.4, max = 0.4) double y,
+            @ForAll @DoubleRange(min = -0.4, max = 0.4) double z) {
+        for (int facet = 0; facet < surface.facets(); facet++) {
+            double gap = surface.gap(facet, x, y, z, normal);
+            assertThat(Math.hypot(Math.hypot(normal[0], normal[1]), normal[2])).isEqualTo(1, within(1e-14));
+            if (gap == Double.POSITIVE_INFINITY) {
+                continue;
+            }
+            // at half the way the gap is halved and the normal is the same; at the end it vanishes
+            double half = step(surface, facet, x, y, z, 0.5 * gap);
+            assertThat(half).isEqualTo(0.5 * gap, within(1e-13));
+            if (Math.abs(gap) > 1e-3) {
+                assertThat(second).containsExactly(normal, within(1e-9));
+            }
+            // rounding may put the end just past an edge that another facet stands for
+            double end = step(surface, facet, x, y, z, gap);
+            boolean handedOver = end == Double.POSITIVE_INFINITY;
+            double reached = handedOver ? nearest(surface, x + gap * normal[0], y + gap * normal[1], z + gap * normal[2]) : end;
+            assertThat(reached).isEqualTo(0, within(1e-13));
+        }
+    }
+
+    @Property
+    void nearestGapChangesNoFasterThanThePointMoves(
+            @ForAll("surfaces") Surface surface,
+            @ForAll @DoubleRange(min = -0.4, max = 0.4) double x,
+            @ForAll @DoubleRange(min = -0.4, max = 0.4) double y,
+            @ForAll @DoubleRange(min = -0.4, max = 0.4) double z,
+            @ForAll @DoubleRange(min = -0.01, max = 0.01) double move) {
+        // holds across rims and edges too: a jump there would be a jump in force
+        double before = nearest(surface, x, y, z);
+        double after = nearest(surface, x + move, y - move, z + move);
+        assertThat(Math.abs(after - before)).isLessThanOrEqualTo(Math.sqrt(3) * Math.abs(move) + 1e-14);
+    }
+
+    @Test
+    void grainInACornerOfABoxTouchesThreeFacets() {
+        Surface box = new BoxInside(0.3, 0.2, 0.4, OPEN_TOP);
+        int touching = 0;
+        for (int facet = 0; facet < box.facets(); facet++) {
+            touching += box.gap(facet, 0.15 - 0.009, 0.1 - 0.009, -0.2 + 0.009, normal) < 0.01 ? 1 : 0;
+        }
+        assertThat(box.facets()).isEqualTo(5);
+        assertThat(touching).isEqualTo(3);
+    }
+
+    @Test
+    void edgeOfAnOpenBoxSeenFromOutsideIsOneContact() {
+        Surface box = new BoxInside(0.3, 0.2, 0.4, OPEN_TOP);
+        double[][] outside = {{0.155, 0.105, 0}, {0.155, 0.105, -0.205}, {0.155, 0.099, 0}, {0.149, 0.105, 0}};
+        for (double[] p : outside) {
+            int touching = 0;
+            for (int facet = 0; facet < box.facets(); facet++) {
+                touching += box.gap(facet, p[0], p[1], p[2], normal) < 0.01 ? 1 : 0;
+            }
+            assertThat(touching).as("contacts at %s", p).isEqualTo(1);
+        }
+    }
+
+    @Test
+    void grainSpilledOverTheRimIsPushedOutwards() {
+        Surface box = new BoxInside(0.3, 0.2, 0.4, OPEN_TOP);
+        assertThat(box.gap(1, 0.16, 0, 0, normal)).isEqualTo(0.01, within(1e-15));
+        assertThat(normal).containsExactly(new double[] {-1, 0, 0}, within(0.0));
+        assertThat(box.gap(1, 0.16, 0, 0.21, normal)).isEqualTo(Math.sqrt(2) * 0.01, within(1e-15));
+    }
+
+    @Test
+    void closedBoxPushesADeepGrainBackInside() {
+        Surface box = new BoxInside(0.3, 0.2, 0.4, EnumSet.noneOf(BoxInside.Face.class));
+        assertThat(box.gap(1, 0.16, 0, 0, normal)).isEqualTo(-0.01, within(1e-15));
+        assertThat(normal).containsExactly(new double[] {1, 0, 0}, within(0.0));
+    }
+
+    @Test
+    void solidBoxKnowsFaceEdgeCornerAndInside() {
+        Surface box = new BoxOutside(2, 2, 2);
+        assertThat(box.gap(0, 0.3, 0.2, 1.5, normal)).isEqualTo(0.5);
+        assertThat(box.gap(0, 1.3, 1.4, 0, normal)).isEqualTo(0.5, within(1e-15));
+        assertThat(box.gap(0, 1.1, 1.1, 1.1, normal)).isEqualTo(0.1 * Math.sqrt(3), within(1e-15));
+        assertThat(box.gap(0, 0, -0.9, 0.5, normal)).isEqualTo(-0.1, within(1e-15));
+        assertThat(normal).containsExactly(new double[] {0, 1, 0}, within(0.0));
+    }
+
+    @Test
+    void exactlyOneFacetOfASolidCylinderAnswers() {
+        Surface roller = new CylinderOutside(1, 2);
+        double[][] points = {{2, 0, 0}, {0, 0, 2}, {0, 0, -2}, {2, 0, 2}, {0, 0, 0}, {0.99, 0, 0.5}, {0.2, 0, 0.9}, {1, 0, 1}};
+        int[] expected = {0, 2, 1, 0, 0, 0, 2, 0};
+        for (int k = 0; k < points.length; k++) {
+            for (int facet = 0; facet < 3; facet++) {
+                double gap = roller.gap(facet, points[k][0], points[k][1], points[k][2], normal);
+                assertThat(gap < Double.POSITIVE_INFINITY).as("point %d facet %d", k, facet).isEqualTo(facet == expected[k]);
+            }
+        }
+    }
+
+    @Test
+    void effectiveRadiusIsTheGrainOnPlanesAndTheHertzLineOnCylinders() {
+        assertThat(new HalfSpace().effectiveRadius(0, 0.003)).isEqualTo(0.003);
+        assertThat(new CylinderInside(0.1, 1, true, true).effectiveRadius(1, 0.003)).isEqualTo(0.003);
+        assertThat(new CylinderInside(0.1, 1).effectiveRadius(0, 0.003)).isEqualTo(HertzLine.inBore(0.003, 0.1));
+        assertThat(new CylinderOutside(0.1, 1).effectiveRadius(0, 0.003)).isEqualTo(HertzLine.outside(0.003, 0.1));
+    }
+
+    @Test
+    void wrongMeasuresAreAllReported() {
+        assertThatThrownBy(() -> new BoxOutside(-1, 0, Double.NaN))
+                .isInstanceOfSatisfying(ReedlingException.class, e -> assertThat(e.findings()).hasSize(3));
+        assertThatThrownBy(() -> new BoxInside(1, 1, 1, EnumSet.allOf(BoxInside.Face.class))).hasMessageContaining("open");
+    }
+
+    private double step(Surface surface, int facet, double x, double y, double z, double way) {
+        return surface.gap(facet, x + way * normal[0], y + way * normal[1], z + way * normal[2], second);
+    }
+
+    private double nearest(Surface surface, double x, double y, double z) {
+        double least = Double.POSITIVE_INFINITY;
+        for (int facet = 0; facet < surface.facets(); facet++) {
+            double gap = surface.gap(facet, x, y, z, second);
+            least = Math.min(least, gap);
+        }
+        return least;
+    }
+}
