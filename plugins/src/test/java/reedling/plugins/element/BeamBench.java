@@ -23,9 +23,13 @@ final class BeamBench {
     private BeamBench() {}
 
     static ElementLaw law(CrossSection section, Material material, double dampingTime) {
+        return law(section, material, dampingTime, 1);
+    }
+
+    static ElementLaw law(CrossSection section, Material material, double dampingTime, double inertiaFactor) {
         BeamElement type = new BeamElement();
-        return type.law(
-                new ElementProperties(section, material, dampingTime, ParameterValues.of(type, Map.of())));
+        ParameterValues values = ParameterValues.of(type, Map.of(BeamElement.INERTIA_FACTOR, inertiaFactor));
+        return type.law(new ElementProperties(section, material, dampingTime, values));
     }
 
     static Structure straight(ElementLaw law, double length, int elements, EndCondition start, EndCondition end) {
