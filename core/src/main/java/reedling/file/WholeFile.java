@@ -41,7 +41,7 @@ public final class WholeFile {
             try (FileChannel channel = FileChannel.open(
                     part, StandardOpenOption.CREATE, StandardOpenOption.WRITE, StandardOpenOption.TRUNCATE_EXISTING)) {
                 content.writeTo(channel);
-                channel.force(true);
+                channel.force(false); // content and length; times may be lost
             }
             Files.move(part, target, StandardCopyOption.ATOMIC_MOVE);
         } catch (IOException | RuntimeException | Error failure) {

@@ -3,6 +3,8 @@ package reedling.vtk;
 
 import java.io.ByteArrayInputStream;
 import java.io.IOException;
+import java.nio.ByteBuffer;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -34,6 +36,14 @@ final class PvdIndex {
                     + "\" file=\"" + VtkDocument.escaped(file) + "\"/>\n";
         }
     }
+
+    private static final String HEAD =
+            """
+            <?xml version="1.0"?>
+            <VTKFile type="Collection" version="1.0" byte_order="LittleEndian" header_type="UInt64">
+            <Collection>
+            """;
+    private static final String TAIL = "</Collection>\n</VTKFile>\n";
 
     private final Path path;
     private final List<Entry> entries = new ArrayList<>();
@@ -87,12 +97,9 @@ final class PvdIndex {
         return dropped;
     }
 
-    /** Replaces the index on the disk. */
+    /** Replaces the index on the disk; after a loss of power it may be the one before, which is valid too. */
     void save() throws IOException {
-        WholeFile.writeText(
-                path,
-                "<?xml version=\"1.0\"?>\n"
-                        + "<VTKFile type=\"Collection\" version=\"1.0\" byte_order=\"LittleEndian\" header_type=\"UInt64\">\n"
-                        + "<Collection>\n" + text + "</Collection>\n</VTKFile>\n");
+        byte[] bytes = (HEAD + text + TAIL).getBytes(StandardCharsets.UTF_8);
+        WholeFile.write(path, channel -> WholeFile.writeFully(channel, ByteBuffer.wrap(bytes)));
     }
 }
