@@ -1,6 +1,4 @@
 // SPDX-License-Identifier: Apache-2.0
-/** Snapshots, tables and the record of a run. */
-@NullMarked
+/** What a run leaves in its folder: snapshots, tables, the run record, the log. */
+@org.jspecify.annotations.NullMarked
 package reedling.output;
-
-import org.jspecify.annotations.NullMarked;
