@@ -17,6 +17,7 @@ final class StandardError {
     private StandardError() {}
 
     /** Does nothing unless the launcher says which descriptor it kept. */
+    @SuppressWarnings("restricted") // native access is what this class is for; the launcher allows it
     static void restore() {
         Integer kept = Integer.getInteger(KEPT_DESCRIPTOR);
         if (kept == null) {

@@ -55,7 +55,10 @@ final class ProviderCheck {
         String summary = provider.summary();
         String source = provider.source();
         boolean summarised = require(
-                summary != null && !summary.isBlank(), "summary of " + provider.name(), quoted(summary), "one sentence");
+                summary != null && !summary.isBlank(),
+                "summary of " + provider.name(),
+                quoted(summary),
+                "one sentence");
         boolean sourced = require(
                 source != null && !source.isBlank(),
                 "source of " + provider.name(),

@@ -228,7 +228,8 @@ class WorkerTeamTest {
             for (int k = 0; k < 50_000; k++) {
                 team.run(phase, 8);
             }
-            // One object of 64 bytes a phase would be 3.2 MB; other threads of the test machinery may allocate a little.
+            // One object of 64 bytes a phase would be 3.2 MB; other threads of the test machinery may allocate a
+            // little.
             assertThat(threads.getTotalThreadAllocatedBytes() - before).isLessThan(500_000);
         }
         assertThat(sums[0]).isEqualTo(100_000);
