@@ -26,6 +26,8 @@ public final class WriteQueue implements AutoCloseable {
 
     private record Named(String what, Job job) {}
 
+    private static final Named END = new Named("end", () -> {});
+
     private final BlockingQueue<Named> waiting;
     private final Thread writer;
     private volatile @Nullable ReedlingException failure;
@@ -58,7 +60,10 @@ public final class WriteQueue implements AutoCloseable {
     public void checkFailure() {
         ReedlingException first = failure;
         if (first != null) {
-            throw first;
+            // a new one each time: try-with-resources cannot suppress an exception by itself
+            ReedlingException again = new ReedlingException(first.exitCode(), first.findings());
+            again.initCause(first);
+            throw again;
         }
     }
 
@@ -88,8 +93,6 @@ public final class WriteQueue implements AutoCloseable {
         uninterrupted(writer::join);
         checkFailure();
     }
-
-    private static final Named END = new Named("end", () -> {});
 
     private void put(Named job) {
         if (!waiting.offer(job)) {

@@ -70,6 +70,20 @@ class WriteQueueTest {
     }
 
     @Test
+    void failureReportedInsideTheBlockAndByItsCloseIsOneException() {
+        assertThatThrownBy(() -> {
+                    try (WriteQueue queue = new WriteQueue(2)) {
+                        queue.submit("table", () -> {
+                            throw new IOException("No space left on device");
+                        });
+                        queue.drain();
+                    }
+                })
+                .isInstanceOf(ReedlingException.class)
+                .hasMessageContaining("No space left on device");
+    }
+
+    @Test
     void failureOfTheProgramNeverHangsTheSubmitter() {
         WriteQueue queue = new WriteQueue(1);
         queue.submit("broken", () -> {
