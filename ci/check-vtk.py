@@ -6,7 +6,8 @@ usage: check-vtk.py RUN_FOLDER        (Debian: apt-get install python3-vtk9 pyth
 
 Checked for each file that the index names: no error event of the reader (a damaged file gives one, while the reader's
 error code stays 0), the counts of points and cells agree with the XML, the expected arrays are there and finite,
-the time in the file is the time in the index, and every time has the same parts.
+cells name existing points, radii are positive, the appended arrays lie back to back, the time in the file is the time
+in the index, and every time has the same parts.
 Exit status: 0 all well, 1 something wrong, 2 wrong use.
 """
 import re
@@ -44,13 +45,18 @@ def read(path):
     return reader.GetOutput()
 
 
-def counts_in_xml(path):
-    """Points and cells that the XML part declares."""
-    head = path.read_bytes().split(b"<AppendedData", 1)[0].decode("utf-8")
-    piece = re.search(r"<Piece ([^>]*)>", head)
+def check_layout(path):
+    """Raw arrays lie back to back, each behind its length; returns the points and cells that the XML part declares."""
+    head, body = path.read_bytes().split(b'<AppendedData encoding="raw">\n_', 1)
+    end = 0
+    for offset in (int(text) for text in re.findall(rb'offset="(\d+)"', head)):
+        require(offset == end, f"{path}: an array begins at {offset}, the one before ends at {end}")
+        end = offset + 8 + int.from_bytes(body[offset : offset + 8], "little")
+    require(body[end:] == b"\n</AppendedData>\n</VTKFile>\n", f"{path}: the appended data do not end at {end}")
+    piece = re.search(rb"<Piece ([^>]*)>", head)
     require(piece, f"{path}: no Piece")
-    number = {name: int(count) for name, count in re.findall(r'NumberOf(\w+)="(\d+)"', piece.group(1))}
-    return number["Points"], sum(count for name, count in number.items() if name != "Points")
+    number = {name: int(count) for name, count in re.findall(rb'NumberOf(\w+)="(\d+)"', piece.group(1))}
+    return number[b"Points"], sum(count for name, count in number.items() if name != b"Points")
 
 
 def arrays(attributes):
@@ -67,18 +73,27 @@ def require_arrays(path, where, found, expected, tuples):
     for name, array in found.items():
         require(array.GetNumberOfTuples() == tuples, f"{path}: {name} has {array.GetNumberOfTuples()} tuples, expected {tuples}")
         require(numpy.isfinite(vtk_to_numpy(array)).all(), f"{path}: {name} has values that are not finite")
+        require(name != "radius" or (vtk_to_numpy(array) > 0).all(), f"{path}: a radius is not positive")
+
+
+def check_cells(path, cells, points):
+    if cells.GetNumberOfCells():
+        named = vtk_to_numpy(cells.GetConnectivityArray())
+        require(0 <= named.min() and named.max() < points, f"{path}: cells name points {named.min()} to {named.max()} of {points}")
 
 
 def check_file(path, time):
     """Checks one file and returns its numbers of points and cells."""
     data = read(path)
     points, cells = data.GetNumberOfPoints(), data.GetNumberOfCells()
-    require((points, cells) == counts_in_xml(path), f"{path}: {points} points and {cells} cells, XML says {counts_in_xml(path)}")
+    declared = check_layout(path)
+    require((points, cells) == declared, f"{path}: {points} points and {cells} cells, XML says {declared}")
     field = data.GetFieldData().GetArray("TimeValue")
     require(field is not None and field.GetValue(0) == time, f"{path}: TimeValue is not the {time} s of the index")
     if points:
         require(numpy.isfinite(vtk_to_numpy(data.GetPoints().GetData())).all(), f"{path}: positions that are not finite")
     grains = path.suffix == ".vtp"
+    check_cells(path, data.GetVerts() if grains else data.GetCells(), points)
     require_arrays(path, "PointData", arrays(data.GetPointData()), GRAIN_ARRAYS if grains else POINT_ARRAYS, points)
     require_arrays(path, "CellData", arrays(data.GetCellData()), set() if grains else CELL_ARRAYS, cells)
     return points, cells
@@ -104,7 +119,9 @@ def check_run(folder):
         largest[name] = max(largest.get(name, (0, 0)), counts)
     require(list(parts) == sorted(parts), f"{index}: times are not in order")
     require(len({tuple(names) for names in parts.values()}) == 1, f"{index}: not the same parts at every time")
-    unlisted = {p for p in folder.rglob("*.vt[pu]")} - listed
+    # a killed run may leave files of the one frame that its index did not come to name
+    cut_short = f"_{1 + max(int(p.stem.rsplit('_', 1)[1]) for p in listed):06d}"
+    unlisted = {p for p in folder.rglob("*.vt[pu]") if not p.stem.endswith(cut_short)} - listed
     require(not unlisted, f"{index}: does not name {sorted(p.name for p in unlisted)}")
     sizes = ", ".join(f"{name} {points} points {cells} cells" for name, (points, cells) in largest.items())
     print(f"{index}: {len(parts)} times from {min(parts):g} s to {max(parts):g} s, {len(listed)} files read without error; {sizes}")

@@ -6,8 +6,8 @@ usage: render-deck.py RUN_FOLDER OUT.png [FRAME]
        FRAME counts from 0; negative counts from the end; the last one if left out
        (Debian: apt-get install python3-vtk9 python3-numpy xvfb xauth; starts itself again under xvfb-run where there is no display)
 
-Grains are spheres of their own radius coloured by lot, wires are tubes of their own radius shaded from steel blue
-(no axial force) to dark (largest force of the frame).
+Grains are spheres of their own radius coloured by lot; wires are tubes of their mean radius, shaded from steel blue
+(smallest axial force of the frame) to dark (largest). The view takes in the structures and the grains above them.
 """
 import os
 import re
@@ -70,7 +70,7 @@ def lots_of(grains):
 
 
 def grain_actor(grains):
-    """Spheres scaled by twice the radius (the glyph has diameter 1) and coloured by lot."""
+    """Spheres of radius 1 scaled by the radius and coloured by lot."""
     sphere = vtk.vtkSphereSource()
     sphere.SetRadius(1.0)
     sphere.SetThetaResolution(20)
@@ -103,7 +103,7 @@ def grain_actor(grains):
 
 
 def wire_actor(mesh):
-    """Tubes of the elements' radius; returns the actor and the map of axial force to colour (None without that array)."""
+    """Tubes of the elements' mean radius; returns the actor and the map of axial force to colour (None without that array)."""
     surface = vtk.vtkDataSetSurfaceFilter()
     surface.SetInputData(mesh)
     radius = find(mesh.GetCellData(), "radius")
@@ -142,42 +142,66 @@ def text(content, x, y, size):
     return actor
 
 
+def dot(x, y, colour):
+    disk = vtk.vtkRegularPolygonSource()
+    disk.SetNumberOfSides(40)
+    disk.SetRadius(11)
+    mapper = vtk.vtkPolyDataMapper2D()
+    mapper.SetInputConnection(disk.GetOutputPort())
+    actor = vtk.vtkActor2D()
+    actor.SetMapper(mapper)
+    actor.GetProperty().SetColor(*colour)
+    actor.SetPosition(x, y)
+    return actor
+
+
 def lot_legend(renderer, grains):
     """A coloured dot and a line of text for each lot, top left."""
     name, lots = lots_of(grains)
     numbers = vtk_to_numpy(grains.GetPointData().GetArray(name)) if name else numpy.zeros(grains.GetNumberOfPoints())
     for row, lot in enumerate(lots):
         y = SIZE[1] - 130 - 38 * row
-        dot = text("\u25cf", 40, y, 30)
-        dot.GetTextProperty().SetColor(*LOT_COLOURS[lot % len(LOT_COLOURS)])
-        renderer.AddActor2D(dot)
+        renderer.AddActor2D(dot(52, y + 14, LOT_COLOURS[lot % len(LOT_COLOURS)]))
         renderer.AddActor2D(text(f"lot {lot}   {int((numbers == lot).sum())} grains", 76, y + 3, 24))
 
 
 def force_legend(renderer, ramp, name):
     bar = vtk.vtkScalarBarActor()
     bar.SetLookupTable(ramp)
-    bar.SetTitle(name)
     bar.SetNumberOfLabels(3)
-    bar.SetLabelFormat("%.4g")
+    bar.SetLabelFormat("%.3g")
     bar.SetOrientationToHorizontal()
     bar.SetPosition(0.70, 0.03)
     bar.SetWidth(0.26)
     bar.SetHeight(0.09)
     bar.UnconstrainedFontSizeOn()
-    for property in (bar.GetTitleTextProperty(), bar.GetLabelTextProperty()):
-        property.SetColor(*INK)
-        property.SetFontSize(22)
-        property.BoldOff()
-        property.ItalicOff()
-        property.ShadowOff()
+    label = bar.GetLabelTextProperty()
+    label.SetColor(*INK)
+    label.SetFontSize(22)
+    label.BoldOff()
+    label.ItalicOff()
+    label.ShadowOff()
     renderer.AddActor2D(bar)
+    renderer.AddActor2D(text(f"wires: {name}", int(0.70 * SIZE[0]), int(0.13 * SIZE[1]), 24))
 
 
-def aim(renderer):
+def box(data_sets):
+    """Bounds of the structures, raised to the top of nearly all grains; fallen grains must not shrink the picture."""
+    filled = [data for data in data_sets if data.GetNumberOfPoints()]
+    points = [vtk_to_numpy(data.GetPoints().GetData()) for data in filled]
+    if not points:
+        sys.exit("render-deck: the frame is empty")
+    structures = [xyz for data, xyz in zip(filled, points) if not isinstance(data, vtk.vtkPolyData)]
+    xyz = numpy.vstack(structures or points)
+    low, high = xyz.min(axis=0), xyz.max(axis=0)
+    high[2] = max([high[2]] + [numpy.percentile(each[:, 2], 95) for each in points])
+    return low, high
+
+
+def aim(renderer, data_sets):
     """Looks obliquely along the longer horizontal side of the scene, z up, and fills the picture."""
-    bounds = numpy.array(renderer.ComputeVisiblePropBounds()).reshape(3, 2)
-    centre, extent = bounds.mean(axis=1), bounds[:, 1] - bounds[:, 0]
+    low, high = box(data_sets)
+    centre, extent = 0.5 * (low + high), high - low
     along = numpy.array([1.0, 0.0, 0.0] if extent[0] >= extent[1] else [0.0, 1.0, 0.0])
     across = numpy.array([along[1], -along[0], 0.0])
     view = -along + 0.45 * across + numpy.array([0.0, 0.0, 0.62])
@@ -186,8 +210,8 @@ def aim(renderer):
     camera.SetPosition(*(centre + view * numpy.linalg.norm(extent)))
     camera.SetViewUp(0, 0, 1)
     camera.SetViewAngle(28)
-    renderer.ResetCamera()
-    camera.Zoom(1.35)
+    renderer.ResetCamera(*numpy.ravel(numpy.column_stack([low, high])))
+    camera.Zoom(1.3)
     renderer.ResetCameraClippingRange()
 
 
@@ -211,7 +235,7 @@ def draw(time, data_sets, picture):
     window.SetMultiSamples(8)
     window.SetSize(*SIZE)
     window.AddRenderer(renderer)
-    aim(renderer)
+    aim(renderer, data_sets)
     window.Render()
     grab = vtk.vtkWindowToImageFilter()
     grab.SetInput(window)

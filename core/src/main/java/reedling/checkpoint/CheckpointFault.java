@@ -10,7 +10,8 @@ import reedling.error.ReedlingException;
 enum CheckpointFault {
     NOT_A_CHECKPOINT("a checkpoint written by Reedling", "Name a file checkpoint_*.rck of a run folder."),
     OTHER_VERSION(
-            "format version " + CheckpointFormat.VERSION, "Resume with the program version that wrote it, or start anew."),
+            "format version " + CheckpointFormat.VERSION,
+            "Resume with the program version that wrote it, or start anew."),
     TRUNCATED("a whole file", "Resume from the checkpoint before it."),
     DAMAGED_HEADER("a header that agrees with its checksum", "Resume from the checkpoint before it."),
     DAMAGED_SECTION("content that agrees with its checksum", "Resume from the checkpoint before it."),

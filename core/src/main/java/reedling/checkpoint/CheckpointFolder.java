@@ -33,7 +33,10 @@ public final class CheckpointFolder {
     private CheckpointFolder(Path folder, List<Path> good) throws IOException {
         this.folder = folder;
         this.good.addAll(good);
-        lastNumber = numbered(folder).stream().mapToInt(CheckpointFolder::number).max().orElse(0);
+        lastNumber = numbered(folder).stream()
+                .mapToInt(CheckpointFolder::number)
+                .max()
+                .orElse(0);
     }
 
     /** For a new run. */
@@ -96,7 +99,8 @@ public final class CheckpointFolder {
 
     private static List<Path> numbered(Path folder) throws IOException {
         try (Stream<Path> files = Files.list(folder)) {
-            return files.filter(file -> NAME.matcher(file.getFileName().toString()).matches())
+            return files.filter(
+                            file -> NAME.matcher(file.getFileName().toString()).matches())
                     .sorted(Comparator.comparingInt(CheckpointFolder::number).reversed())
                     .toList();
         }

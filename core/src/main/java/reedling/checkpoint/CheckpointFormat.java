@@ -1,8 +1,8 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.checkpoint;
 
-import java.nio.ByteOrder;
 import java.lang.foreign.ValueLayout;
+import java.nio.ByteOrder;
 
 /**
  * Layout of a checkpoint file; all numbers little endian.
@@ -10,7 +10,8 @@ import java.lang.foreign.ValueLayout;
  *     byte[8]  magic            the last bytes show a transfer that rewrote line ends
  *     int      format version
  *     long     header bytes n
- *     byte[n]  header           program version, case digest, step, time, plugins, then for each section its name, bytes, CRC-32C
+ *     byte[n]  header           program version, case digest, step, time, plugins (name, history version),
+ *                               then of each section its name, bytes and CRC-32C
  *     int      CRC-32C          of everything before it
  *     byte[]   the sections, back to back, in the order of the header; nothing after the last
  *

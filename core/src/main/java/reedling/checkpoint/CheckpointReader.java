@@ -74,7 +74,8 @@ public final class CheckpointReader implements AutoCloseable {
     public SectionReader section(String name) {
         Extent extent = sections.get(name);
         if (extent == null) {
-            throw CheckpointFault.MISSING_SECTION.in(file, "section " + name, "missing (there are " + sections.keySet() + ")");
+            throw CheckpointFault.MISSING_SECTION.in(
+                    file, "section " + name, "missing (there are " + sections.keySet() + ")");
         }
         return new SectionReader(file, name, bytes.asSlice(extent.start, extent.count));
     }
@@ -97,7 +98,8 @@ public final class CheckpointReader implements AutoCloseable {
     private SectionReader checkedHead() {
         long size = bytes.byteSize();
         long compared = Math.min(size, CheckpointFormat.MAGIC.length);
-        if (MemorySegment.ofArray(CheckpointFormat.MAGIC).asSlice(0, compared).mismatch(bytes.asSlice(0, compared)) >= 0) {
+        if (MemorySegment.ofArray(CheckpointFormat.MAGIC).asSlice(0, compared).mismatch(bytes.asSlice(0, compared))
+                >= 0) {
             throw CheckpointFault.NOT_A_CHECKPOINT.in(file, "", "some other file");
         }
         requireSize(CheckpointFormat.PREFIX_BYTES + Integer.BYTES);
@@ -138,7 +140,8 @@ public final class CheckpointReader implements AutoCloseable {
         }
         requireSize(start);
         if (start < bytes.byteSize()) {
-            throw CheckpointFault.TRAILING_BYTES.in(file, "", bytes.byteSize() + " bytes long though its sections end at " + start);
+            throw CheckpointFault.TRAILING_BYTES.in(
+                    file, "", bytes.byteSize() + " bytes long though its sections end at " + start);
         }
     }
 
@@ -150,14 +153,16 @@ public final class CheckpointReader implements AutoCloseable {
 
     private void requireSize(long needed) {
         if (bytes.byteSize() < needed) {
-            throw CheckpointFault.TRUNCATED.in(file, "", "cut off after " + bytes.byteSize() + " of " + needed + " bytes");
+            throw CheckpointFault.TRUNCATED.in(
+                    file, "", "cut off after " + bytes.byteSize() + " of " + needed + " bytes");
         }
     }
 
     private static int checksum(MemorySegment part) {
         CRC32C checksum = new CRC32C();
         for (long start = 0; start < part.byteSize(); start += CHECKSUM_PIECE) {
-            checksum.update(part.asSlice(start, Math.min(CHECKSUM_PIECE, part.byteSize() - start)).asByteBuffer());
+            checksum.update(part.asSlice(start, Math.min(CHECKSUM_PIECE, part.byteSize() - start))
+                    .asByteBuffer());
         }
         return (int) checksum.getValue();
     }

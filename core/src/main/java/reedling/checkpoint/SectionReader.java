@@ -36,7 +36,9 @@ public final class SectionReader {
     private long take(long count) {
         if (count < 0 || count > remaining()) {
             throw CheckpointFault.SECTION_TOO_SHORT.in(
-                    file, "section " + name, bytes.byteSize() + " bytes, of which " + remaining() + " are left when " + count + " are read");
+                    file,
+                    "section " + name,
+                    bytes.byteSize() + " bytes, of which " + remaining() + " are left when " + count + " are read");
         }
         long start = position;
         position += count;

@@ -20,7 +20,7 @@ public abstract class LittleEndianOutput {
         buffer = first.order(ByteOrder.LITTLE_ENDIAN);
     }
 
-    /** Takes a buffer that is ready to be read, and returns one to fill, of at least 8 bytes; it may be the same one, cleared. */
+    /** Takes a buffer ready to be read and returns one of at least 8 bytes to fill, maybe the same one, cleared. */
     protected abstract ByteBuffer next(ByteBuffer filled) throws IOException;
 
     /** The buffer being filled, for subclasses that hand over the last one. */

@@ -16,8 +16,8 @@ import reedling.error.ReedlingException;
 import reedling.file.WholeFile;
 
 /**
- * Exclusive use of a folder through a lock on {@code run.lock}, which the system releases even if the process is killed.
- * The lock file stays, since deleting it could take it from under the next process.
+ * Exclusive use of a folder through a lock on {@code run.lock}, which the system releases even if the process is
+ * killed. The lock file stays, since deleting it could take it from under the next process.
  */
 final class FolderLock implements AutoCloseable {
 

@@ -37,7 +37,9 @@ public final class JsonText {
             case Long number -> text.append(number);
             case Boolean truth -> text.append(truth);
             case CharSequence characters -> appendQuoted(characters);
-            default -> throw new IllegalArgumentException("no JSON form of " + value.getClass().getName());
+            default ->
+                throw new IllegalArgumentException(
+                        "no JSON form of " + value.getClass().getName());
         }
     }
 

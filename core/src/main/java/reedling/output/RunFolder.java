@@ -71,7 +71,8 @@ public final class RunFolder implements AutoCloseable {
         FolderLock lock = FolderLock.hold(path);
         try {
             if (refuseEarlierRun && Files.exists(path.resolve(LOG))) {
-                throw refusal(path, "the folder of an earlier run", "a new one", "Choose another name, or resume that run.");
+                throw refusal(
+                        path, "the folder of an earlier run", "a new one", "Choose another name, or resume that run.");
             }
             return new RunFolder(path, lock);
         } catch (IOException | RuntimeException failure) {
@@ -99,7 +100,8 @@ public final class RunFolder implements AutoCloseable {
         } catch (IOException cause) {
             throw new ReedlingException(
                     ExitCode.INPUT_OUTPUT,
-                    new Finding(resolve(LOG).toString(), "", "not written: " + cause, "", "Check free space, then resume."),
+                    new Finding(
+                            resolve(LOG).toString(), "", "not written: " + cause, "", "Check free space, then resume."),
                     cause);
         }
     }
@@ -123,7 +125,11 @@ public final class RunFolder implements AutoCloseable {
 
     private static ReedlingException unusable(Path path, IOException cause) {
         Finding finding = new Finding(
-                path.toString(), "", "impossible to use: " + cause, "a folder that can be written", "Check its permissions and free space.");
+                path.toString(),
+                "",
+                "impossible to use: " + cause,
+                "a folder that can be written",
+                "Check its permissions and free space.");
         return new ReedlingException(ExitCode.OUTPUT, finding, cause);
     }
 }

@@ -38,7 +38,11 @@ public record SnapshotFrame(double time, long step, GrainCloud grains, List<Line
      * @param cellFields named arrays, one tuple an element
      */
     public record LineMesh(
-            String name, double[] points, int[] connectivity, List<NamedArray> pointFields, List<NamedArray> cellFields) {
+            String name,
+            double[] points,
+            int[] connectivity,
+            List<NamedArray> pointFields,
+            List<NamedArray> cellFields) {
 
         public LineMesh {
             requireTuples("points of " + name, points.length, 3, points.length / 3);
@@ -58,7 +62,10 @@ public record SnapshotFrame(double time, long step, GrainCloud grains, List<Line
         }
     }
 
-    /** A named array, tuples of {@code components} values one after the other; the name ends in its unit where it has one, e.g. {@code radius [m]}. */
+    /**
+     * A named array, tuples of {@code components} values one after the other; the name ends in its unit where it has
+     * one, e.g. {@code radius [m]}.
+     */
     public sealed interface NamedArray {
         String name();
 

@@ -9,10 +9,16 @@ public interface SnapshotWriter {
 
     /** Found by ServiceLoader; makes a writer for one run folder. */
     interface Provider extends reedling.plugin.Provider {
-        /** Opens a series in a folder. When a run is resumed, entries later than {@code resumeTime} (s) are dropped; NaN starts a new series. */
+        /**
+         * Opens a series in a run folder. When a run is resumed, frames later than {@code resumeTime} (s) are dropped
+         * and their files deleted; NaN starts a new series.
+         */
         SnapshotWriter open(Path folder, double resumeTime) throws IOException;
     }
 
-    /** Writes one frame; when it returns, every index in the folder names whole files only. */
+    /**
+     * Writes one frame, in place of one of the same time if there is one; when it returns, every index in the folder
+     * names whole files only.
+     */
     void write(SnapshotFrame frame) throws IOException;
 }

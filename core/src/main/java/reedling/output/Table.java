@@ -51,7 +51,7 @@ public final class Table implements AutoCloseable {
     }
 
     /**
-     * Goes on with a table after rows later than {@code resumeTime} (s), and a last row cut short by a crash, were cut off.
+     * Goes on with a table after rows later than {@code resumeTime} (s), and a last row torn by a crash, were cut off.
      * A table that is not there is started.
      *
      * @throws ReedlingException if its columns are not the given ones
@@ -85,7 +85,10 @@ public final class Table implements AutoCloseable {
         pending.append('\n');
     }
 
-    /** Takes the waiting rows; the job returned writes them and forces them to the disk. Submit it before a checkpoint. */
+    /**
+     * Takes the waiting rows; the job returned writes them and forces them to the disk. Submitted before a checkpoint,
+     * it makes sure that the rows up to that checkpoint are there when the run is resumed from it.
+     */
     public WriteQueue.Job takeRows() {
         byte[] rows = pending.toString().getBytes(StandardCharsets.UTF_8);
         pending.setLength(0);
@@ -106,7 +109,9 @@ public final class Table implements AutoCloseable {
     }
 
     private static String header(List<Column> columns) {
-        return columns.stream().map(column -> "," + quoted(column.heading())).collect(Collectors.joining("", "time [s]", ""));
+        return columns.stream()
+                .map(column -> "," + quoted(column.heading()))
+                .collect(Collectors.joining("", "time [s]", ""));
     }
 
     /** Quoting of RFC 4180, Shafranovich, Common Format and MIME Type for Comma-Separated Values Files, 2005. */
@@ -126,6 +131,11 @@ public final class Table implements AutoCloseable {
     static ReedlingException otherColumns(Path file, String got, String expected) {
         return new ReedlingException(
                 ExitCode.OUTPUT,
-                new Finding(file.toString(), "header", '"' + got + '"', '"' + expected + '"', "Move the table away or resume with the case that began it."));
+                new Finding(
+                        file.toString(),
+                        "header",
+                        '"' + got + '"',
+                        '"' + expected + '"',
+                        "Move the table away or resume with the case that began it."));
     }
 }

@@ -24,7 +24,9 @@ public final class WriteQueue implements AutoCloseable {
         void run() throws IOException;
     }
 
-    private record Named(String what, Job job) {}
+    private record Named(String what, Job job, boolean evenAfterFailure) {}
+
+    private static final Named END = new Named("end", () -> {}, false);
 
     private final BlockingQueue<Named> waiting;
     private final Thread writer;
@@ -51,14 +53,17 @@ public final class WriteQueue implements AutoCloseable {
             throw new IllegalStateException("write queue is closed: " + what);
         }
         checkFailure();
-        put(new Named(what, job));
+        put(new Named(what, job, false));
     }
 
     /** Throws the first failure of any job so far, if there was one; cheap enough for every step. */
     public void checkFailure() {
         ReedlingException first = failure;
         if (first != null) {
-            throw first;
+            // a new one each time: try-with-resources cannot suppress an exception by itself
+            ReedlingException again = new ReedlingException(first.exitCode(), first.findings());
+            again.initCause(first);
+            throw again;
         }
     }
 
@@ -66,7 +71,7 @@ public final class WriteQueue implements AutoCloseable {
     public void drain() {
         if (!closed) {
             CountDownLatch reached = new CountDownLatch(1);
-            put(new Named("", reached::countDown));
+            put(new Named("drain", reached::countDown, true));
             uninterrupted(reached::await);
         }
         checkFailure();
@@ -89,8 +94,6 @@ public final class WriteQueue implements AutoCloseable {
         checkFailure();
     }
 
-    private static final Named END = new Named("end", () -> {});
-
     private void put(Named job) {
         if (!waiting.offer(job)) {
             long start = System.nanoTime();
@@ -103,8 +106,7 @@ public final class WriteQueue implements AutoCloseable {
         Named[] next = new Named[1];
         do {
             uninterrupted(() -> next[0] = waiting.take());
-            boolean marker = next[0].what.isEmpty();
-            if (marker || failure == null) {
+            if (failure == null || next[0].evenAfterFailure) {
                 runOne(next[0]);
             }
         } while (next[0] != END);
@@ -118,11 +120,18 @@ public final class WriteQueue implements AutoCloseable {
         } catch (IOException cause) {
             failure = new ReedlingException(
                     ExitCode.INPUT_OUTPUT,
-                    new Finding(named.what, "", "not written: " + cause, "", "Check free space and permissions of the run folder, then resume."),
+                    new Finding(
+                            named.what,
+                            "",
+                            "not written: " + cause,
+                            "",
+                            "Check free space and permissions of the run folder, then resume."),
                     cause);
         } catch (RuntimeException | Error cause) {
             failure = new ReedlingException(
-                    ExitCode.INTERNAL, new Finding(named.what, "", "not written: " + cause, "", "Please report this fault."), cause);
+                    ExitCode.INTERNAL,
+                    new Finding(named.what, "", "not written: " + cause, "", "Please report this fault."),
+                    cause);
         }
     }
 

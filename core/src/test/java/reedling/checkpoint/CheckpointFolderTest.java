@@ -77,7 +77,8 @@ class CheckpointFolderTest {
         damage(checkpoints.write(checkpoint(2)));
         assertThatThrownBy(() -> CheckpointFolder.latest(folder))
                 .isInstanceOfSatisfying(
-                        ReedlingException.class, refusal -> assertThat(refusal.findings()).hasSize(2));
+                        ReedlingException.class,
+                        refusal -> assertThat(refusal.findings()).hasSize(2));
     }
 
     private long latestStep() throws IOException {
@@ -93,7 +94,8 @@ class CheckpointFolderTest {
     }
 
     private static CheckpointWriter checkpoint(long step) throws IOException {
-        CheckpointWriter writer = new CheckpointWriter(new CheckpointHeader("0.1.0", "digest", step, 0.5 * step, Map.of()));
+        CheckpointWriter writer =
+                new CheckpointWriter(new CheckpointHeader("0.1.0", "digest", step, 0.5 * step, Map.of()));
         writer.section("grains").writeDouble(step);
         return writer;
     }

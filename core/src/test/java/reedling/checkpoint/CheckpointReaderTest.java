@@ -71,7 +71,8 @@ class CheckpointReaderTest {
             assertThat(backDoubles).isEqualTo(doubles);
             int[] backInts = new int[ints.length];
             in.readInts(backInts, 1, ints.length);
-            assertThat(Arrays.copyOfRange(backInts, 1, ints.length)).isEqualTo(Arrays.copyOfRange(ints, 1, ints.length));
+            assertThat(Arrays.copyOfRange(backInts, 1, ints.length))
+                    .isEqualTo(Arrays.copyOfRange(ints, 1, ints.length));
             assertThat(in.readText()).isEqualTo("grün");
             long[] backLongs = new long[1_000];
             in.readLongs(backLongs, 0, 1_000);
@@ -116,7 +117,8 @@ class CheckpointReaderTest {
         byte[] section = whole.clone();
         section[whole.length - 1] ^= 1;
         assertThat(refusal(section).getMessage()).contains("section clock: is damaged");
-        assertThat(refusal(Arrays.copyOf(whole, whole.length + 1)).getMessage()).contains("nothing after the last section");
+        assertThat(refusal(Arrays.copyOf(whole, whole.length + 1)).getMessage())
+                .contains("nothing after the last section");
     }
 
     @Test
@@ -141,8 +143,8 @@ class CheckpointReaderTest {
     private ReedlingException refusal(byte[] content) throws IOException {
         Path damaged = folder.resolve("damaged");
         Files.write(damaged, content);
-        ReedlingException refusal =
-                catchThrowableOfType(ReedlingException.class, () -> CheckpointReader.open(damaged).close());
+        ReedlingException refusal = catchThrowableOfType(
+                ReedlingException.class, () -> CheckpointReader.open(damaged).close());
         assertThat(refusal).isNotNull();
         assertThat(refusal.exitCode()).isEqualTo(ExitCode.CHECKPOINT);
         return refusal;

@@ -23,7 +23,9 @@ class RunFolderTest {
         Path path = parent.resolve("a/b");
         RunFolder.create(path).close();
         assertThatThrownBy(() -> RunFolder.create(path))
-                .isInstanceOfSatisfying(ReedlingException.class, refusal -> assertThat(refusal.exitCode()).isEqualTo(ExitCode.OUTPUT))
+                .isInstanceOfSatisfying(
+                        ReedlingException.class,
+                        refusal -> assertThat(refusal.exitCode()).isEqualTo(ExitCode.OUTPUT))
                 .hasMessageContaining("Choose another name, or resume that run.");
         RunFolder.resume(path).close();
     }
@@ -33,7 +35,8 @@ class RunFolderTest {
         Path path = parent.resolve("run");
         try (RunFolder first = RunFolder.create(path)) {
             assertThatThrownBy(() -> RunFolder.resume(path)).hasMessageContaining("in use by this process");
-            assertThat(lockAttemptByAnotherProcess(path)).contains("in use by process " + ProcessHandle.current().pid());
+            assertThat(lockAttemptByAnotherProcess(path))
+                    .contains("in use by process " + ProcessHandle.current().pid());
         }
         assertThat(lockAttemptByAnotherProcess(path)).isEqualTo("free");
     }
@@ -68,7 +71,11 @@ class RunFolderTest {
         try (RunFolder folder = RunFolder.resume(path)) {
             folder.log("resumed");
         }
-        assertThat(Files.readAllLines(path.resolve("run.log"))).hasSize(2).last().asString().endsWith("Z resumed");
+        assertThat(Files.readAllLines(path.resolve("run.log")))
+                .hasSize(2)
+                .last()
+                .asString()
+                .endsWith("Z resumed");
     }
 
     private static String lockAttemptByAnotherProcess(Path path) throws IOException {

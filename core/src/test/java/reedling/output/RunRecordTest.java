@@ -28,22 +28,20 @@ class RunRecordTest {
                 .set("machine", Map.of("cores", 2))
                 .set("none", Map.of())
                 .set("seed", 43L);
-        assertThat(record.text())
-                .isEqualTo(
-                        """
-                        {
-                          "program version": "0.1.0",
-                          "seed": 43,
-                          "end time [s]": 0.5,
-                          "ledger drift": null,
-                          "finished": false,
-                          "plugins": ["hertz", "gravity"],
-                          "machine": {
-                            "cores": 2
-                          },
-                          "none": {}
-                        }
-                        """);
+        assertThat(record.text()).isEqualTo("""
+            {
+              "program version": "0.1.0",
+              "seed": 43,
+              "end time [s]": 0.5,
+              "ledger drift": null,
+              "finished": false,
+              "plugins": ["hertz", "gravity"],
+              "machine": {
+                "cores": 2
+              },
+              "none": {}
+            }
+            """);
     }
 
     @Test

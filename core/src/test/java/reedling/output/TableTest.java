@@ -17,8 +17,10 @@ import reedling.error.ReedlingException;
 
 class TableTest {
 
-    private static final List<Table.Column> COLUMNS =
-            List.of(new Table.Column("mass on deck", "kg"), new Table.Column("passed, all", ""), new Table.Column("größe", "m"));
+    private static final List<Table.Column> COLUMNS = List.of(
+            new Table.Column("mass on deck", "kg"),
+            new Table.Column("passed, all", ""),
+            new Table.Column("größe", "m"));
     private static final String HEADER = "time [s],mass on deck [kg],\"passed, all\",größe [m]\n";
 
     @TempDir

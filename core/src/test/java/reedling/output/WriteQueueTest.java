@@ -61,12 +61,28 @@ class WriteQueueTest {
         });
         assertThatThrownBy(queue::drain)
                 .isInstanceOfSatisfying(
-                        ReedlingException.class, failure -> assertThat(failure.exitCode()).isEqualTo(ExitCode.INPUT_OUTPUT))
+                        ReedlingException.class,
+                        failure -> assertThat(failure.exitCode()).isEqualTo(ExitCode.INPUT_OUTPUT))
                 .hasMessageContaining("snapshot at 0.1 s: is not written", "No space left on device");
-        assertThatThrownBy(() -> queue.submit("later", () -> done.add("later"))).hasMessageContaining("snapshot at 0.1 s");
+        assertThatThrownBy(() -> queue.submit("later", () -> done.add("later")))
+                .hasMessageContaining("snapshot at 0.1 s");
         assertThatThrownBy(queue::checkFailure).hasMessageContaining("snapshot at 0.1 s");
         assertThatThrownBy(queue::close).hasMessageContaining("snapshot at 0.1 s");
         assertThat(done).isEmpty();
+    }
+
+    @Test
+    void failureReportedInsideTheBlockAndByItsCloseIsOneException() {
+        assertThatThrownBy(() -> {
+                    try (WriteQueue queue = new WriteQueue(2)) {
+                        queue.submit("table", () -> {
+                            throw new IOException("No space left on device");
+                        });
+                        queue.drain();
+                    }
+                })
+                .isInstanceOf(ReedlingException.class)
+                .hasMessageContaining("No space left on device");
     }
 
     @Test
@@ -82,7 +98,8 @@ class WriteQueueTest {
                     }
                 })
                 .isInstanceOfSatisfying(
-                        ReedlingException.class, failure -> assertThat(failure.exitCode()).isEqualTo(ExitCode.INTERNAL));
+                        ReedlingException.class,
+                        failure -> assertThat(failure.exitCode()).isEqualTo(ExitCode.INTERNAL));
         assertThatThrownBy(queue::close).isInstanceOf(ReedlingException.class);
         queue.close();
     }

@@ -32,17 +32,16 @@ final class PvdIndex {
      */
     record Entry(double time, int part, String name, String file) {
         String xml() {
-            return "<DataSet timestep=\"" + time + "\" group=\"\" part=\"" + part + "\" name=\"" + VtkDocument.escaped(name)
-                    + "\" file=\"" + VtkDocument.escaped(file) + "\"/>\n";
+            return "<DataSet timestep=\"" + time + "\" group=\"\" part=\"" + part + "\" name=\""
+                    + VtkDocument.escaped(name) + "\" file=\"" + VtkDocument.escaped(file) + "\"/>\n";
         }
     }
 
-    private static final String HEAD =
-            """
-            <?xml version="1.0"?>
-            <VTKFile type="Collection" version="1.0" byte_order="LittleEndian" header_type="UInt64">
-            <Collection>
-            """;
+    private static final String HEAD = """
+        <?xml version="1.0"?>
+        <VTKFile type="Collection" version="1.0" byte_order="LittleEndian" header_type="UInt64">
+        <Collection>
+        """;
     private static final String TAIL = "</Collection>\n</VTKFile>\n";
 
     private final Path path;
@@ -73,7 +72,12 @@ final class PvdIndex {
         } catch (SAXException | ParserConfigurationException | NumberFormatException cause) {
             throw new ReedlingException(
                     ExitCode.INPUT_OUTPUT,
-                    new Finding(path.toString(), "", "unreadable: " + cause.getMessage(), "an index of snapshots", "Move it away to resume without the earlier snapshots."),
+                    new Finding(
+                            path.toString(),
+                            "",
+                            "unreadable: " + cause.getMessage(),
+                            "an index of snapshots",
+                            "Move it away to resume without the earlier snapshots."),
                     cause);
         }
     }

@@ -22,18 +22,25 @@ record VtkArray(String type, String name, int components, long bytes, Values val
     static VtkArray of(NamedArray array) {
         return switch (array) {
             case NamedArray.Floats(String name, int components, float[] values) ->
-                new VtkArray("Float32", name, components, 4L * values.length, out -> out.writeFloats(values, 0, values.length));
+                new VtkArray(
+                        "Float32",
+                        name,
+                        components,
+                        4L * values.length,
+                        out -> out.writeFloats(values, 0, values.length));
             case NamedArray.Doubles(String name, int components, double[] values) -> doubles(name, components, values);
             case NamedArray.Ints(String name, int components, int[] values) -> ints(name, components, values);
         };
     }
 
     static VtkArray doubles(String name, int components, double... values) {
-        return new VtkArray("Float64", name, components, 8L * values.length, out -> out.writeDoubles(values, 0, values.length));
+        return new VtkArray(
+                "Float64", name, components, 8L * values.length, out -> out.writeDoubles(values, 0, values.length));
     }
 
     static VtkArray ints(String name, int components, int... values) {
-        return new VtkArray("Int32", name, components, 4L * values.length, out -> out.writeInts(values, 0, values.length));
+        return new VtkArray(
+                "Int32", name, components, 4L * values.length, out -> out.writeInts(values, 0, values.length));
     }
 
     static VtkArray longs(String name, long... values) {

@@ -21,7 +21,8 @@ public final class VtkProvider implements SnapshotWriter.Provider {
 
     @Override
     public String summary() {
-        return "Writes grains as .vtp, structures as .vtu and one .pvd index, for ParaView and other readers of VTK files.";
+        return "Writes grains as .vtp, structures as .vtu and one .pvd index, for ParaView and other readers of VTK"
+                + " files.";
     }
 
     @Override

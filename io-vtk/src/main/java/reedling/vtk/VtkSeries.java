@@ -40,7 +40,10 @@ final class VtkSeries implements SnapshotWriter {
     private VtkSeries(Path folder, PvdIndex index) {
         this.folder = folder;
         this.index = index;
-        nextNumber = index.entries().stream().mapToInt(entry -> number(entry.file()) + 1).max().orElse(0);
+        nextNumber = index.entries().stream()
+                .mapToInt(entry -> number(entry.file()) + 1)
+                .max()
+                .orElse(0);
     }
 
     static VtkSeries open(Path folder, double resumeTime) throws IOException {
@@ -63,7 +66,12 @@ final class VtkSeries implements SnapshotWriter {
         if (Files.exists(path)) {
             throw new ReedlingException(
                     ExitCode.OUTPUT,
-                    new Finding(path.toString(), "", "an index of an earlier run", "a free name", "Choose another folder, or resume that run."));
+                    new Finding(
+                            path.toString(),
+                            "",
+                            "an index of an earlier run",
+                            "a free name",
+                            "Choose another folder, or resume that run."));
         }
     }
 

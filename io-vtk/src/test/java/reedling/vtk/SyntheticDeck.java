@@ -37,11 +37,14 @@ final class SyntheticDeck {
             velocity[3 * i + 2] = (float) (0.16 * Math.cos(5 * i + 40 * time));
             id[i] = i;
         }
-        return new GrainCloud(count, positions, List.of(
-                new NamedArray.Doubles("radius [m]", 1, radius),
-                new NamedArray.Floats("velocity [m/s]", 3, velocity),
-                new NamedArray.Ints("lot", 1, lot),
-                new NamedArray.Ints("id", 1, id)));
+        return new GrainCloud(
+                count,
+                positions,
+                List.of(
+                        new NamedArray.Doubles("radius [m]", 1, radius),
+                        new NamedArray.Floats("velocity [m/s]", 3, velocity),
+                        new NamedArray.Ints("lot", 1, lot),
+                        new NamedArray.Ints("id", 1, id)));
     }
 
     private static LineMesh wires(double time, int wires, int elementsPerWire) {
@@ -79,6 +82,10 @@ final class SyntheticDeck {
                 new NamedArray.Floats("max fibre stress [Pa]", 1, stress),
                 new NamedArray.Floats("radius [m]", 1, radius)));
         return new LineMesh(
-                "wires", points, connectivity, List.of(new NamedArray.Floats("displacement [m]", 3, displacement)), cells);
+                "wires",
+                points,
+                connectivity,
+                List.of(new NamedArray.Floats("displacement [m]", 3, displacement)),
+                cells);
     }
 }

@@ -30,6 +30,8 @@ final class SyntheticRun {
             milliseconds[frame] = 1e-6 * (System.nanoTime() - start);
         }
         java.util.Arrays.sort(milliseconds);
-        System.out.printf("frames %d, milliseconds each: median %.2f, largest %.2f%n", sizes[0], milliseconds[sizes[0] / 2], milliseconds[sizes[0] - 1]);
+        System.out.printf(
+                "frames %d, milliseconds each: median %.2f, largest %.2f%n",
+                sizes[0], milliseconds[sizes[0] / 2], milliseconds[sizes[0] - 1]);
     }
 }
