@@ -29,7 +29,7 @@ final class ContactFinish {
 
     static void finish(ContactBlock block, float[] ledger, int ledgerAt, ContactTally tally) {
         if (block.energyDue()) {
-            storedEnergy(block, tally);
+            tally.store(block, ContactTally.SPRINGS);
         }
         if (Lanes.VECTORISED) {
             work(block, ledger, ledgerAt, tally);
@@ -37,13 +37,6 @@ final class ContactFinish {
         } else {
             workScalar(block, ledger, ledgerAt, tally);
             rowsScalar(block, tally);
-        }
-    }
-
-    private static void storedEnergy(ContactBlock block, ContactTally tally) {
-        double[] c = block.columns();
-        for (int r = 0; r < block.rows(); r++) {
-            tally.sums()[ContactTally.STORED + (r & Lanes.TILE - 1)] += c[at(Column.STORED_ENERGY) + r];
         }
     }
 

@@ -2,6 +2,8 @@
 package reedling.coupling;
 
 import java.util.Arrays;
+import reedling.contact.Column;
+import reedling.contact.ContactBlock;
 import reedling.math.Lanes;
 
 /**
@@ -22,10 +24,13 @@ public final class ContactTally {
     /** Accumulators of the work against rolling resistance. */
     static final int ROLLING = 2 * Lanes.TILE;
 
-    /** Accumulators of the stored energy. */
+    /** Accumulators of the energy that normal forces store. */
     static final int STORED = 3 * Lanes.TILE;
 
-    private final double[] sums = new double[4 * Lanes.TILE];
+    /** Accumulators of the energy in tangential and rolling springs. */
+    static final int SPRINGS = 4 * Lanes.TILE;
+
+    private final double[] sums = new double[5 * Lanes.TILE];
     private double shortestDuration = Double.POSITIVE_INFINITY;
     private double approachLimit = Double.POSITIVE_INFINITY;
     private double largestFrequencySquared;
@@ -46,6 +51,14 @@ public final class ContactTally {
         return sums;
     }
 
+    /** Adds the stored-energy column of a block to one of the channels. */
+    void store(ContactBlock block, int channel) {
+        double[] c = block.columns();
+        for (int r = 0; r < block.rows(); r++) {
+            sums[channel + (r & Lanes.TILE - 1)] += c[ContactBlock.at(Column.STORED_ENERGY) + r];
+        }
+    }
+
     private double sum(int channel) {
         double total = 0;
         for (int k = 0; k < Lanes.TILE; k++) {
@@ -59,7 +72,12 @@ public final class ContactTally {
         return sum(NORMAL) + sum(SLIDING) + sum(ROLLING);
     }
 
-    /** Energy stored in contact springs, J; 0 unless it was asked for. */
+    /** Energy in tangential and rolling springs, J; 0 unless it was asked for. */
+    public double springEnergy() {
+        return sum(SPRINGS);
+    }
+
+    /** Energy that normal forces store, J; 0 unless it was asked for. */
     public double storedEnergy() {
         return sum(STORED);
     }

@@ -15,6 +15,10 @@ final class StageRunner {
 
     static void run(ContactBlock block, LawSet.Bound laws, float[] ledger, int ledgerAt, ContactTally tally) {
         laws.normal().apply(block);
+        if (block.energyDue()) {
+            tally.store(block, ContactTally.STORED);
+            block.clear(Column.STORED_ENERGY, 1);
+        }
         NormalSolve.solve(block, ledger, ledgerAt, tally);
         ContactKernel tangential = laws.tangential();
         if (tangential != null) {

@@ -42,6 +42,10 @@ public final class StepContext {
         return pastStep;
     }
 
+    void pastStep(double seconds) {
+        pastStep = seconds;
+    }
+
     double travel() {
         return travel;
     }

@@ -1,0 +1,286 @@
+// SPDX-License-Identifier: Apache-2.0
+package reedling.coupling;
+
+import java.util.ArrayList;
+import java.util.List;
+import reedling.contact.LawSet;
+import reedling.field.Field;
+import reedling.material.MaterialTable;
+import reedling.neighbour.Chunk;
+import reedling.neighbour.NeighbourLists;
+import reedling.parallel.Phase;
+import reedling.parallel.WorkerTeam;
+import reedling.particle.GrainStore;
+import reedling.structure.Structure;
+import reedling.wall.Wall;
+
+/**
+ * Everything that pushes grains and structures, and the phases in which they are pushed and moved. A force phase works
+ * through chunks of grains and ranges of elements; a move phase through chunks and ranges of nodes. Between two phases
+ * stands the team's barrier.
+ *
+ * <p>Threads: phases are started by one thread; every task writes only what its chunk or range owns.
+ */
+public final class Interactions {
+
+    private final GrainStore grains;
+    private final Structure structure;
+    private final List<Field> fields;
+    private final NeighbourLists lists;
+    private final CandidateWatch candidates;
+    private final PairForces pairs;
+    private final WallFacets facets;
+    private final WallContacts walls;
+    private final WireContacts wires;
+    private final List<Workspace> workspaces = new ArrayList<>();
+    private final List<ContactTally> coarse = new ArrayList<>();
+    private final List<ContactTally> fine = new ArrayList<>();
+    private final List<MoveTally> moves = new ArrayList<>();
+    private double[] potentials = new double[0];
+
+    private final StepContext coarseStep;
+    private final StepContext fineStep;
+    private final Phase forcePhase = this::forceTask;
+    private final Phase fineForcePhase = this::fineForceTask;
+    private final Phase movePhase = this::moveTask;
+    private final Phase fineMovePhase = this::fineMoveTask;
+
+    private double time;
+    private double pastFine;
+    private double nextCoarse;
+    private double nextFine;
+    private boolean energyDue;
+
+    /**
+     * @param materialOfBody material number of each body of the structure
+     * @param stepsPerContact steps in the duration of an impact
+     * @param startTime s
+     */
+    public Interactions(
+            GrainStore grains,
+            Structure structure,
+            int[] materialOfBody,
+            List<Wall> walls,
+            List<Field> fields,
+            LawSet laws,
+            MaterialTable materials,
+            double stepsPerContact,
+            double startTime) {
+        this.grains = grains;
+        this.structure = structure;
+        this.fields = List.copyOf(fields);
+        lists = new NeighbourLists(materials.materials().size(), laws.signedColumns());
+        candidates = new CandidateWatch(laws);
+        pairs = new PairForces(laws);
+        facets = new WallFacets(walls, startTime);
+        this.walls = new WallContacts(laws, materials, facets);
+        wires = new WireContacts(laws, materials, structure, materialOfBody);
+        coarseStep = new StepContext(stepsPerContact);
+        fineStep = new StepContext(stepsPerContact);
+        time = startTime;
+    }
+
+    public NeighbourLists lists() {
+        return lists;
+    }
+
+    public WallFacets facets() {
+        return facets;
+    }
+
+    public WallContacts walls() {
+        return walls;
+    }
+
+    public WireContacts wires() {
+        return wires;
+    }
+
+    /** Tallies of the coarse contacts, one a chunk. */
+    public List<ContactTally> coarse() {
+        return coarse.subList(0, chunkCount());
+    }
+
+    /** Tallies of the contacts with wires in the last fine pass, one a chunk. */
+    public List<ContactTally> fine() {
+        return fine.subList(0, chunkCount());
+    }
+
+    /** Tallies of the last move, one a chunk. */
+    public List<MoveTally> moves() {
+        return moves.subList(0, chunkCount());
+    }
+
+    private int chunkCount() {
+        return lists.chunks().size();
+    }
+
+    /**
+     * Sorts the grains, drops those marked, and lists everything that may touch before the next search.
+     *
+     * @param margin search margin, m
+     * @param removed grains to drop, or an empty array
+     */
+    public void search(double margin, boolean[] removed, WorkerTeam team) {
+        walls.copyOut(team);
+        wires.copyOut(team);
+        lists.search(grains, margin, removed, team);
+        walls.list(lists, grains, margin, team);
+        double largest = 0;
+        for (int g = 0; g < grains.count(); g++) {
+            largest = Math.max(largest, grains.radius(g));
+        }
+        wires.list(lists, grains, margin, largest, team);
+        makeRoom(team.workers());
+    }
+
+    /** Makes room for the chunks there are and so many workers. */
+    void makeRoom(int workers) {
+        while (coarse.size() < chunkCount()) {
+            coarse.add(new ContactTally());
+            fine.add(new ContactTally());
+            moves.add(new MoveTally());
+        }
+        while (workspaces.size() < workers) {
+            workspaces.add(new Workspace());
+        }
+        if (potentials.length < coarse.size()) {
+            potentials = new double[coarse.size()];
+        }
+    }
+
+    /**
+     * Computes all forces at the present positions.
+     *
+     * @param now time of the positions, s
+     * @param past the step that led here: coarse and fine, s
+     * @param longest length the next step will not exceed, s
+     * @param travel accumulated largest displacement since the last search, m
+     * @param largestSpeed of any body, m/s
+     * @param reportDue whether energies are wanted
+     */
+    public void force(
+            double now,
+            PastStep past,
+            double longest,
+            double travel,
+            double largestSpeed,
+            boolean reportDue,
+            WorkerTeam team) {
+        time = now;
+        pastFine = past.fine();
+        energyDue = reportDue;
+        coarseStep.open(past.coarse(), longest, travel, largestSpeed, reportDue);
+        fineStep.open(past.fine(), longest, travel, largestSpeed, reportDue);
+        wires.openPass();
+        team.run(forcePhase, chunkCount() + structure.elementTasks());
+    }
+
+    private void forceTask(int task, int worker) {
+        if (task >= chunkCount()) {
+            structure.elementForces(task - chunkCount(), pastFine);
+            return;
+        }
+        Chunk chunk = lists.chunks().get(task);
+        ContactTally tally = coarse.get(task);
+        tally.clear();
+        Workspace workspace = workspaces.get(worker);
+        candidates.look(
+                chunk, grains, lists.layout(), coarseStep.travel(), coarseStep.reach(), coarseStep.approach(), tally);
+        pairs.apply(chunk, grains, coarseStep, workspace.block(), tally);
+        walls.apply(task, grains, coarseStep, workspace, tally);
+        double potential = 0;
+        for (int k = 0; k < fields.size(); k++) {
+            fields.get(k).apply(grains, chunk.from(), chunk.to(), time);
+            if (energyDue) {
+                potential += fields.get(k).potentialEnergy(grains, chunk.from(), chunk.to());
+            }
+        }
+        potentials[task] = potential;
+        wireForces(task, worker);
+    }
+
+    private void wireForces(int task, int worker) {
+        ContactTally tally = fine.get(task);
+        tally.clear();
+        wires.apply(task, grains, fineStep, workspaces.get(worker), worker, tally);
+    }
+
+    /** Computes the forces of elements and wire contacts after a fine step, s. */
+    public void fineForce(double past, WorkerTeam team) {
+        pastFine = past;
+        fineStep.pastStep(past);
+        wires.openPass();
+        team.run(fineForcePhase, chunkCount() + structure.elementTasks());
+    }
+
+    private void fineForceTask(int task, int worker) {
+        if (task >= chunkCount()) {
+            structure.elementForces(task - chunkCount(), pastFine);
+        } else {
+            wireForces(task, worker);
+        }
+    }
+
+    /**
+     * Closes the past step and opens the next; the supports must stand at the end of the first fine step.
+     *
+     * @param past the step that led here
+     * @param coarseNext the next coarse step, s
+     * @param fineNext its fine step, s
+     */
+    public void move(PastStep past, double coarseNext, double fineNext, WorkerTeam team) {
+        coarseStep.pastStep(past.coarse());
+        pastFine = past.fine();
+        nextCoarse = coarseNext;
+        nextFine = fineNext;
+        team.run(movePhase, chunkCount() + structure.nodeTasks());
+    }
+
+    private void moveTask(int task, int worker) {
+        if (task >= chunkCount()) {
+            structure.moveNodes(task - chunkCount(), pastFine, nextFine, wires);
+            return;
+        }
+        Chunk chunk = lists.chunks().get(task);
+        MoveTally tally = moves.get(task);
+        WireChunk near = wires.chunk(task);
+        tally.clear();
+        GrainMotion.importForces(chunk, grains);
+        GrainMotion.move(
+                chunk, grains, 0.5 * coarseStep.pastStep(), nextCoarse, energyDue, near.near(), tally);
+        NearMotion.first(near, grains, 0.5 * pastFine, nextCoarse, nextFine, energyDue, tally);
+    }
+
+    /** Opens a further fine step of the same length; the supports must stand at its end. */
+    public void fineMove(WorkerTeam team) {
+        team.run(fineMovePhase, chunkCount() + structure.nodeTasks());
+    }
+
+    private void fineMoveTask(int task, int worker) {
+        if (task >= chunkCount()) {
+            structure.moveNodes(task - chunkCount(), nextFine, nextFine, wires);
+        } else {
+            NearMotion.further(wires.chunk(task), grains, nextFine, moves.get(task));
+        }
+    }
+
+    /** Potential energy of the grains in all fields at the last force phase, J; 0 unless energies were wanted. */
+    public double potentialEnergy() {
+        double total = 0;
+        for (int c = 0; c < chunkCount(); c++) {
+            total += potentials[c];
+        }
+        return total;
+    }
+
+    /** Gap between a point and the nearest wall or wire, m; for placing new grains. */
+    public double gapToSurfaces(double x, double y, double z) {
+        double[] normal = new double[3];
+        double nearest = Double.POSITIVE_INFINITY;
+        for (int facet = 0; facet < facets.count(); facet++) {
+            nearest = Math.min(nearest, facets.gap(facet, x, y, z, normal));
+        }
+        return Math.min(nearest, wires.elements().gap(x, y, z));
+    }
+}

@@ -1,0 +1,335 @@
+// SPDX-License-Identifier: Apache-2.0
+package reedling.run;
+
+import reedling.check.EnergyLedger;
+import reedling.check.StateGuard;
+import reedling.coupling.ContactTally;
+import reedling.coupling.Interactions;
+import reedling.coupling.MoveTally;
+import reedling.coupling.PastStep;
+import reedling.parallel.WorkerTeam;
+import reedling.time.StepControl;
+import reedling.time.StepLimits;
+import reedling.wall.WallPose;
+
+/**
+ * A run's state and its step: force, choose the step, move, bend, search. Read {@link #step} to follow a grain through
+ * one time step.
+ *
+ * <p>Threads: all methods are called by one thread; phases inside use the team.
+ */
+public final class Simulation {
+
+    /** A fine step may take so much of the stability limit of contacts with structure nodes. */
+    private static final double FINE_STABLE = 0.4;
+
+    /** A coarse step may take so much of the stability limit of lasting contacts. */
+    private static final double COARSE_STABLE = 0.8;
+
+    /** Steps in the fastest prescribed period. */
+    private static final double PER_PERIOD = 100;
+
+    /** Share of the search margin that one step may use up. */
+    private static final double MARGIN_SHARE = 0.2;
+
+    private static final int MOST_FINE_STEPS = 10_000;
+
+    /** Steps between two looks at the structure's own stable step, which tension changes slowly. */
+    private static final int STRUCTURE_EVERY = 16;
+
+    private final Model model;
+    private final WorkerTeam team;
+    private final Interactions interactions;
+    private final StepControl control;
+    private final EnergyLedger ledger;
+    private final Passage passage;
+    private final GrainTraffic traffic;
+
+    private long step;
+    private double time;
+    private double pastStep;
+    private double pastFine;
+    private double travel;
+    private double largestSpeed;
+    private double moveFrequencySquared;
+    private double structureStep = Double.POSITIVE_INFINITY;
+    private int fineSteps = 1;
+    private long searches;
+    private long grainSteps;
+    private StepLimits limits = new StepLimits(0, 0, 0, 0, 0, 0);
+
+    public Simulation(Model model, WorkerTeam team) {
+        this.model = model;
+        this.team = team;
+        interactions = new Interactions(
+                model.grains(),
+                model.structure(),
+                model.materialOfBody(),
+                model.walls(),
+                model.fields(),
+                model.laws(),
+                model.materials(),
+                model.steps().stepsPerContact(),
+                0);
+        control = new StepControl(model.steps().stepsPerContact(), model.steps().maximum());
+        ledger = new EnergyLedger(model.walls().size());
+        passage = new Passage(model.lots().size(), model.exits().outlets().size() + 1);
+        traffic = new GrainTraffic(model, interactions, passage, ledger);
+    }
+
+    /** Places the first grains and lists all pairs; call once, before the first step of a fresh run. */
+    public void begin() {
+        traffic.bookInitialGrains();
+        structureStep = model.structure().stableStep();
+        traffic.release(0, 0);
+        search(new boolean[0]);
+        largestSpeed = speedBeforeFirstStep();
+    }
+
+    private double speedBeforeFirstStep() {
+        double largest = 0;
+        for (int g = 0; g < model.grains().count(); g++) {
+            largest = Math.max(largest, traffic.speed(g));
+        }
+        return Math.max(largest, surfaceSpeed());
+    }
+
+    /** One step. */
+    public void step() {
+        boolean report = step % model.steps().reportEvery() == 0;
+        PastStep past = new PastStep(pastStep, pastFine);
+
+        // force
+        interactions.force(time, past, control.longestNext(), travel, largestSpeed, report, team);
+        bookContacts(true);
+        double strain = report ? model.structure().strainEnergy() : 0;
+        ledger.walls(interactions.walls().sumLoads(), interactions.facets(), pastStep);
+
+        // choose the step
+        double next = chooseStep();
+        double fine = next / fineSteps;
+
+        // move; the supports stand at the end of the first fine step
+        model.structure().poseSupports(fineSteps == 1 ? time + next : time + fine, fine);
+        interactions.move(past, next, fine, team);
+        if (report) {
+            ledger.report(interactions, model.structure(), strain);
+        }
+
+        // bend: further fine steps of the structure and the grains near it
+        for (int k = 1; k < fineSteps; k++) {
+            interactions.fineForce(fine, team);
+            bookContacts(false);
+            model.structure().poseSupports(k + 1 == fineSteps ? time + next : time + (k + 1) * fine, fine);
+            interactions.fineMove(team);
+        }
+        closeStep(next, fine);
+    }
+
+    private void bookContacts(boolean coarseToo) {
+        if (coarseToo) {
+            StateGuard.contacts(interactions.coarse(), interactions.lists().chunks(), model.grains(), step, time);
+            ledger.contacts(interactions.coarse());
+        }
+        StateGuard.contacts(interactions.fine(), interactions.lists().chunks(), model.grains(), step, time);
+        ledger.contacts(interactions.fine());
+    }
+
+    private double chooseStep() {
+        double duration = Double.POSITIVE_INFINITY;
+        double approach = Double.POSITIVE_INFINITY;
+        double frequencySquared = moveFrequencySquared;
+        boolean touching = false;
+        for (ContactTally tally : interactions.coarse()) {
+            duration = Math.min(duration, tally.shortestDuration());
+            approach = Math.min(approach, tally.approachLimit());
+            frequencySquared = Math.max(frequencySquared, tally.largestFrequencySquared());
+            touching |= tally.touching();
+        }
+        double fineLimit = fineLimit();
+        for (ContactTally tally : interactions.fine()) {
+            touching |= tally.touching();
+        }
+        limits = new StepLimits(
+                duration / model.steps().stepsPerContact(),
+                approach,
+                persistentLimit(frequencySquared),
+                MARGIN_SHARE * model.steps().margin() / largestSpeed,
+                model.steps().drivenPeriod() / PER_PERIOD,
+                model.steps().maximum());
+        double smallest = limits.smallest();
+        if (!(smallest > 0) || !(fineLimit > 0)) {
+            throw StateGuard.stop(step, time, "step control", "step limit", smallest + " s",
+                    "A law reported a time that is not positive.");
+        }
+        double next = control.choose(smallest, touching);
+        fineSteps = (int) Math.min(MOST_FINE_STEPS + 1.0, Math.ceil(next / fineLimit));
+        if (fineSteps > MOST_FINE_STEPS) {
+            throw StateGuard.stop(step, time, "structure", "fine step", fineLimit + " s",
+                    "More than " + MOST_FINE_STEPS + " fine steps would be needed in one step: use larger elements.");
+        }
+        fineSteps = Math.max(1, fineSteps);
+        return next;
+    }
+
+    private double fineLimit() {
+        if (step % STRUCTURE_EVERY == 0) {
+            structureStep = model.structure().stableStep();
+        }
+        double limit = structureStep;
+        double frequencySquared = 0;
+        for (ContactTally tally : interactions.fine()) {
+            limit = Math.min(limit, tally.shortestDuration() / model.steps().stepsPerContact());
+            limit = Math.min(limit, tally.approachLimit());
+            frequencySquared = Math.max(frequencySquared, tally.largestFrequencySquared());
+        }
+        return Math.min(limit, FINE_STABLE * 2 / Math.sqrt(frequencySquared));
+    }
+
+    private double persistentLimit(double frequencySquared) {
+        double xi = 2 * model.laws().largestDampingRatio(); // densest packing: its mode has twice a pair's frequency
+        return COARSE_STABLE * 2 / Math.sqrt(frequencySquared) * (Math.sqrt(1 + xi * xi) - xi);
+    }
+
+    private void closeStep(double next, double fine) {
+        StateGuard.motion(
+                interactions.moves(),
+                interactions.lists().chunks(),
+                model.grains(),
+                model.structure().nodes(),
+                step,
+                time);
+        time += next;
+        step++;
+        grainSteps += model.grains().count();
+        pastStep = next;
+        pastFine = fine;
+        for (WallPose pose : interactions.facets().walls()) {
+            pose.advance(time, next);
+        }
+        double speedSquared = 0;
+        moveFrequencySquared = 0;
+        for (MoveTally tally : interactions.moves()) {
+            speedSquared = Math.max(speedSquared, tally.largestSpeedSquared());
+            moveFrequencySquared = Math.max(moveFrequencySquared, tally.largestFrequencySquared());
+        }
+        largestSpeed = Math.max(Math.sqrt(speedSquared), surfaceSpeed());
+        travel += largestSpeed * next;
+        searchIfDue();
+    }
+
+    /** Largest speed of any wall or structure node, m/s. */
+    private double surfaceSpeed() {
+        double[] velocity = model.structure().nodes().velocity;
+        double largest = 0;
+        for (int k = 0; k < velocity.length; k += 3) {
+            double squared =
+                    velocity[k] * velocity[k] + velocity[k + 1] * velocity[k + 1] + velocity[k + 2] * velocity[k + 2];
+            largest = squared > largest ? squared : largest;
+        }
+        return Math.max(Math.sqrt(largest), traffic.wallSpeed());
+    }
+
+    private void searchIfDue() {
+        boolean released = traffic.releaseDue(time) && traffic.release(time, pastStep) > 0;
+        boolean used = 2 * (travel + largestSpeed * control.longestNext()) > model.steps().margin();
+        if (released || used) {
+            search(traffic.leaving(pastStep));
+        }
+    }
+
+    private void search(boolean[] removed) {
+        interactions.search(model.steps().margin(), removed, team);
+        travel = 0;
+        searches++;
+    }
+
+    public Model model() {
+        return model;
+    }
+
+    public Interactions interactions() {
+        return interactions;
+    }
+
+    public EnergyLedger ledger() {
+        return ledger;
+    }
+
+    public Passage passage() {
+        return passage;
+    }
+
+    public StepControl control() {
+        return control;
+    }
+
+    /** Time of the present positions, s. */
+    public double time() {
+        return time;
+    }
+
+    /** Steps taken. */
+    public long stepCount() {
+        return step;
+    }
+
+    /** Length of the last step, s. */
+    public double pastStep() {
+        return pastStep;
+    }
+
+    /** Fine steps in the last step. */
+    public int fineSteps() {
+        return fineSteps;
+    }
+
+    /** What bounded the last step. */
+    public StepLimits limits() {
+        return limits;
+    }
+
+    /** Searches so far. */
+    public long searches() {
+        return searches;
+    }
+
+    /** Grains times steps so far. */
+    public long grainSteps() {
+        return grainSteps;
+    }
+
+    /** Workers of the team. */
+    public WorkerTeam team() {
+        return team;
+    }
+
+    /** Numbers of the step loop that decide the next bits, for a checkpoint. */
+    double[] saveClock() {
+        return new double[] {
+            time, pastStep, pastFine, travel, largestSpeed, moveFrequencySquared, structureStep, fineSteps
+        };
+    }
+
+    long[] saveCounts() {
+        return new long[] {step, searches, grainSteps};
+    }
+
+    void restore(double[] clock, long[] counts) {
+        time = clock[0];
+        pastStep = clock[1];
+        pastFine = clock[2];
+        travel = clock[3];
+        largestSpeed = clock[4];
+        moveFrequencySquared = clock[5];
+        structureStep = clock[6];
+        fineSteps = (int) clock[7];
+        step = counts[0];
+        searches = counts[1];
+        grainSteps = counts[2];
+    }
+
+    GrainTraffic traffic() {
+        return traffic;
+    }
+}

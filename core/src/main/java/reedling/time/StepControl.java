@@ -1,0 +1,85 @@
+// SPDX-License-Identifier: Apache-2.0
+package reedling.time;
+
+import reedling.math.StepLadder;
+
+/**
+ * Chooses the step from its limits. While anything touches, steps stand on the rungs of {@link StepLadder}: down at once,
+ * up one rung after as many permitting steps as a contact takes, so that a step never follows the phase of a contact
+ * (which would lose energy systematically). While nothing touches, the step is the limit itself.
+ *
+ * <p>Threads: one thread, between phases.
+ */
+public final class StepControl {
+
+    private static final double RISE = 1.02 * StepLadder.RATIO;
+    private static final double LARGEST_GROWTH = 2;
+    private static final double FREE = 0; // rung while nothing touches
+
+    private final int stepsPerContact;
+    private final double maximum;
+    private double rung = FREE;
+    private int permitting;
+    private double step;
+
+    /**
+     * @param stepsPerContact steps in the duration of an impact
+     * @param maximum longest step of the case, s
+     */
+    public StepControl(int stepsPerContact, double maximum) {
+        this.stepsPerContact = stepsPerContact;
+        this.maximum = maximum;
+    }
+
+    /** Length that the next step will not exceed, s. */
+    public double longestNext() {
+        return step == 0 ? maximum : Math.min(maximum, LARGEST_GROWTH * step);
+    }
+
+    /**
+     * Next step, s.
+     *
+     * @param limit smallest of all limits, s, > 0
+     * @param touching whether any bodies overlap
+     */
+    public double choose(double limit, boolean touching) {
+        double bounded = Math.min(limit, longestNext());
+        if (!touching) {
+            rung = FREE;
+            permitting = 0;
+            step = bounded;
+            return step;
+        }
+        if (rung == FREE || rung > bounded) {
+            rung = StepLadder.floor(bounded);
+            permitting = 0;
+        } else if (bounded > RISE * rung) {
+            permitting++;
+            if (permitting >= stepsPerContact) {
+                rung = StepLadder.floor(rung * RISE);
+                permitting = 0;
+            }
+        } else {
+            permitting = 0;
+        }
+        step = rung;
+        return step;
+    }
+
+    /** The step chosen last, s; 0 before the first. */
+    public double step() {
+        return step;
+    }
+
+    /** Numbers that decide the next choices, for a checkpoint. */
+    public double[] save() {
+        return new double[] {rung, permitting, step};
+    }
+
+    /** Takes numbers that {@link #save} gave. */
+    public void restore(double[] saved) {
+        rung = saved[0];
+        permitting = (int) saved[1];
+        step = saved[2];
+    }
+}
