@@ -5,6 +5,9 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
+import com.sun.management.ThreadMXBean;
+import java.lang.management.ManagementFactory;
+import java.util.EnumSet;
 import org.joml.Vector3d;
 import org.junit.jupiter.api.Test;
 
@@ -93,6 +96,48 @@ class WallPoseTest {
     }
 
     @Test
+    void stepsAndQueriesAllocateNothing() {
+        Motion[] motions = {
+            new Still(),
+            Oscillating.harmonic(new Stroke(Z, 0.0025, 0.4), 20, Timing.from(0, 0.01)),
+            new Turning(new Vector3d(), Z, 30, Timing.from(0, 0.01))
+        };
+        Surface[] surfaces = {
+            new HalfSpace(),
+            new Rectangle(1, 1),
+            new BoxInside(1, 1, 1, EnumSet.of(BoxInside.Face.HIGH_Z)),
+            new BoxOutside(1, 1, 1),
+            new CylinderInside(1, 1),
+            new CylinderOutside(1, 1)
+        };
+        ThreadMXBean threads = (ThreadMXBean) ManagementFactory.getThreadMXBean();
+        for (int k = 0; k < surfaces.length; k++) {
+            Motion motion = motions[k % motions.length];
+            WallPose pose = new WallPose(new Wall("wall", 0, surfaces[k], Placement.world(), motion), 0);
+            query(pose, 10);
+            long few = allocatedBy(threads, pose, 10);
+            long many = allocatedBy(threads, pose, 10_000);
+            assertThat(many - few).as("bytes of 9990 rounds on %s", surfaces[k]).isLessThan(9990);
+        }
+    }
+
+    private long allocatedBy(ThreadMXBean threads, WallPose pose, int rounds) {
+        long before = threads.getCurrentThreadAllocatedBytes();
+        query(pose, rounds);
+        return threads.getCurrentThreadAllocatedBytes() - before;
+    }
+
+    private void query(WallPose pose, int rounds) {
+        for (int k = 0; k < rounds; k++) {
+            pose.advance(k * 1e-5, 1e-5);
+            for (int facet = 0; facet < pose.wall().surface().facets(); facet++) {
+                pose.gap(facet, 0.3, k * 1e-4, 0.6, out);
+            }
+            pose.velocityAt(0.3, 0.4, 0.5, out);
+        }
+    }
+
+    @Test
     void newWallHasNoVelocity() {
         Motion motion = new Gliding(new Vector3d(1, 1, 1), Timing.always());
         WallPose pose = new WallPose(new Wall("belt", 0, new HalfSpace(), Placement.world(), motion), 3);
@@ -102,6 +147,7 @@ class WallPoseTest {
 
     @Test
     void placementRefusesParallelAxes() {
-        assertThatThrownBy(() -> Placement.axes(new Vector3d(), Z, new Vector3d(0, 0, 2))).hasMessageContaining("angle");
+        Vector3d alsoZ = new Vector3d(0, 0, 2);
+        assertThatThrownBy(() -> Placement.axes(new Vector3d(), Z, alsoZ)).hasMessageContaining("angle");
     }
 }
