@@ -11,7 +11,7 @@ import reedling.error.RangeCheck;
  * <p>Where: R radius of the sphere (m), r radius of the cylinder (m), d overlap (m).
  * <p>Valid for: L up to 51 (checked against the exact elliptic solution, within 0.6 %), that is R/r up to 50 outside
  * and R/r up to 0.98 in the bore.
- * <p>Cost: two powers, some 200 ns; where grains keep their radius, ask once per grain and wall.
+ * <p>Cost: two powers; where grains keep their radius, ask once per grain and wall.
  * <p>Errors: a sphere of more than 0.98 times the radius of the bore.
  * <p>Source: J. A. Greenwood, Analysis of elliptical Hertzian contacts, 1997 (the fit F2); K. L. Johnson, Contact
  * Mechanics, 1985, chapter 4 (the exact solution). From memory.

@@ -143,6 +143,21 @@ class SurfaceTest {
     }
 
     @Test
+    void edgeOfACupSeenFromOutsideIsOneContact() {
+        Surface cup = new CylinderInside(0.15, 0.4, true, false);
+        double[][] outside = {{0.155, 0, -0.205}, {0.149, 0, -0.205}, {0.155, 0, -0.199}, {0.155, 0, 0.205}};
+        for (double[] p : outside) {
+            int touching = 0;
+            for (int facet = 0; facet < cup.facets(); facet++) {
+                touching += cup.gap(facet, p[0], p[1], p[2], normal) < 0.01 ? 1 : 0;
+            }
+            assertThat(touching).as("contacts at %s", p).isEqualTo(1);
+        }
+        assertThat(cup.gap(0, 0.145, 0, -0.195, normal)).isEqualTo(0.005, within(1e-15));
+        assertThat(cup.gap(1, 0.145, 0, -0.195, normal)).isEqualTo(0.005, within(1e-15));
+    }
+
+    @Test
     void effectiveRadiusIsTheGrainOnPlanesAndTheHertzLineOnCylinders() {
         assertThat(new HalfSpace().effectiveRadius(0, 0.003)).isEqualTo(0.003);
         assertThat(new CylinderInside(0.1, 1, true, true).effectiveRadius(1, 0.003)).isEqualTo(0.003);
