@@ -9,8 +9,8 @@ import reedling.particle.Lot;
 /**
  * Several lots mixed by mass.
  *
- * <p>The next grain comes from the lot that is furthest behind its share of the mass drawn so far, so that every stretch of
- * a feed holds the shares to within a grain or two; sizes inside a lot are random.
+ * <p>The next grain comes from the lot that is furthest behind its share of the mass drawn so far, so that every
+ * stretch of a feed holds the shares to within a grain or two; sizes inside a lot are random.
  * <p>Formula: deficit of lot i = s_i sum_k m_k - m_i, s_i share, m_i mass drawn (kg); ties go to the earlier lot.
  * <p>Errors: no lot; a material number outside the table. Threads: immutable.
  */
@@ -30,7 +30,8 @@ public final class LotMix {
         double sum = 0;
         for (LotShare each : lots) {
             int material = each.lot().material();
-            check.require(material < known, "material number of " + each.lot().name(), material, "", "less than " + known);
+            String what = "material number of " + each.lot().name();
+            check.require(material < known, what, material, "", "less than " + known);
             sum += each.massPart();
         }
         check.finish();

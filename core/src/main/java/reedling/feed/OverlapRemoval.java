@@ -6,9 +6,10 @@ import java.util.Arrays;
 /**
  * Grows spheres from a loose start to full size and pushes overlapping ones apart.
  *
- * <p>A sweep visits the pairs in list order and moves both spheres of an overlapping pair by half of the overlap, then puts
- * every sphere back between the faces of the box. Growth goes in steps; each step is swept until overlaps are small, the last
- * until they are gone. Below random close packing (0.64 for equal spheres in endless space) this ends.
+ * <p>A sweep visits the pairs in list order and moves both spheres of an overlapping pair by half of the overlap,
+ * then puts every sphere back between the faces of the box. Growth goes in steps; each step is swept until overlaps
+ * are small, the last until they are gone. Below random close packing (0.64 for equal spheres in endless space) this
+ * ends.
  * <p>Source: common practice, no source. Threads: confined to its owner; one thread, hence the same bits every time.
  */
 final class OverlapRemoval {
@@ -44,7 +45,10 @@ final class OverlapRemoval {
         buildList();
     }
 
-    /** Grows from {@code scale} to 1; returns the largest scale at which the overlaps were removed, 1 when all went well. */
+    /**
+     * Grows from {@code scale} to 1; returns the largest scale at which the overlaps were removed, 1 when all went
+     * well.
+     */
     double grow(double scale) {
         double reached = scale;
         while (reached < 1) {

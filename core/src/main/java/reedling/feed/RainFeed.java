@@ -14,9 +14,9 @@ import reedling.particle.RandomStream;
 /**
  * A raining feed at work: which grains are due, which wait for room, what has been fed.
  *
- * <p>A grain is due once the owed amount covers it in full. Due grains enter in the order drawn; one that finds no room in
- * its tries waits, and those behind it wait too, so that crowding never sorts the feed by size. Sizes and places come from
- * streams of their own: the sequence of sizes does not depend on what is in the way.
+ * <p>A grain is due once the owed amount covers it in full. Due grains enter in the order drawn; one that finds no
+ * room in its tries waits, and those behind it wait too, so that crowding never sorts the feed by size. Sizes and
+ * places come from streams of their own: the sequence of sizes does not depend on what is in the way.
  * <p>Threads: confined to its owner; deterministic.
  */
 public final class RainFeed {
@@ -124,11 +124,11 @@ public final class RainFeed {
     public void restore(DataInput in) throws IOException {
         int lots = in.readInt();
         if (lots != drawnMass.length) {
+            String where = "feed." + plan.name();
             String expected = drawnMass.length + ", as in the case";
             String remedy = "Resume with the case that wrote the checkpoint.";
             throw new ReedlingException(
-                    ExitCode.CHECKPOINT,
-                    new Finding("feed." + plan.name(), "number of lots saved", Integer.toString(lots), expected, remedy));
+                    ExitCode.CHECKPOINT, new Finding(where, "number of lots saved", "" + lots, expected, remedy));
         }
         for (int k = 0; k < lots; k++) {
             drawnMass[k] = in.readDouble();

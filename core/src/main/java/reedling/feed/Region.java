@@ -7,8 +7,8 @@ import reedling.particle.RandomStream;
 public sealed interface Region permits BoxRegion, DiscRegion {
 
     /**
-     * Draws the centre of a grain so that the whole grain lies inside; an extent too small for it puts the centre on its
-     * middle.
+     * Draws the centre of a grain so that the whole grain lies inside; an extent too small for it puts the centre on
+     * its middle.
      *
      * @param random owned by the caller
      * @param radius of the grain, m

@@ -7,8 +7,8 @@ import reedling.particle.RandomStream;
  * Random sequential placement: one sphere after the other at a random place, drawn again while it overlaps one placed
  * before. Spheres are placed in the order of their columns; put large ones first.
  *
- * <p>Equal spheres jam at a solid fraction of about 0.38 in endless space. Source: common practice; the jamming value from
- * memory. Threads: stateless.
+ * <p>Equal spheres jam at a solid fraction of about 0.38 in endless space. Source: common practice; the jamming value
+ * from memory. Threads: stateless.
  */
 final class SequentialPlacement {
 

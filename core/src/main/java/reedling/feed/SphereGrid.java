@@ -4,8 +4,8 @@ package reedling.feed;
 import java.util.Arrays;
 
 /**
- * Cells over a box, each with a chain of the spheres whose centres lie in it; a cell is at least as wide as the reach, so
- * that partners are found in the cell and its neighbours. Threads: confined to its owner.
+ * Cells over a box, each with a chain of the spheres whose centres lie in it; a cell is at least as wide as the
+ * reach, so that partners are found in the cell and its neighbours. Threads: confined to its owner.
  */
 final class SphereGrid {
 
@@ -72,7 +72,10 @@ final class SphereGrid {
         return true;
     }
 
-    /** Hands over every pair of inserted spheres that may be closer than the reach, in an order that depends on places only. */
+    /**
+     * Hands over every pair of inserted spheres that may be closer than the reach, in an order that depends on places
+     * only.
+     */
     void forEachPair(PairSink sink) {
         for (int c = 0; c < nz; c++) {
             for (int b = 0; b < ny; b++) {

@@ -2,7 +2,8 @@
 package reedling.feed;
 
 /**
- * Spheres in a box while they are being packed: columns of equal length, m, world frame. Threads: confined to its owner.
+ * Spheres in a box while they are being packed: columns of equal length, m, world frame. Threads: confined to its
+ * owner.
  */
 final class Spheres {
 

@@ -7,8 +7,8 @@ import reedling.error.RangeCheck;
  * Normal distribution of diameters cut at two bounds: draws outside the bounds are rejected and repeated.
  *
  * <p>Formula: density proportional to exp(-z^2/2), z = (d - mean)/deviation, for smallest <= d <= largest.
- * <p>Errors: a value not positive, bounds in the wrong order, less than 1 % of the normal distribution between the bounds
- * (each draw would then take hundreds of trials). Threads: immutable.
+ * <p>Errors: a value not positive, bounds in the wrong order, less than 1 % of the normal distribution between the
+ * bounds (each draw would then take hundreds of trials). Threads: immutable.
  *
  * @param mean of the distribution before the cut, m
  * @param deviation standard deviation before the cut, m

@@ -12,9 +12,10 @@ import java.nio.charset.StandardCharsets;
  * <p>A stream has an identity, given by the seed and the names it was split by, and a position. Splitting looks at the
  * identity only: a stream's children do not change when the stream is used more, or less, before the split.
  * <p>Source: generator xoshiro256++ of D. Blackman and S. Vigna, Scrambled linear pseudorandom number generators, 2018;
- * filled by SplitMix64 of G. L. Steele, D. Lea and C. H. Flood, Fast splittable pseudorandom number generators, 2014; both
- * algorithms are in the public domain. Names are hashed by FNV-1a (G. Fowler, L. C. Noll and K.-P. Vo), from memory. Normal
- * numbers by the polar method of G. Marsaglia and T. A. Bray, A convenient method for generating normal variables, 1964.
+ * filled by SplitMix64 of G. L. Steele, D. Lea and C. H. Flood, Fast splittable pseudorandom number generators, 2014;
+ * both algorithms are in the public domain. Names are hashed by FNV-1a (G. Fowler, L. C. Noll and K.-P. Vo), from
+ * memory. Normal numbers by the polar method of G. Marsaglia and T. A. Bray, A convenient method for generating
+ * normal variables, 1964.
  * <p>Threads: confined to its owner.
  */
 public final class RandomStream {

@@ -8,10 +8,10 @@ import reedling.error.RangeCheck;
 /**
  * Box seen from inside, centred on the origin of its frame; each closed face is a facet, open faces do not exist.
  *
- * <p>With all faces closed each facet is an endless half space, so a grain is always pushed inwards. With an open face the
- * closed ones are sheets of no thickness, touched from both sides and at their free rims, so that a grain may leave over a
- * rim and fall past the outside. An edge between two closed sheets belongs, seen from outside, to the facet of the lower
- * number: one contact there, not two.
+ * <p>With all faces closed each facet is an endless half space, so a grain is always pushed inwards. With an open
+ * face the closed ones are sheets of no thickness, touched from both sides and at their free rims, so that a grain
+ * may leave over a rim and fall past the outside. An edge between two closed sheets belongs, seen from outside, to
+ * the facet of the lower number: one contact there, not two.
  * <p>Errors: a side not positive, all faces open. Threads: immutable.
  */
 public final class BoxInside implements Surface {

@@ -6,8 +6,8 @@ import reedling.error.RangeCheck;
 /**
  * Solid box seen from outside, centred on the origin of its frame; convex, hence one facet and one contact.
  *
- * <p>Outside, the gap is the distance to the nearest point (face, edge or corner); inside, to the nearest face, the earlier
- * axis winning ties. Edges and corners take the stiffness of the flat face.
+ * <p>Outside, the gap is the distance to the nearest point (face, edge or corner); inside, to the nearest face, the
+ * earlier axis winning ties. Edges and corners take the stiffness of the flat face.
  * <p>Errors: a side not positive. Threads: immutable.
  *
  * @param width extent along x, m

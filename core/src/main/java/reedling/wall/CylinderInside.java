@@ -4,12 +4,12 @@ package reedling.wall;
 import reedling.error.RangeCheck;
 
 /**
- * Cylinder seen from inside (drum, tube), about the z axis of its frame and centred on the origin; its ends are open unless
- * closed by flat discs. Facet 0 is the curved side, then come the closed ends, low before high.
+ * Cylinder seen from inside (drum, tube), about the z axis of its frame and centred on the origin; its ends are open
+ * unless closed by flat discs. Facet 0 is the curved side, then come the closed ends, low before high.
  *
- * <p>With both ends closed each facet reaches beyond its edges, so a grain is always pushed inwards. Otherwise side and disc
- * are sheets of no thickness, touched from both sides and at free rims; the edge between side and disc belongs to the side.
- * The effective radius is that of the bore, on the outer side of the sheet too.
+ * <p>With both ends closed each facet reaches beyond its edges, so a grain is always pushed inwards. Otherwise side
+ * and disc are sheets of no thickness, touched from both sides and at free rims; the edge between side and disc
+ * belongs to the side. The effective radius is that of the bore, on the outer side of the sheet too.
  * <p>Errors: radius or length not positive. Threads: immutable.
  *
  * @param radius m

@@ -4,9 +4,9 @@ package reedling.wall;
 import reedling.error.RangeCheck;
 
 /**
- * Solid cylinder seen from outside (shaft, roller), about the z axis of its frame and centred on the origin, with flat caps.
- * Facet 0 is the curved side with both edges, facets 1 and 2 are the caps at -z and +z; convex, so exactly one facet stands
- * for any point.
+ * Solid cylinder seen from outside (shaft, roller), about the z axis of its frame and centred on the origin, with
+ * flat caps. Facet 0 is the curved side with both edges, facets 1 and 2 are the caps at -z and +z; convex, so exactly
+ * one facet stands for any point.
  *
  * <p>Edges take the stiffness of the side. Inside, the nearer of side and cap stands for the point.
  * <p>Errors: radius or length not positive. Threads: immutable.

@@ -4,7 +4,7 @@ package reedling.wall;
 /**
  * Prescribed rigid motion of a wall: an exact function of time, so a resumed run finds the same wall at the same place.
  *
- * <p>Every implementation uses {@link StrictMath} only, hence the same bits on every machine.
+ * <p>Every implementation uses plain arithmetic only, hence the same bits on every machine, and allocates nothing.
  * <p>Threads: immutable.
  */
 public sealed interface Motion permits Still, Gliding, Turning, Oscillating {

@@ -18,8 +18,8 @@ final class Nearest {
     }
 
     /**
-     * Writes the unit vector along (x, y, z) and returns the length; a zero vector gives {@code sign} times the unit vector
-     * of {@code axis}.
+     * Writes the unit vector along (x, y, z) and returns the length; a zero vector gives {@code sign} times the unit
+     * vector of {@code axis}.
      */
     static double normalise(double x, double y, double z, int axis, double sign, double[] normal) {
         double length = Math.sqrt(x * x + y * y + z * z);

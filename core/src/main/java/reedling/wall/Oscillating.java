@@ -8,11 +8,11 @@ import reedling.error.RangeCheck;
 /**
  * Harmonic, elliptic or circular translation at one frequency.
  *
- * <p>Formula: shift = e(t) ( a1 sin(p + phi1) u1 + a2 sin(p + phi2) u2 ), p = 2 pi f (t - origin), e the strength of the
- * timing. A second component of amplitude 0 leaves the straight harmonic motion; equal amplitudes a quarter period apart
- * give the circle.
- * <p>Errors: frequency not positive; directions not at right angles (cosine above 1e-9); a timing that switches at once,
- * because the wall would jump.
+ * <p>Formula: shift = e(t) ( a1 sin(p + phi1) u1 + a2 sin(p + phi2) u2 ), p = 2 pi f (t - origin), e the strength of
+ * the timing. A second component of amplitude 0 leaves the straight harmonic motion; equal amplitudes a quarter
+ * period apart give the circle.
+ * <p>Errors: frequency not positive; directions not at right angles (cosine above 1e-9); a timing that switches at
+ * once, because the wall would jump.
  * <p>Threads: immutable.
  *
  * @param first component along u1
@@ -48,9 +48,8 @@ public record Oscillating(Stroke first, Stroke second, double frequency, Timing 
     public void pose(double time, Pose out) {
         double strength = timing.strength(time);
         double periods = frequency * (time - timing.origin());
-        double angle = 2 * Math.PI * (periods - Math.floor(periods));
-        double one = strength * first.amplitude() * StrictMath.sin(angle + first.phase());
-        double two = strength * second.amplitude() * StrictMath.sin(angle + second.phase());
+        double one = strength * first.at(periods);
+        double two = strength * second.at(periods);
         Vector3dc u = first.direction();
         Vector3dc v = second.direction();
         out.reset();

@@ -4,8 +4,8 @@ package reedling.wall;
 /**
  * A rigid displacement: a point X of the wall at rest is found at {@code pivot + shift + R(q) (X - pivot)}.
  *
- * <p>A plain carrier filled by {@link Motion#pose}; the fields are public so that a fill costs no allocation and no calls.
- * Threads: confined to its owner.
+ * <p>A plain carrier filled by {@link Motion#pose}; the fields are public so that a fill costs no allocation and no
+ * calls. Threads: confined to its owner.
  */
 public final class Pose {
 

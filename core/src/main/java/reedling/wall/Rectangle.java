@@ -4,10 +4,11 @@ package reedling.wall;
 import reedling.error.RangeCheck;
 
 /**
- * Flat sheet of no thickness, touched from both sides and at its rim; it lies in z = 0 of its frame, centred on the origin.
+ * Flat sheet of no thickness, touched from both sides and at its rim; it lies in z = 0 of its frame, centred on the
+ * origin.
  *
- * <p>The gap is the distance to the nearest point of the sheet and never negative, so a grain is pushed back to the side its
- * centre is on. On the sheet itself the normal is -z.
+ * <p>The gap is the distance to the nearest point of the sheet and never negative, so a grain is pushed back to the
+ * side its centre is on. On the sheet itself the normal is -z.
  * <p>Errors: a side not positive. Threads: immutable.
  *
  * @param width extent along x, m

@@ -30,4 +30,11 @@ public record Stroke(Vector3dc direction, double amplitude, double phase) {
     public static Stroke peakToPeak(Vector3dc direction, double peakToPeak) {
         return new Stroke(direction, 0.5 * peakToPeak, 0);
     }
+
+    /** Shift along the direction, m, after a number of periods. */
+    double at(double periods) {
+        // whole periods go first: the phase would otherwise lose digits in a long run
+        double part = periods - Math.floor(periods);
+        return amplitude * Circle.sine(part + phase / (2 * Math.PI));
+    }
 }

@@ -17,9 +17,11 @@ public interface Surface {
      *
      * @param facet 0 to {@link #facets()} - 1
      * @param x point, m, frame of the surface; likewise y and z
-     * @param normal filled in its first three places with the unit vector from the point to the nearest point of the facet
+     * @param normal filled in its first three places with the unit vector from the point to the nearest point of the
+     * facet
      *     where the point is outside the material, and with its continuation where it is inside
-     * @return distance, m, negative inside the material; plus infinity where another facet stands for this point, and the
+     * @return distance, m, negative inside the material; plus infinity where another facet stands for this point, and
+     * the
      *     normal is then without meaning
      */
     double gap(int facet, double x, double y, double z, double[] normal);

@@ -6,11 +6,11 @@ import reedling.error.RangeCheck;
 /**
  * When a motion runs, and the smooth rise and fall of its strength between 0 and 1.
  *
- * <p>Formula: strength e(t) = s((t - start)/ramp) - s((t - stop + ramp)/ramp), s(u) = 6u^5 - 15u^4 + 10u^3 for 0 <= u <= 1,
- * 0 below and 1 above. Value, slope and curvature of s vanish or match at both ends, so velocities and accelerations made
- * from e have no jump.
- * <p>Where: start, stop (s); ramp (s) the duration of the rise after the start and of the fall before the stop. A ramp of 0
- * switches at once and is only for motions that need no strength (see {@link #switchesAtOnce}).
+ * <p>Formula: strength e(t) = s((t - start)/ramp) - s((t - stop + ramp)/ramp), s(u) = 6u^5 - 15u^4 + 10u^3 for 0 <= u
+ * <= 1, 0 below and 1 above. Value, slope and curvature of s vanish or match at both ends, so velocities and
+ * accelerations made from e have no jump.
+ * <p>Where: start, stop (s); ramp (s) the duration of the rise after the start and of the fall before the stop. A
+ * ramp of 0 switches at once and is only for motions that need no strength (see {@link #switchesAtOnce}).
  * <p>Errors: ramp negative; stop earlier than start + 2 ramps; start not finite.
  * <p>Source: the quintic step is common practice, no source.
  * <p>Threads: immutable.

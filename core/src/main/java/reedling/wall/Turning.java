@@ -31,10 +31,10 @@ public record Turning(Vector3dc point, Vector3dc axis, double speed, Timing timi
 
     @Override
     public void pose(double time, Pose out) {
-        double half = 0.5 * speed * timing.elapsed(time);
-        double sine = StrictMath.sin(half);
+        double halfTurns = speed * timing.elapsed(time) / (4 * Math.PI);
+        double sine = Circle.sine(halfTurns);
         out.shift(0, 0, 0);
-        out.turn(StrictMath.cos(half), sine * axis.x(), sine * axis.y(), sine * axis.z());
+        out.turn(Circle.cosine(halfTurns), sine * axis.x(), sine * axis.y(), sine * axis.z());
         out.pivotX = point.x();
         out.pivotY = point.y();
         out.pivotZ = point.z();

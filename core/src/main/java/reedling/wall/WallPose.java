@@ -7,9 +7,9 @@ import org.joml.Vector3dc;
 /**
  * A wall at one moment of a run: where it is, and the velocity with which the last step brought it there.
  *
- * <p>Formula: velocity of the pivot u = (shift - shift before)/h, spin w = rotation vector of (q conj(q before))/h, and at a
- * point p: u + w x (p - c), c the pivot's present place. Displacement over h and not the derivative of the motion, so that
- * the work of the wall closes in the energy ledger.
+ * <p>Formula: velocity of the pivot u = (shift - shift before)/h, spin w = rotation vector of (q conj(q before))/h,
+ * and at a point p: u + w x (p - c), c the pivot's present place. Displacement over h and not the derivative of the
+ * motion, so that the work of the wall closes in the energy ledger.
  * <p>Where: h duration of the step (s); p in m, world frame.
  * <p>Threads: one thread advances, with a barrier before others query; queries write only to the caller's array.
  */
@@ -104,7 +104,10 @@ public final class WallPose {
         return gap;
     }
 
-    /** Writes the velocity (m/s, world frame) of the wall at a world point (m) into the first three places of {@code out}. */
+    /**
+     * Writes the velocity (m/s, world frame) of the wall at a world point (m) into the first three places of {@code
+     * out}.
+     */
     public void velocityAt(double x, double y, double z, double[] out) {
         double ax = x - centreX();
         double ay = y - centreY();

@@ -25,7 +25,8 @@ class HertzLineTest {
         double r = 0.001;
         double grain = grainOverCylinder * r;
         double exact = exactRadius(grain, 1 / (1 / grain + 1 / r));
-        // the fit is published as good to a few tenths of a per cent; 0.6 % in force, force goes as the root of the radius
+        // the fit is published as good to a few tenths of a per cent; 0.6 % in force, force goes as the root of the
+        // radius
         double force = Math.sqrt(HertzLine.outside(grain, r) / exact);
         assertThat(force).isEqualTo(1, within(0.006));
     }

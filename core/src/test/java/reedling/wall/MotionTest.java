@@ -52,6 +52,20 @@ class MotionTest {
     }
 
     @Test
+    void elapsedTimeIsTheIntegralOfTheStrength() {
+        double sum = 0;
+        double width = 1e-4;
+        for (int k = 0; k < 10_000; k++) {
+            double middle = (k + 0.5) * width;
+            sum += RAMPED.strength(middle) * width;
+            // midpoint rule: width^2 / 24 times the slope, at most 1.875 / 0.2
+            assertThat(RAMPED.elapsed(middle + 0.5 * width)).isEqualTo(sum, within(1e-8));
+        }
+        assertThat(RAMPED.strength(0.5)).isEqualTo(1);
+        assertThat(RAMPED.strength(0.2)).isEqualTo(0.5, within(1e-12));
+    }
+
+    @Test
     void glidingAlwaysIsSpeedTimesTime() {
         assertThat(at(new Gliding(new Vector3d(2, 0, 0), Timing.always()), -3).shiftX).isEqualTo(-6);
     }

@@ -57,8 +57,10 @@ class SurfaceTest {
             // rounding may put the end just past an edge that another facet stands for
             double end = step(surface, facet, x, y, z, gap);
             boolean handedOver = end == Double.POSITIVE_INFINITY;
-            double reached = handedOver ? nearest(surface, x + gap * normal[0], y + gap * normal[1], z + gap * normal[2]) : end;
-            assertThat(reached).isEqualTo(0, within(1e-13));
+            double endX = x + gap * normal[0];
+            double endY = y + gap * normal[1];
+            double endZ = z + gap * normal[2];
+            assertThat(handedOver ? nearest(surface, endX, endY, endZ) : end).isEqualTo(0, within(1e-13));
         }
     }
 
@@ -127,14 +129,32 @@ class SurfaceTest {
     @Test
     void exactlyOneFacetOfASolidCylinderAnswers() {
         Surface roller = new CylinderOutside(1, 2);
-        double[][] points = {{2, 0, 0}, {0, 0, 2}, {0, 0, -2}, {2, 0, 2}, {0, 0, 0}, {0.99, 0, 0.5}, {0.2, 0, 0.9}, {1, 0, 1}};
+        double[][] points = {
+            {2, 0, 0}, {0, 0, 2}, {0, 0, -2}, {2, 0, 2}, {0, 0, 0}, {0.99, 0, 0.5}, {0.2, 0, 0.9}, {1, 0, 1}
+        };
         int[] expected = {0, 2, 1, 0, 0, 0, 2, 0};
         for (int k = 0; k < points.length; k++) {
             for (int facet = 0; facet < 3; facet++) {
                 double gap = roller.gap(facet, points[k][0], points[k][1], points[k][2], normal);
-                assertThat(gap < Double.POSITIVE_INFINITY).as("point %d facet %d", k, facet).isEqualTo(facet == expected[k]);
+                boolean answers = gap < Double.POSITIVE_INFINITY;
+                assertThat(answers).as("point %d facet %d", k, facet).isEqualTo(facet == expected[k]);
             }
         }
+    }
+
+    @Test
+    void edgeOfACupSeenFromOutsideIsOneContact() {
+        Surface cup = new CylinderInside(0.15, 0.4, true, false);
+        double[][] outside = {{0.155, 0, -0.205}, {0.149, 0, -0.205}, {0.155, 0, -0.199}, {0.155, 0, 0.205}};
+        for (double[] p : outside) {
+            int touching = 0;
+            for (int facet = 0; facet < cup.facets(); facet++) {
+                touching += cup.gap(facet, p[0], p[1], p[2], normal) < 0.01 ? 1 : 0;
+            }
+            assertThat(touching).as("contacts at %s", p).isEqualTo(1);
+        }
+        assertThat(cup.gap(0, 0.145, 0, -0.195, normal)).isEqualTo(0.005, within(1e-15));
+        assertThat(cup.gap(1, 0.145, 0, -0.195, normal)).isEqualTo(0.005, within(1e-15));
     }
 
     @Test
@@ -149,7 +169,8 @@ class SurfaceTest {
     void wrongMeasuresAreAllReported() {
         assertThatThrownBy(() -> new BoxOutside(-1, 0, Double.NaN))
                 .isInstanceOfSatisfying(ReedlingException.class, e -> assertThat(e.findings()).hasSize(3));
-        assertThatThrownBy(() -> new BoxInside(1, 1, 1, EnumSet.allOf(BoxInside.Face.class))).hasMessageContaining("open");
+        EnumSet<BoxInside.Face> all = EnumSet.allOf(BoxInside.Face.class);
+        assertThatThrownBy(() -> new BoxInside(1, 1, 1, all)).hasMessageContaining("open");
     }
 
     private double step(Surface surface, int facet, double x, double y, double z, double way) {

@@ -5,6 +5,9 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
+import com.sun.management.ThreadMXBean;
+import java.lang.management.ManagementFactory;
+import java.util.EnumSet;
 import org.joml.Vector3d;
 import org.junit.jupiter.api.Test;
 
@@ -47,22 +50,26 @@ class WallPoseTest {
 
     @Test
     void turningWallCarriesItsPointsWithSpinTimesLever() {
-        Turning motion = new Turning(new Vector3d(0.5, 0, 0), Z, -3, Timing.always());
+        Vector3d axis = new Vector3d(2, -1, 2).div(3);
+        Vector3d pivot = new Vector3d(0.5, 0.1, -0.2);
+        Turning motion = new Turning(pivot, axis, -3, Timing.always());
         Placement rest = Placement.axes(new Vector3d(1, 0, 0), new Vector3d(1, 0, 0), Z);
         WallPose pose = new WallPose(new Wall("paddle", 0, new Rectangle(1, 1), rest, motion), 1.2);
         pose.toWorld(0.2, 0.1, 0.3, out);
         double step = 1e-4;
         pose.advance(1.2 + step, step);
         pose.toWorld(0.2, 0.1, 0.3, other);
-        assertThat(pose.spinZ()).isEqualTo(-3, within(1e-10));
+        Vector3d spin = new Vector3d(pose.spinX(), pose.spinY(), pose.spinZ());
+        assertThat(spin.distance(new Vector3d(axis).mul(-3))).isLessThan(1e-10);
         double[] velocity = new double[3];
-        pose.velocityAt(0.5 * (out[0] + other[0]), 0.5 * (out[1] + other[1]), 0.3, velocity);
+        pose.velocityAt(0.5 * (out[0] + other[0]), 0.5 * (out[1] + other[1]), 0.5 * (out[2] + other[2]), velocity);
         for (int c = 0; c < 3; c++) {
             // a chord against an arc: relative difference angle^2 / 24 of the step
             assertThat((other[c] - out[c]) / step).isEqualTo(velocity[c], within(1e-7));
         }
-        double lever = Math.hypot(other[0] - 0.5, other[1]);
-        assertThat(Math.hypot(velocity[0], velocity[1])).isEqualTo(3 * lever, within(1e-6));
+        double lever = new Vector3d(other).sub(pivot).cross(axis).length();
+        pose.velocityAt(other[0], other[1], other[2], velocity);
+        assertThat(new Vector3d(velocity).length()).isEqualTo(3 * lever, within(1e-9));
     }
 
     @Test
@@ -93,6 +100,48 @@ class WallPoseTest {
     }
 
     @Test
+    void stepsAndQueriesAllocateNothing() {
+        Motion[] motions = {
+            new Still(),
+            Oscillating.harmonic(new Stroke(Z, 0.0025, 0.4), 20, Timing.from(0, 0.01)),
+            new Turning(new Vector3d(), Z, 30, Timing.from(0, 0.01))
+        };
+        Surface[] surfaces = {
+            new HalfSpace(),
+            new Rectangle(1, 1),
+            new BoxInside(1, 1, 1, EnumSet.of(BoxInside.Face.HIGH_Z)),
+            new BoxOutside(1, 1, 1),
+            new CylinderInside(1, 1),
+            new CylinderOutside(1, 1)
+        };
+        ThreadMXBean threads = (ThreadMXBean) ManagementFactory.getThreadMXBean();
+        for (int k = 0; k < surfaces.length; k++) {
+            Motion motion = motions[k % motions.length];
+            WallPose pose = new WallPose(new Wall("wall", 0, surfaces[k], Placement.world(), motion), 0);
+            query(pose, 10);
+            long few = allocatedBy(threads, pose, 10);
+            long many = allocatedBy(threads, pose, 10_000);
+            assertThat(many - few).as("bytes of 9990 rounds on %s", surfaces[k]).isLessThan(9990);
+        }
+    }
+
+    private long allocatedBy(ThreadMXBean threads, WallPose pose, int rounds) {
+        long before = threads.getCurrentThreadAllocatedBytes();
+        query(pose, rounds);
+        return threads.getCurrentThreadAllocatedBytes() - before;
+    }
+
+    private void query(WallPose pose, int rounds) {
+        for (int k = 0; k < rounds; k++) {
+            pose.advance(k * 1e-5, 1e-5);
+            for (int facet = 0; facet < pose.wall().surface().facets(); facet++) {
+                pose.gap(facet, 0.3, k * 1e-4, 0.6, out);
+            }
+            pose.velocityAt(0.3, 0.4, 0.5, out);
+        }
+    }
+
+    @Test
     void newWallHasNoVelocity() {
         Motion motion = new Gliding(new Vector3d(1, 1, 1), Timing.always());
         WallPose pose = new WallPose(new Wall("belt", 0, new HalfSpace(), Placement.world(), motion), 3);
@@ -102,6 +151,7 @@ class WallPoseTest {
 
     @Test
     void placementRefusesParallelAxes() {
-        assertThatThrownBy(() -> Placement.axes(new Vector3d(), Z, new Vector3d(0, 0, 2))).hasMessageContaining("angle");
+        Vector3d alsoZ = new Vector3d(0, 0, 2);
+        assertThatThrownBy(() -> Placement.axes(new Vector3d(), Z, alsoZ)).hasMessageContaining("angle");
     }
 }
