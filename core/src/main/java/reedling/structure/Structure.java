@@ -48,6 +48,7 @@ public final class Structure {
 
     private record ElementTask(ElementSet set, int first, int last) {}
 
+    /** Arrays of all nodes. */
     public NodeStore nodes() {
         return mesh.nodes();
     }
@@ -62,10 +63,12 @@ public final class Structure {
         return mesh.sets();
     }
 
+    /** Number of tasks of the element stage. */
     public int elementTasks() {
         return elementTasks.size();
     }
 
+    /** Number of tasks of the node stage. */
     public int nodeTasks() {
         return (mesh.nodes().count + RANGE - 1) / RANGE;
     }
@@ -113,6 +116,15 @@ public final class Structure {
             step = Math.min(step, 2 / frequency * (Math.sqrt(1 + ratio * ratio) - ratio));
         }
         return STABLE_PART * step;
+    }
+
+    /** Largest squared element frequency at the strains of the last force pass, 1/s2; add contact stiffness / mass to it. */
+    public double squaredFrequency() {
+        double largest = 0;
+        for (ElementTask t : elementTasks) {
+            largest = Math.max(largest, t.set.law.squaredFrequency(t.set, t.first, t.last));
+        }
+        return largest;
     }
 
     /** Energies; exact for the last closed step when called after the node stage with {@code strain} taken before it. */

@@ -107,7 +107,10 @@ public final class StructureBuilder {
         }
         placeNodes(nodes, inertia);
         ModalDamping damping = damping(nodes);
-        return new Structure(Mesh.connect(nodes, built, sets, slots), motions, damping, gravity);
+        Structure structure = new Structure(Mesh.connect(nodes, built, sets, slots), motions, damping, gravity);
+        // so that strains, and with them tension and stable step, are those of the start
+        structure.evaluateForces();
+        return structure;
     }
 
     private int slotCount() {

@@ -33,8 +33,9 @@ final class WireCheck {
             add("inner diameter", tube.innerDiameter() + " m", "0 < value < " + tube.outerDiameter() + " m",
                     "Make the tube's hole smaller than the tube, or use a solid round section.");
         }
-        if (!(wire.section().area() > 0 && Double.isFinite(wire.section().area()))) {
-            add("section", "of area " + wire.section().area() + " m2", "an area > 0",
+        double smallest = wire.section().contactRadius();
+        if (!(smallest > 0 && Double.isFinite(wire.section().area()))) {
+            add("section", "of smallest radius " + smallest + " m", "a radius > 0",
                     "Give every size of the section as a length above 0.");
         }
     }

@@ -80,8 +80,7 @@ public final class WireMesh {
         int b = single.node(ends.start().towards(ends.end(), 1.0 / wire.elements()));
         single.body(wire.name(), law, new int[] {a, b}, up(ends), wire.prestretch());
         Structure structure = single.build();
-        structure.evaluateForces();
-        return Math.sqrt(law.squaredFrequency(structure.elementSets().getFirst(), 0, 1));
+        return Math.sqrt(structure.squaredFrequency());
     }
 
     /** Vertical, unless the wire itself is nearly so. */

@@ -9,6 +9,7 @@ import org.junit.jupiter.api.Test;
 import reedling.structure.CrossSection;
 import reedling.structure.EndCondition;
 import reedling.structure.NodeStore;
+import reedling.structure.Position;
 import reedling.structure.SpatialRotation;
 import reedling.structure.Structure;
 
@@ -127,6 +128,32 @@ class BeamGradientTest {
         double axialStiffness = BeamBench.STEEL.youngsModulus() * 8e-6;
         // coordinates near 3 m resolve the strain of a 50 mm element to 1e-14
         assertThat(largest(nodes.force)).isLessThan(5e-14 * axialStiffness);
+    }
+
+    /** Every direction and section axis: the frame is orthonormal, right-handed and starts along the chord. */
+    @Test
+    void frameFollowsChordAndUp() {
+        Random random = new Random(11);
+        for (int trial = 0; trial < 60; trial++) {
+            Position a = new Position(random.nextGaussian(), random.nextGaussian(), random.nextGaussian());
+            Position b = trial < 6
+                    ? new Position(a.x() + (trial % 3 == 0 ? 1 : 0) * (trial < 3 ? 1 : -1),
+                            a.y() + (trial % 3 == 1 ? 1 : 0) * (trial < 3 ? 1 : -1),
+                            a.z() + (trial % 3 == 2 ? 1 : 0) * (trial < 3 ? 1 : -1))
+                    : new Position(random.nextGaussian(), random.nextGaussian(), random.nextGaussian());
+            double[] q = new double[4];
+            ElementFrame.write(a, b, BeamBench.UP, q, 0);
+            double length = a.distance(b);
+            double[] chord = {(b.x() - a.x()) / length, (b.y() - a.y()) / length, (b.z() - a.z()) / length};
+            double[] e1 = {1 - 2 * (q[2] * q[2] + q[3] * q[3]), 2 * (q[1] * q[2] + q[0] * q[3]),
+                2 * (q[1] * q[3] - q[0] * q[2])};
+            for (int i = 0; i < 3; i++) {
+                assertThat(e1[i]).isCloseTo(chord[i], within(1e-14));
+            }
+            // axis 2 is level, because up is vertical
+            double level = 2 * (q[2] * q[3] + q[0] * q[1]);
+            assertThat(level).isCloseTo(0, within(1e-14));
+        }
     }
 
     @Test

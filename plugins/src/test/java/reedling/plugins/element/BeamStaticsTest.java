@@ -198,5 +198,9 @@ class BeamStaticsTest {
         solver.loads[6 * 20 + 3] = 10;
         solver.solve(1);
         assertThat(angle(structure.nodes(), 20, 0)).isCloseTo(0.00795775, within(1e-5 * 0.008));
+        ElementSet set = structure.elementSets().getFirst();
+        double[] rows = new double[6 * 20];
+        set.law.results(set, 0, 20, rows);
+        assertThat(rows[6 * 7 + 2]).isCloseTo(10, within(1e-7 * 10));
     }
 }
