@@ -46,7 +46,6 @@ public final class WorkerTeam implements AutoCloseable {
     // Written by the leader before it publishes a phase, read by followers that joined it.
     private Phase phase = (task, worker) -> {};
     private int tasks;
-    private long sequence;
 
     /**
      * Starts the followers.
@@ -122,11 +121,11 @@ public final class WorkerTeam implements AutoCloseable {
         for (int worker = 0; worker < workers; worker++) {
             shared.setPlain(firstClaim + worker, shareStart(worker, count));
         }
-        sequence++;
+        long sequence = shared.getPlain(PUBLISHED) + 1;
         shared.setRelease(PUBLISHED, sequence);
         claimTasks(next, count, 0);
         for (int worker = 1; worker < workers; worker++) {
-            closeOrAwait(worker);
+            closeOrAwait(worker, sequence);
         }
     }
 
@@ -143,7 +142,7 @@ public final class WorkerTeam implements AutoCloseable {
         return 2 * sequence + WORKING;
     }
 
-    private void closeOrAwait(int worker) {
+    private void closeOrAwait(int worker, long sequence) {
         int slot = FIRST_PROGRESS + worker;
         if (shared.getAcquire(slot) == left(sequence - 1)
                 && shared.compareAndSet(slot, left(sequence - 1), left(sequence))) {
