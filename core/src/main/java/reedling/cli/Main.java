@@ -2,6 +2,7 @@
 package reedling.cli;
 
 import java.nio.file.Path;
+import java.util.ServiceLoader;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import reedling.error.ExitCode;
@@ -27,6 +28,7 @@ public final class Main {
 
     static CommandLine commandLine(FaultRecord faultRecord) {
         CommandLine commandLine = new CommandLine(new Main());
+        ServiceLoader.load(SubCommand.class).forEach(commandLine::addSubcommand);
         commandLine.setCaseInsensitiveEnumValuesAllowed(true);
         setUsageExitCode(commandLine);
         commandLine.setExecutionExceptionHandler(

@@ -89,6 +89,12 @@ public final class GrainStore {
         Arrays.fill(forces, GrainRow.forceAt(count), GrainRow.forceAt(count + GHOSTS), 0);
     }
 
+    /** Makes room for so many grains without adding any. */
+    public void reserve(int grains) {
+        ensureCapacity(grains);
+        resize(count);
+    }
+
     private void ensureCapacity(int grains) {
         if (grains > material.length) {
             int capacity = Math.max(grains, material.length + material.length / 4);
