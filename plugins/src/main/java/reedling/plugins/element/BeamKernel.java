@@ -32,7 +32,8 @@ final class BeamKernel {
     private BeamKernel() {}
 
     /**
-     * Forces and moments on the end nodes of elements {@code first <= e < last}.
+     * Forces and moments on the end nodes of elements {@code first <= e < last}. One long straight line on purpose: cut
+     * into methods, its forty intermediate values would have to travel through memory.
      *
      * @param x positions, m, 3 per node
      * @param q orientations, 4 per node
