@@ -140,7 +140,8 @@ final class BeamKernel {
                 f3 += rate * d3;
                 f4 += rate * d4;
                 f5 += rate * d5;
-                dissipated += constants[k] * dashpot(constants, k + STIFFNESS, history, h, rate, d0, d1, d2, d3, d4, d5);
+                dissipated += constants[k + LENGTH]
+                        * dashpot(constants, k + STIFFNESS, history, h, rate, d0, d1, d2, d3, d4, d5);
             }
             history[h] = e0;
             history[h + 1] = e1;

@@ -14,9 +14,10 @@ import reedling.structure.NodeStore;
 import reedling.structure.Structure;
 
 /**
- * Sphere dropped on the middle of a simply supported beam: Hertz contact and modal superposition after S. Timoshenko, Zur
- * Frage nach der Wirkung eines Stosses auf einen Balken, 1913; W. Goldsmith, Impact, 1960. Expected values were computed
- * independently with Bernoulli-Euler modes; the sections here are slender enough for shear and rotary inertia to vanish.
+ * Sphere dropped on the middle of a simply supported beam: Hertz contact and modal superposition after S. Timoshenko,
+ * Zur Frage nach der Wirkung eines Stosses auf einen Balken, 1913; W. Goldsmith, Impact, 1960. Expected values were
+ * computed independently with Bernoulli-Euler modes; the sections here are slender enough for shear and rotary inertia
+ * to vanish.
  */
 @Tag("reference")
 class SphereOnBeamTest {
