@@ -155,7 +155,7 @@ class BeamMotionTest {
             tension += row[0];
         }
         assertThat(tension / steps).isCloseTo(320, within(0.005 * 320));
-        assertThat(radius / steps - 0.5).isCloseTo(8e-6, within(0.02 * 8e-6));
+        assertThat(radius / steps - 0.5).isCloseTo(8e-6, within(0.005 * 8e-6));
         double[] end = BeamBench.momentum(structure);
         for (int i = 0; i < 6; i++) {
             assertThat(end[i]).isCloseTo(start[i], within(1e-12 * 25));

@@ -102,7 +102,7 @@ class SphereOnBeamTest {
                 beam(0.1535, 179.167, 0.78, 0.002, 40), new Striker(0.0326726, stiffness, 0.01), 1e10, 0.0015);
         assertThat(blow.contacts).hasSize(1);
         assertThat(blow.peak).isCloseTo(4.912, within(0.03 * 4.912));
-        assertThat(blow.peakTime).isCloseTo(7.209e-5, within(0.05 * 7.209e-5));
+        assertThat(blow.peakTime).isCloseTo(7.209e-5, within(0.03 * 7.209e-5));
         assertThat(blow.contacts.getFirst()[1]).isCloseTo(1.553e-4, within(0.03 * 1.553e-4));
         assertThat(blow.speed).isCloseTo(0.003025, within(0.03 * 0.003025));
         assertThat(blow.impulse).isCloseTo(0.00042557, within(0.03 * 0.00042557));
