@@ -1,7 +1,9 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.structure;
 
-/** External loads on nodes, such as contacts; called once per node range and step, by the thread that moves the range. */
+/**
+ * External loads on nodes, such as contacts; called once per node range and step, by the thread that moves the range.
+ */
 @FunctionalInterface
 public interface NodalLoads {
 

@@ -73,7 +73,10 @@ public final class Structure {
         return (mesh.nodes().count + RANGE - 1) / RANGE;
     }
 
-    /** Element forces of one task at the present positions; {@code oldStep} is the step that led here, s (0 at the start). */
+    /**
+     * Element forces of one task at the present positions; {@code oldStep} is the step that led here, s (0 at the
+     * start).
+     */
     public void elementForces(int task, double oldStep) {
         ElementTask t = elementTasks.get(task);
         strainDissipation[8 * task] += t.set.law.forces(t.set, mesh.nodes(), t.first, t.last, oldStep);
@@ -107,7 +110,9 @@ public final class Structure {
         SupportStart.apply(mesh, poses, time, step);
     }
 
-    /** Largest stable step with a margin of 10 %, at the strains of the last force pass, s; infinite without elements. */
+    /**
+     * Largest stable step with a margin of 10 %, at the strains of the last force pass, s; infinite without elements.
+     */
     public double stableStep() {
         double step = Double.POSITIVE_INFINITY;
         for (ElementTask t : elementTasks) {
@@ -118,7 +123,10 @@ public final class Structure {
         return STABLE_PART * step;
     }
 
-    /** Largest squared element frequency at the strains of the last force pass, 1/s2; add contact stiffness / mass to it. */
+    /**
+     * Largest squared element frequency at the strains of the last force pass, 1/s2; add contact stiffness / mass to
+     * it.
+     */
     public double squaredFrequency() {
         double largest = 0;
         for (ElementTask t : elementTasks) {
@@ -127,7 +135,9 @@ public final class Structure {
         return largest;
     }
 
-    /** Energies; exact for the last closed step when called after the node stage with {@code strain} taken before it. */
+    /**
+     * Energies; exact for the last closed step when called after the node stage with {@code strain} taken before it.
+     */
     public StructureEnergy energy(double strain) {
         double dissipated = 0;
         for (int task = 0; task < elementTasks(); task++) {

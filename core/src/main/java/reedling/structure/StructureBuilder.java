@@ -137,8 +137,8 @@ public final class StructureBuilder {
             for (int a = 0; a < perElement; a++) {
                 ends.add(positions.get(mesh.nodes()[e * perElement + a]));
             }
-            mesh.law().reference(
-                    new ElementReference(ends, mesh.up(), mesh.prestretch()), constants, e * mesh.law().constantCount());
+            ElementReference reference = new ElementReference(ends, mesh.up(), mesh.prestretch());
+            mesh.law().reference(reference, constants, e * mesh.law().constantCount());
         }
         return constants;
     }

@@ -27,7 +27,9 @@ class BeamConservationTest {
                 0.1, ELEMENTS, FREE, FREE);
     }
 
-    /** Tumbling and slightly bending rod, 1e5 steps at the full step: |dP|, |dH| < 1e-12, drift < 1e-7 of the energy. */
+    /**
+     * Tumbling and slightly bending rod, 1e5 steps at the full step: |dP|, |dH| < 1e-12, drift < 1e-7 of the energy.
+     */
     @Test
     void tumblingRodKeepsMomentumAndEnergy() {
         Structure structure = rod(0);

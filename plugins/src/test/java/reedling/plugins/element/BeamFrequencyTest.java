@@ -124,7 +124,9 @@ class BeamFrequencyTest {
         }
     }
 
-    /** A wire pulled by 25 times 12 EI/L^2 of its elements stays stable: the shear stiffness does not eat the tension. */
+    /**
+     * A wire pulled by 25 times 12 EI/L^2 of its elements stays stable: the shear stiffness does not eat the tension.
+     */
     @Test
     void hardPulledWireStaysStable() {
         CrossSection section = new CrossSection.SolidCircle(0.0012);

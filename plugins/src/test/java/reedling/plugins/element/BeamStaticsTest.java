@@ -97,25 +97,6 @@ class BeamStaticsTest {
         }
     }
 
-    /** The deflection error at P L^2/EI = 5 falls by four per doubling: second order. */
-    @Test
-    @Tag("convergence")
-    void elasticaErrorIsOfSecondOrder() {
-        double[] error = new double[3];
-        for (int level = 0; level < 3; level++) {
-            int elements = 4 << level;
-            Structure structure = slender(elements);
-            StaticSolver solver = new StaticSolver(structure, 1e-6);
-            solver.loads[6 * elements + 2] = 5 * SLENDER_BENDING;
-            solver.solve(2);
-            error[level] = structure.nodes().position[3 * elements + 2] - 0.71379;
-        }
-        // reference has 5 digits, so the ratio is taken while the error is above 1e-3
-        assertThat(error[0]).isCloseTo(0.00536, within(0.0006));
-        assertThat(error[0] / error[1]).isBetween(3.6, 4.5);
-        assertThat(error[1] / error[2]).isBetween(3.5, 4.7);
-    }
-
     /** Pure end moment rolls the beam into an arc of radius EI/M: exact for every mesh, closed form. */
     @Test
     void endMomentRollsTheBeamIntoACircle() {
@@ -163,7 +144,8 @@ class BeamStaticsTest {
             {1.015, 19.743, 0.97050, 0.21667}, {1.063, 39.800, 0.88236, 0.42035}, {1.152, 60.050, 0.74061, 0.59358},
             {1.293, 79.899, 0.56039, 0.71899}, {1.518, 99.972, 0.34929, 0.79148}
         };
-        int elements = 60;
+        // the critical load of the mesh is 0.26/n^2 high, which the first row magnifies by 70
+        int elements = 90;
         Structure structure = slender(elements);
         StaticSolver full = new StaticSolver(structure, 1e-6);
         StaticSolver solver = new StaticSolver(full, d -> d == 0 || d == 2 || d == 4);
@@ -178,8 +160,7 @@ class BeamStaticsTest {
             solver.solve(1);
             NodeStore nodes = structure.nodes();
             double degrees = Math.toDegrees(-angle(nodes, elements, 1));
-            // close to the critical load the amplitude follows the square root of P/Pcr - 1: 1.5 % there
-            double tolerance = row == 0 ? 0.015 : 0.005;
+            double tolerance = 0.005;
             assertThat(degrees).isCloseTo(table[row][1], within(tolerance * table[row][1]));
             assertThat(nodes.position[3 * elements]).isCloseTo(table[row][2], within(tolerance));
             assertThat(nodes.position[3 * elements + 2]).isCloseTo(table[row][3], within(tolerance * table[row][3]));

@@ -90,7 +90,8 @@ class StructureLedgerTest {
             for (int i = 0; i < v.length; i++) {
                 work += 0.5 * step * ((f[i] + nodes.force[i]) * v[i] + (m[i] + nodes.moment[i]) * w[i]);
                 kinetic += nodes.inverseMass[i / 3] > 0 ? 0.5 * nodes.mass[i / 3] * v[i] * nodes.velocity[i] : 0;
-                kinetic += nodes.inverseInertia[i / 3] > 0 ? 0.5 / nodes.inverseInertia[i / 3] * w[i] * nodes.spin[i] : 0;
+                double inverse = nodes.inverseInertia[i / 3];
+                kinetic += inverse > 0 ? 0.5 / inverse * w[i] * nodes.spin[i] : 0;
             }
             StructureEnergy energy = structure.energy(loop.strainEnergy);
             double balance = kinetic - work + energy.modalDissipation() - energy.supportWork();
