@@ -32,4 +32,12 @@ public interface ContactKernel {
     default double dampingRatio() {
         return 0;
     }
+
+    /**
+     * Several kernels as one, called in order. A vector kernel must stay small (some seventy vector operations) to keep
+     * its vectors in registers; a longer law is cut into kernels and put together here.
+     */
+    static ContactKernel inOrder(ContactKernel first, ContactKernel... others) {
+        return new KernelSequence(first, others);
+    }
 }

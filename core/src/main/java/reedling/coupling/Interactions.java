@@ -71,7 +71,7 @@ public final class Interactions {
         this.fields = List.copyOf(fields);
         lists = new NeighbourLists(materials.materials().size(), laws.signedColumns());
         candidates = new CandidateWatch(laws);
-        pairs = new PairForces(laws);
+        pairs = new PairForces(laws, materials.pairs().size());
         facets = new WallFacets(walls, startTime);
         this.walls = new WallContacts(laws, materials, facets);
         wires = new WireContacts(laws, materials, structure, materialOfBody);
@@ -187,7 +187,7 @@ public final class Interactions {
         Workspace workspace = workspaces.get(worker);
         candidates.look(
                 chunk, grains, lists.layout(), coarseStep.travel(), coarseStep.reach(), coarseStep.approach(), tally);
-        pairs.apply(chunk, grains, coarseStep, workspace.block(), tally);
+        pairs.apply(chunk, grains, coarseStep, workspace.rows(), tally);
         walls.apply(task, grains, coarseStep, workspace, tally);
         double potential = 0;
         for (int k = 0; k < fields.size(); k++) {

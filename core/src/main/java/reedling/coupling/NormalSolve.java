@@ -25,20 +25,21 @@ import reedling.neighbour.PairSegment;
  * <p>Source of the clipped end of contact: Schwager and Poeschel, Coefficient of restitution and linear-dashpot model
  * revisited, 2007 (from memory).
  */
-final class NormalSolve {
+final class NormalSolve implements RowStage {
 
     /** Overlap over effective radius at which a run is stopped: far outside what contact laws can mean. */
     static final double DEEPEST = 0.5;
 
     private static final int HISTORY_RADIUS = 0;
 
-    private NormalSolve() {}
-
-    static void solve(ContactBlock block, float[] ledger, int ledgerAt, ContactTally tally) {
+    @Override
+    public void run(RowRange rows) {
+        ContactBlock block = rows.block();
+        ContactTally tally = rows.tally();
         if (Lanes.VECTORISED) {
-            vector(block, ledger, ledgerAt, tally);
+            vector(block, rows.ledger(), rows.ledgerAt(), tally);
         } else {
-            scalar(block, ledger, ledgerAt, tally);
+            scalar(block, rows.ledger(), rows.ledgerAt(), tally);
         }
         if (!(block.shortestDuration() == Double.POSITIVE_INFINITY)) {
             tally.duration(block.shortestDuration());

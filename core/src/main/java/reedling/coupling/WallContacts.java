@@ -37,6 +37,7 @@ public final class WallContacts {
     private final MaterialTable materials;
     private final WallFacets facets;
     private final HistoryCarry carry;
+    private final List<StageLine> lawLines = new ArrayList<>();
     private final List<PairSegment[]> segments = new ArrayList<>();
     private final List<double[][]> radii = new ArrayList<>();
     private final List<double[]> loads = new ArrayList<>();
@@ -51,6 +52,9 @@ public final class WallContacts {
         this.materials = materials;
         this.facets = facets;
         carry = new HistoryCarry(laws.signedColumns(), false);
+        for (int pair = 0; pair < materials.pairs().size(); pair++) {
+            lawLines.add(StageLine.ofLaws(laws.bound(ContactKind.GRAIN_WALL, pair)));
+        }
         total = new double[LOAD * facets.walls().size()];
     }
 
@@ -133,19 +137,16 @@ public final class WallContacts {
         double[] load = loads.get(chunk);
         Arrays.fill(load, 0);
         PairSegment[] own = segments.get(chunk);
-        ContactBlock block = workspace.block();
+        RowRange rows = workspace.rows();
         for (int pair = 0; pair < own.length; pair++) {
             PairSegment segment = own[pair];
-            LawSet.Bound bound = laws.bound(ContactKind.GRAIN_WALL, pair);
-            int padded = segment.paddedCount();
-            for (int from = 0; from < padded; from += ContactBlock.CAPACITY) {
-                int rows = Math.min(ContactBlock.CAPACITY, padded - from);
-                block.open(rows, step.pastStep(), segment.history(), segment.historyAt(from), segment.historyColumns(),
-                        step.energyDue());
-                gather(block, segment, from, radii.get(chunk)[pair], grains, workspace.row());
-                StageRunner.approach(block, bound.normal(), step.approach(), tally);
-                StageRunner.run(block, bound, segment.ledgerHistory(), PairSegment.ledgerAt(from), tally);
-                scatter(block, segment, from, grains, load);
+            for (int from = 0; from < segment.paddedCount(); from += ContactBlock.CAPACITY) {
+                rows.open(segment, from, step, grains, tally);
+                gather(rows.block(), segment, from, radii.get(chunk)[pair], grains, workspace.row());
+                ApproachScan.scan(
+                        rows.block(), laws.bound(ContactKind.GRAIN_WALL, pair).normal(), step.approach(), tally);
+                lawLines.get(pair).run(rows);
+                scatter(rows.block(), segment, from, grains, load);
             }
         }
     }

@@ -38,6 +38,7 @@ public final class WireContacts implements NodalLoads {
     private final MaterialTable materials;
     private final WireElements elements;
     private final HistoryCarry carry;
+    private final List<StageLine> lawLines = new ArrayList<>();
     private final List<WireChunk> pool = new ArrayList<>();
     private final List<WireTouch> touches = new ArrayList<>();
     private int chunks;
@@ -48,6 +49,9 @@ public final class WireContacts implements NodalLoads {
         this.materials = materials;
         elements = new WireElements(structure, materialOfBody);
         carry = new HistoryCarry(laws.signedColumns(), false);
+        for (int pair = 0; pair < materials.pairs().size(); pair++) {
+            lawLines.add(StageLine.ofLaws(laws.bound(ContactKind.GRAIN_WIRE, pair)));
+        }
     }
 
     WireElements elements() {
@@ -155,18 +159,15 @@ public final class WireContacts implements NodalLoads {
     void apply(int number, GrainStore grains, StepContext step, Workspace workspace, int worker, ContactTally tally) {
         WireChunk chunk = pool.get(number);
         touches.get(worker).update(chunk, grains, pass, step.approach(), tally);
-        ContactBlock block = workspace.block();
+        RowRange range = workspace.rows();
         for (int pair = 0; pair < chunk.rows().length; pair++) {
             WireRows rows = chunk.rows()[pair];
             PairSegment segment = rows.segment();
-            LawSet.Bound bound = laws.bound(ContactKind.GRAIN_WIRE, pair);
             for (int from = 0; from < segment.paddedCount(); from += ContactBlock.CAPACITY) {
-                int count = Math.min(ContactBlock.CAPACITY, segment.paddedCount() - from);
-                block.open(count, step.pastStep(), segment.history(), segment.historyAt(from), segment.historyColumns(),
-                        step.energyDue());
-                gather(block, rows, from, grains, workspace.row());
-                StageRunner.run(block, bound, segment.ledgerHistory(), PairSegment.ledgerAt(from), tally);
-                scatter(block, chunk, rows, from);
+                range.open(segment, from, step, grains, tally);
+                gather(range.block(), rows, from, grains, workspace.row());
+                lawLines.get(pair).run(range);
+                scatter(range.block(), chunk, rows, from);
             }
         }
     }

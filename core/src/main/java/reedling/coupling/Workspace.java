@@ -1,16 +1,14 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.coupling;
 
-import reedling.contact.ContactBlock;
-
-/** What one worker needs while it works through tasks: a block of contact rows and a row under construction. */
+/** What one worker needs while it works through tasks: a range of contact rows and a row under construction. */
 final class Workspace {
 
-    private final ContactBlock block = new ContactBlock();
+    private final RowRange rows = new RowRange();
     private final SurfaceRow row = new SurfaceRow();
 
-    ContactBlock block() {
-        return block;
+    RowRange rows() {
+        return rows;
     }
 
     SurfaceRow row() {

@@ -9,6 +9,9 @@ import jdk.incubator.vector.VectorShuffle;
  * Turns eight rows of eight doubles into eight columns, in registers: three rounds that exchange the halves of vectors
  * four, two and one places apart. The same rounds turn columns back into rows. Plain versions with the same bits run
  * where there are no 512-bit vectors.
+ *
+ * <p>The first round and the other two are methods of their own, with the tile in memory between them: one method for all
+ * passes the compiler's limit on inlined code, and every vector becomes an object.
  */
 public final class Tile {
 
@@ -22,8 +25,9 @@ public final class Tile {
     private Tile() {}
 
     /**
-     * Combines the rows of eight pairs and turns the result into columns: lane c of
-     * {@code weight * row(first) + row(second)} of pair k goes to {@code columns[at + c * stride + k]}.
+     * Combines the rows of eight pairs and does the first round of turning the result into columns; after
+     * {@link #finishTurn}, lane c of {@code weight * row(first) + row(second)} of pair k stands at
+     * {@code columns[at + c * stride + k]}.
      *
      * @param rows the array of rows
      * @param base index of the wanted eight doubles of row 0
@@ -53,20 +57,50 @@ public final class Tile {
         DoubleVector g = combined(rows, base + length * first[pair + 6], base + length * second[pair + 6], w);
         DoubleVector h = combined(rows, base + length * first[pair + 7], base + length * second[pair + 7], w);
 
-        DoubleVector a4 = low4(a, e), b4 = low4(b, f), c4 = low4(c, g), d4 = low4(d, h);
-        DoubleVector e4 = high4(a, e), f4 = high4(b, f), g4 = high4(c, g), h4 = high4(d, h);
+        store(low4(a, e), columns, at);
+        store(low4(b, f), columns, at + stride);
+        store(low4(c, g), columns, at + 2 * stride);
+        store(low4(d, h), columns, at + 3 * stride);
+        store(high4(a, e), columns, at + 4 * stride);
+        store(high4(b, f), columns, at + 5 * stride);
+        store(high4(c, g), columns, at + 6 * stride);
+        store(high4(d, h), columns, at + 7 * stride);
+    }
 
-        DoubleVector a2 = low2(a4, c4), b2 = low2(b4, d4), c2 = high2(a4, c4), d2 = high2(b4, d4);
-        DoubleVector e2 = low2(e4, g4), f2 = low2(f4, h4), g2 = high2(e4, g4), h2 = high2(f4, h4);
+    /** Second and third round of a turn, in place. */
+    public static void finishTurn(double[] columns, int at, int stride) {
+        DoubleVector a = load(columns, at), b = load(columns, at + stride);
+        DoubleVector c = load(columns, at + 2 * stride), d = load(columns, at + 3 * stride);
+        DoubleVector e = load(columns, at + 4 * stride), f = load(columns, at + 5 * stride);
+        DoubleVector g = load(columns, at + 6 * stride), h = load(columns, at + 7 * stride);
 
-        low1(a2, b2).intoArray(columns, at);
-        high1(a2, b2).intoArray(columns, at + stride);
-        low1(c2, d2).intoArray(columns, at + 2 * stride);
-        high1(c2, d2).intoArray(columns, at + 3 * stride);
-        low1(e2, f2).intoArray(columns, at + 4 * stride);
-        high1(e2, f2).intoArray(columns, at + 5 * stride);
-        low1(g2, h2).intoArray(columns, at + 6 * stride);
-        high1(g2, h2).intoArray(columns, at + 7 * stride);
+        DoubleVector a2 = low2(a, c), b2 = low2(b, d), c2 = high2(a, c), d2 = high2(b, d);
+        DoubleVector e2 = low2(e, g), f2 = low2(f, h), g2 = high2(e, g), h2 = high2(f, h);
+
+        store(low1(a2, b2), columns, at);
+        store(high1(a2, b2), columns, at + stride);
+        store(low1(c2, d2), columns, at + 2 * stride);
+        store(high1(c2, d2), columns, at + 3 * stride);
+        store(low1(e2, f2), columns, at + 4 * stride);
+        store(high1(e2, f2), columns, at + 5 * stride);
+        store(low1(g2, h2), columns, at + 6 * stride);
+        store(high1(g2, h2), columns, at + 7 * stride);
+    }
+
+    /** First round of a turn, in place. */
+    public static void beginTurn(double[] columns, int at, int stride) {
+        DoubleVector a = load(columns, at), b = load(columns, at + stride);
+        DoubleVector c = load(columns, at + 2 * stride), d = load(columns, at + 3 * stride);
+        DoubleVector e = load(columns, at + 4 * stride), f = load(columns, at + 5 * stride);
+        DoubleVector g = load(columns, at + 6 * stride), h = load(columns, at + 7 * stride);
+        store(low4(a, e), columns, at);
+        store(low4(b, f), columns, at + stride);
+        store(low4(c, g), columns, at + 2 * stride);
+        store(low4(d, h), columns, at + 3 * stride);
+        store(high4(a, e), columns, at + 4 * stride);
+        store(high4(b, f), columns, at + 5 * stride);
+        store(high4(c, g), columns, at + 6 * stride);
+        store(high4(d, h), columns, at + 7 * stride);
     }
 
     private static DoubleVector combined(double[] rows, int first, int second, DoubleVector weight) {
@@ -74,7 +108,7 @@ public final class Tile {
                 .fma(weight, DoubleVector.fromArray(Lanes.SPECIES, rows, second));
     }
 
-    /** {@link #combine} one number at a time. */
+    /** {@link #combine} and the whole turn, one number at a time. */
     public static void combineScalar(
             double[] rows,
             int base,
@@ -96,36 +130,20 @@ public final class Tile {
     }
 
     /**
-     * Turns eight columns back into rows and adds each to the row its pair names.
+     * Adds eight turned rows, row k at {@code at + k * stride}, each to the row its pair names.
      *
-     * @param columns column c of the tile starts at {@code at + c * stride}
      * @param target rows of eight doubles
      * @param base index of row 0 in the target
      * @param index row numbers; eight are read from {@code pair}
      */
-    public static void addToRows(double[] columns, int at, int stride, double[] target, int base, int[] index, int pair) {
-        DoubleVector c0 = load(columns, at), c1 = load(columns, at + stride);
-        DoubleVector c2 = load(columns, at + 2 * stride), c3 = load(columns, at + 3 * stride);
-        DoubleVector c4 = load(columns, at + 4 * stride), c5 = load(columns, at + 5 * stride);
-        DoubleVector c6 = load(columns, at + 6 * stride), c7 = load(columns, at + 7 * stride);
-
-        DoubleVector a4 = low4(c0, c4), b4 = low4(c1, c5), c4l = low4(c2, c6), d4 = low4(c3, c7);
-        DoubleVector e4 = high4(c0, c4), f4 = high4(c1, c5), g4 = high4(c2, c6), h4 = high4(c3, c7);
-
-        DoubleVector a2 = low2(a4, c4l), b2 = low2(b4, d4), c2l = high2(a4, c4l), d2 = high2(b4, d4);
-        DoubleVector e2 = low2(e4, g4), f2 = low2(f4, h4), g2 = high2(e4, g4), h2 = high2(f4, h4);
-
-        add(low1(a2, b2), target, base + 8 * index[pair]);
-        add(high1(a2, b2), target, base + 8 * index[pair + 1]);
-        add(low1(c2l, d2), target, base + 8 * index[pair + 2]);
-        add(high1(c2l, d2), target, base + 8 * index[pair + 3]);
-        add(low1(e2, f2), target, base + 8 * index[pair + 4]);
-        add(high1(e2, f2), target, base + 8 * index[pair + 5]);
-        add(low1(g2, h2), target, base + 8 * index[pair + 6]);
-        add(high1(g2, h2), target, base + 8 * index[pair + 7]);
+    public static void addRows(double[] columns, int at, int stride, double[] target, int base, int[] index, int pair) {
+        for (int k = 0; k < Lanes.TILE; k++) {
+            int row = base + 8 * index[pair + k];
+            load(target, row).add(load(columns, at + k * stride)).intoArray(target, row);
+        }
     }
 
-    /** {@link #addToRows} one number at a time. */
+    /** Turns eight columns back into rows and adds them, one number at a time. */
     public static void addToRowsScalar(
             double[] columns, int at, int stride, double[] target, int base, int[] index, int pair) {
         for (int k = 0; k < Lanes.TILE; k++) {
@@ -136,30 +154,14 @@ public final class Tile {
         }
     }
 
-    /** As {@link #addToRows}, but stores the eight rows one after the other from {@code to}. */
+    /** Stores eight turned rows, row k at {@code at + k * stride}, one after the other from {@code to}. */
     public static void storeRows(double[] columns, int at, int stride, double[] target, int to) {
-        DoubleVector c0 = load(columns, at), c1 = load(columns, at + stride);
-        DoubleVector c2 = load(columns, at + 2 * stride), c3 = load(columns, at + 3 * stride);
-        DoubleVector c4 = load(columns, at + 4 * stride), c5 = load(columns, at + 5 * stride);
-        DoubleVector c6 = load(columns, at + 6 * stride), c7 = load(columns, at + 7 * stride);
-
-        DoubleVector a4 = low4(c0, c4), b4 = low4(c1, c5), c4l = low4(c2, c6), d4 = low4(c3, c7);
-        DoubleVector e4 = high4(c0, c4), f4 = high4(c1, c5), g4 = high4(c2, c6), h4 = high4(c3, c7);
-
-        DoubleVector a2 = low2(a4, c4l), b2 = low2(b4, d4), c2l = high2(a4, c4l), d2 = high2(b4, d4);
-        DoubleVector e2 = low2(e4, g4), f2 = low2(f4, h4), g2 = high2(e4, g4), h2 = high2(f4, h4);
-
-        low1(a2, b2).intoArray(target, to);
-        high1(a2, b2).intoArray(target, to + 8);
-        low1(c2l, d2).intoArray(target, to + 16);
-        high1(c2l, d2).intoArray(target, to + 24);
-        low1(e2, f2).intoArray(target, to + 32);
-        high1(e2, f2).intoArray(target, to + 40);
-        low1(g2, h2).intoArray(target, to + 48);
-        high1(g2, h2).intoArray(target, to + 56);
+        for (int k = 0; k < Lanes.TILE; k++) {
+            load(columns, at + k * stride).intoArray(target, to + 8 * k);
+        }
     }
 
-    /** {@link #storeRows} one number at a time. */
+    /** Turns eight columns back into rows and stores them, one number at a time. */
     public static void storeRowsScalar(double[] columns, int at, int stride, double[] target, int to) {
         for (int k = 0; k < Lanes.TILE; k++) {
             for (int c = 0; c < Lanes.TILE; c++) {
@@ -172,8 +174,8 @@ public final class Tile {
         return DoubleVector.fromArray(Lanes.SPECIES, from, at);
     }
 
-    private static void add(DoubleVector row, double[] target, int at) {
-        load(target, at).add(row).intoArray(target, at);
+    private static void store(DoubleVector value, double[] to, int at) {
+        value.intoArray(to, at);
     }
 
     private static DoubleVector low4(DoubleVector a, DoubleVector b) {

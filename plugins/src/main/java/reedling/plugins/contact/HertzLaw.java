@@ -13,6 +13,7 @@ import reedling.contact.ContactKernel;
 import reedling.contact.ContactKind;
 import reedling.contact.ContactLaw;
 import reedling.math.Lanes;
+import reedling.math.Roots;
 import reedling.material.MaterialPair;
 
 /**
@@ -42,20 +43,25 @@ final class HertzLaw implements ContactLaw {
 
     @Override
     public ContactKernel bind(MaterialPair pair, ContactKind kind, int historyColumn) {
-        return new Kernel(pair.contactModulus(), StrictMath.sqrt(5) * Restitution.dampingRatio(pair.restitution()));
+        double modulus = pair.contactModulus();
+        return new Kernel(
+                modulus,
+                StrictMath.sqrt(5) * Restitution.dampingRatio(pair.restitution()),
+                DURATION * StrictMath.pow(modulus, -0.4));
     }
 
     /**
      * @param modulus E*, Pa
      * @param alpha damping number, 0 for an elastic contact
+     * @param duration contact time for (m*^2 / (R* v))^(1/5) = 1 SI
      */
-    private record Kernel(double modulus, double alpha) implements ContactKernel {
+    private record Kernel(double modulus, double alpha, double duration) implements ContactKernel {
 
         @Override
         public void apply(ContactBlock block) {
             double slowest = Lanes.VECTORISED ? vector(block) : scalar(block);
             if (!(slowest == Double.POSITIVE_INFINITY)) {
-                block.reportDuration(DURATION * StrictMath.pow(slowest, 0.1) * StrictMath.pow(modulus, -0.4));
+                block.reportDuration(duration * Roots.tenth(slowest));
             }
             if (block.energyDue()) {
                 storedEnergy(block);
@@ -66,6 +72,12 @@ final class HertzLaw implements ContactLaw {
         private double vector(ContactBlock block) {
             double[] c = block.columns();
             double damping = alpha * StrictMath.sqrt(2.0 / 3);
+            DoubleVector smallest = DoubleVector.broadcast(Lanes.SPECIES, SMALLEST_OVERLAP);
+            DoubleVector twiceModulus = DoubleVector.broadcast(Lanes.SPECIES, 2 * modulus);
+            DoubleVector twoThirds = DoubleVector.broadcast(Lanes.SPECIES, 2.0 / 3);
+            DoubleVector dashpot = DoubleVector.broadcast(Lanes.SPECIES, damping);
+            DoubleVector share = DoubleVector.broadcast(Lanes.SPECIES, 0.8);
+            DoubleVector zero = DoubleVector.zero(Lanes.SPECIES);
             DoubleVector infinite = DoubleVector.broadcast(Lanes.SPECIES, Double.POSITIVE_INFINITY);
             DoubleVector least = infinite;
             for (int r = 0; r < block.rows(); r += Lanes.TILE) {
@@ -73,23 +85,22 @@ final class HertzLaw implements ContactLaw {
                 DoubleVector mass = load(c, Column.EFFECTIVE_MASS, r);
                 DoubleVector closing = load(c, Column.CLOSING, r);
                 DoubleVector signed = load(c, Column.OVERLAP, r);
-                DoubleVector smallest = DoubleVector.broadcast(Lanes.SPECIES, SMALLEST_OVERLAP);
                 DoubleVector overlap = Lanes.larger(signed, smallest);
 
                 DoubleVector area = radius.mul(overlap).sqrt();
-                DoubleVector stiffness = area.mul(2 * modulus);
-                DoubleVector force = stiffness.mul(overlap).mul(2.0 / 3);
+                DoubleVector stiffness = area.mul(twiceModulus);
+                DoubleVector force = stiffness.mul(overlap).mul(twoThirds);
                 store(area, c, Column.CONTACT_RADIUS, r);
                 store(stiffness, c, Column.STIFFNESS, r);
                 store(force, c, Column.ELASTIC_FORCE, r);
-                store(stiffness.mul(mass).sqrt().mul(damping), c, Column.DAMPING, r);
+                store(stiffness.mul(mass).sqrt().mul(dashpot), c, Column.DAMPING, r);
 
                 DoubleVector massSquared = mass.mul(mass);
                 DoubleVector speedTimesMass = closing.mul(closing).mul(mass); // m* v_eq^2
-                speedTimesMass = force.mul(overlap).mul(0.8).add(speedTimesMass);
+                speedTimesMass = force.mul(overlap).mul(share).add(speedTimesMass);
                 // (m^2/R)^2 / v_eq^2 = m^5 / (R^2 m v_eq^2)
                 DoubleVector slow = massSquared.mul(massSquared).mul(mass).div(speedTimesMass.mul(radius).mul(radius));
-                least = Lanes.smaller(infinite.blend(slow, signed.compare(VectorOperators.GT, 0.0)), least);
+                least = Lanes.smaller(infinite.blend(slow, zero.lt(signed)), least);
             }
             return least.reduceLanes(VectorOperators.MIN);
         }
@@ -131,8 +142,7 @@ final class HertzLaw implements ContactLaw {
 
         @Override
         public double duration(double speed, double radius, double mass) {
-            double q = mass * mass / (radius * modulus * modulus * speed);
-            return DURATION * StrictMath.pow(q, 0.2);
+            return duration * Roots.fifth(mass * mass / (radius * speed));
         }
 
         @Override

@@ -12,6 +12,7 @@ import reedling.contact.ContactBlock;
 import reedling.contact.ContactKernel;
 import reedling.contact.ContactKind;
 import reedling.contact.ContactLaw;
+import reedling.contact.ContactMemory;
 import reedling.contact.HistoryColumn;
 import reedling.math.Lanes;
 import reedling.material.MaterialPair;
@@ -51,7 +52,9 @@ final class MindlinLaw implements ContactLaw {
     public ContactKernel bind(MaterialPair pair, ContactKind kind, int historyColumn) {
         double sliding = 8 * pair.contactShearModulus();
         double normal = 2 * pair.contactModulus();
-        return new Kernel(sliding, StrictMath.sqrt(sliding / normal), pair.friction(), historyColumn);
+        return ContactKernel.inOrder(
+                new ContactMemory(historyColumn, Column.SLIDING),
+                new Kernel(sliding, StrictMath.sqrt(sliding / normal), pair.friction(), historyColumn));
     }
 
     /**
@@ -78,8 +81,11 @@ final class MindlinLaw implements ContactLaw {
             double[] c = block.columns();
             double[] history = block.history();
             DoubleVector one = DoubleVector.broadcast(Lanes.SPECIES, 1.0);
-            DoubleVector step = DoubleVector.broadcast(Lanes.SPECIES, block.step());
             DoubleVector tiny = DoubleVector.broadcast(Lanes.SPECIES, TINY);
+            DoubleVector perRadius = DoubleVector.broadcast(Lanes.SPECIES, stiffness);
+            DoubleVector shareOfDashpot = DoubleVector.broadcast(Lanes.SPECIES, dampingShare);
+            DoubleVector mu = DoubleVector.broadcast(Lanes.SPECIES, friction);
+            DoubleVector halfStep = DoubleVector.broadcast(Lanes.SPECIES, 0.5 * block.step());
             for (int r = 0; r < block.rows(); r += Lanes.TILE) {
                 int at = block.historyAt(r, column);
                 DoubleVector touch = load(c, Column.TOUCH, r);
@@ -87,28 +93,22 @@ final class MindlinLaw implements ContactLaw {
                 DoubleVector vy = load(c, Column.SLIDING + 1, r);
                 DoubleVector vz = load(c, Column.SLIDING + 2, r);
 
-                // 1 turn the stretch with the contact; loading keeps the force
+                // 1 stretch, already advanced
                 DoubleVector x = DoubleVector.fromArray(Lanes.SPECIES, history, at);
                 DoubleVector y = DoubleVector.fromArray(Lanes.SPECIES, history, at + Lanes.TILE);
                 DoubleVector z = DoubleVector.fromArray(Lanes.SPECIES, history, at + 2 * Lanes.TILE);
-                DoubleVector along = x.fma(load(c, Column.NORMAL, r),
-                        y.fma(load(c, Column.NORMAL + 1, r), z.mul(load(c, Column.NORMAL + 2, r)))).neg();
-                DoubleVector keep = Lanes.smaller(load(c, Column.RADIUS_RATIO, r), one);
-                x = vx.fma(step, along.fma(load(c, Column.MEAN_NORMAL, r), x).mul(keep));
-                y = vy.fma(step, along.fma(load(c, Column.MEAN_NORMAL + 1, r), y).mul(keep));
-                z = vz.fma(step, along.fma(load(c, Column.MEAN_NORMAL + 2, r), z).mul(keep));
 
                 // 2 spring and dashpot
-                DoubleVector k = load(c, Column.CONTACT_RADIUS, r).mul(stiffness);
-                DoubleVector dashpot = load(c, Column.DAMPING, r).mul(dampingShare);
+                DoubleVector k = load(c, Column.CONTACT_RADIUS, r).mul(perRadius);
+                DoubleVector dashpot = load(c, Column.DAMPING, r).mul(shareOfDashpot);
                 DoubleVector gx = k.fma(x, dashpot.mul(vx));
                 DoubleVector gy = k.fma(y, dashpot.mul(vy));
                 DoubleVector gz = k.fma(z, dashpot.mul(vz));
-                DoubleVector den = step.mul(0.5).mul(dashpot).fma(load(c, Column.INVERSE_MASS_SLIDING, r), one);
+                DoubleVector den = halfStep.mul(dashpot).fma(load(c, Column.INVERSE_MASS_SLIDING, r), one);
 
                 // 3 Coulomb's limit; one division serves both quotients
                 DoubleVector size = Lanes.larger(gx.fma(gx, gy.fma(gy, gz.mul(gz))).sqrt(), tiny);
-                DoubleVector limit = load(c, Column.NORMAL_FORCE, r).mul(friction).mul(den);
+                DoubleVector limit = load(c, Column.NORMAL_FORCE, r).mul(mu).mul(den);
                 DoubleVector share = Lanes.smaller(size, limit).mul(touch).div(size.mul(den));
                 DoubleVector keepStretch = share.mul(den);
                 store(gx.mul(share), c, Column.FRICTION, r);
@@ -132,17 +132,8 @@ final class MindlinLaw implements ContactLaw {
                 double vy = c[at(Column.SLIDING + 1) + r];
                 double vz = c[at(Column.SLIDING + 2) + r];
 
-                // 1 turn the stretch with the contact; loading keeps the force
-                double x = history[at];
-                double y = history[at + Lanes.TILE];
-                double z = history[at + 2 * Lanes.TILE];
-                double along = -Math.fma(x, c[at(Column.NORMAL) + r],
-                        Math.fma(y, c[at(Column.NORMAL + 1) + r], z * c[at(Column.NORMAL + 2) + r]));
-                double ratio = c[at(Column.RADIUS_RATIO) + r];
-                double keep = ratio < 1.0 ? ratio : 1.0;
-                x = Math.fma(vx, step, Math.fma(along, c[at(Column.MEAN_NORMAL) + r], x) * keep);
-                y = Math.fma(vy, step, Math.fma(along, c[at(Column.MEAN_NORMAL + 1) + r], y) * keep);
-                z = Math.fma(vz, step, Math.fma(along, c[at(Column.MEAN_NORMAL + 2) + r], z) * keep);
+                // 1 stretch, already advanced
+                double x = history[at], y = history[at + Lanes.TILE], z = history[at + 2 * Lanes.TILE];
 
                 // 2 spring and dashpot
                 double k = c[at(Column.CONTACT_RADIUS) + r] * stiffness;
@@ -150,7 +141,7 @@ final class MindlinLaw implements ContactLaw {
                 double gx = Math.fma(k, x, dashpot * vx);
                 double gy = Math.fma(k, y, dashpot * vy);
                 double gz = Math.fma(k, z, dashpot * vz);
-                double den = Math.fma(step * 0.5 * dashpot, c[at(Column.INVERSE_MASS_SLIDING) + r], 1.0);
+                double den = Math.fma(0.5 * step * dashpot, c[at(Column.INVERSE_MASS_SLIDING) + r], 1.0);
 
                 // 3 Coulomb's limit; one division serves both quotients
                 double raw = Math.sqrt(Math.fma(gx, gx, Math.fma(gy, gy, gz * gz)));

@@ -12,6 +12,7 @@ import reedling.contact.ContactBlock;
 import reedling.contact.ContactKernel;
 import reedling.contact.ContactKind;
 import reedling.contact.ContactLaw;
+import reedling.contact.ContactMemory;
 import reedling.contact.HistoryColumn;
 import reedling.math.Lanes;
 import reedling.material.MaterialPair;
@@ -54,7 +55,43 @@ final class RollingLaw implements ContactLaw {
     @Override
     public ContactKernel bind(MaterialPair pair, ContactKind kind, int historyColumn) {
         double friction = pair.rollingFriction();
-        return new Kernel(friction, SHAPE * friction * friction, 2 * dampingRatio, historyColumn);
+        return ContactKernel.inOrder(
+                RollingLaw::dropTwist,
+                new ContactMemory(historyColumn, Column.SPIN),
+                new Kernel(friction, SHAPE * friction * friction, 2 * dampingRatio, historyColumn));
+    }
+
+    /** Takes the part along the normal off the relative spin; no other stage needs it. */
+    private static void dropTwist(ContactBlock block) {
+        if (Lanes.VECTORISED) {
+            dropTwistVector(block);
+        } else {
+            dropTwistScalar(block);
+        }
+    }
+
+    private static void dropTwistVector(ContactBlock block) {
+        double[] c = block.columns();
+        for (int r = 0; r < block.rows(); r += Lanes.TILE) {
+            DoubleVector nx = load(c, Column.NORMAL, r), ny = load(c, Column.NORMAL + 1, r), nz = load(c, Column.NORMAL + 2, r);
+            DoubleVector wx = load(c, Column.SPIN, r), wy = load(c, Column.SPIN + 1, r), wz = load(c, Column.SPIN + 2, r);
+            DoubleVector twist = wx.fma(nx, wy.fma(ny, wz.mul(nz))).neg();
+            store(twist.fma(nx, wx), c, Column.SPIN, r);
+            store(twist.fma(ny, wy), c, Column.SPIN + 1, r);
+            store(twist.fma(nz, wz), c, Column.SPIN + 2, r);
+        }
+    }
+
+    private static void dropTwistScalar(ContactBlock block) {
+        double[] c = block.columns();
+        for (int r = 0; r < block.rows(); r++) {
+            double nx = c[at(Column.NORMAL) + r], ny = c[at(Column.NORMAL + 1) + r], nz = c[at(Column.NORMAL + 2) + r];
+            double wx = c[at(Column.SPIN) + r], wy = c[at(Column.SPIN + 1) + r], wz = c[at(Column.SPIN + 2) + r];
+            double twist = -Math.fma(wx, nx, Math.fma(wy, ny, wz * nz));
+            c[at(Column.SPIN) + r] = Math.fma(twist, nx, wx);
+            c[at(Column.SPIN + 1) + r] = Math.fma(twist, ny, wy);
+            c[at(Column.SPIN + 2) + r] = Math.fma(twist, nz, wz);
+        }
     }
 
     /**
@@ -81,43 +118,34 @@ final class RollingLaw implements ContactLaw {
             double[] c = block.columns();
             double[] history = block.history();
             DoubleVector one = DoubleVector.broadcast(Lanes.SPECIES, 1.0);
-            DoubleVector step = DoubleVector.broadcast(Lanes.SPECIES, block.step());
             DoubleVector tiny = DoubleVector.broadcast(Lanes.SPECIES, TINY);
+            DoubleVector shape = DoubleVector.broadcast(Lanes.SPECIES, stiffness);
+            DoubleVector twiceEta = DoubleVector.broadcast(Lanes.SPECIES, damping);
+            DoubleVector mu = DoubleVector.broadcast(Lanes.SPECIES, friction);
+            DoubleVector halfStep = DoubleVector.broadcast(Lanes.SPECIES, 0.5 * block.step());
             for (int r = 0; r < block.rows(); r += Lanes.TILE) {
                 int at = block.historyAt(r, column);
-                DoubleVector nx = load(c, Column.NORMAL, r), ny = load(c, Column.NORMAL + 1, r), nz = load(c, Column.NORMAL + 2, r);
                 DoubleVector touch = load(c, Column.TOUCH, r);
-
-                // 1 rolling part of the relative spin
                 DoubleVector wx = load(c, Column.SPIN, r), wy = load(c, Column.SPIN + 1, r), wz = load(c, Column.SPIN + 2, r);
-                DoubleVector twist = wx.fma(nx, wy.fma(ny, wz.mul(nz))).neg();
-                wx = twist.fma(nx, wx);
-                wy = twist.fma(ny, wy);
-                wz = twist.fma(nz, wz);
 
-                // 2 turn the angle with the contact; loading keeps the moment
+                // 1 angle, already advanced
                 DoubleVector x = DoubleVector.fromArray(Lanes.SPECIES, history, at);
                 DoubleVector y = DoubleVector.fromArray(Lanes.SPECIES, history, at + Lanes.TILE);
                 DoubleVector z = DoubleVector.fromArray(Lanes.SPECIES, history, at + 2 * Lanes.TILE);
-                DoubleVector along = x.fma(nx, y.fma(ny, z.mul(nz))).neg();
-                DoubleVector keep = Lanes.smaller(load(c, Column.RADIUS_RATIO, r), one);
-                x = wx.fma(step, along.fma(load(c, Column.MEAN_NORMAL, r), x).mul(keep));
-                y = wy.fma(step, along.fma(load(c, Column.MEAN_NORMAL + 1, r), y).mul(keep));
-                z = wz.fma(step, along.fma(load(c, Column.MEAN_NORMAL + 2, r), z).mul(keep));
 
-                // 3 spring and dashpot
+                // 2 spring and dashpot
                 DoubleVector radius = load(c, Column.EFFECTIVE_RADIUS, r);
                 DoubleVector inverseInertia = load(c, Column.INVERSE_INERTIA, r);
-                DoubleVector k = load(c, Column.STIFFNESS, r).mul(radius).mul(radius).mul(stiffness);
-                DoubleVector dashpot = k.div(inverseInertia).sqrt().mul(damping);
+                DoubleVector k = load(c, Column.STIFFNESS, r).mul(radius).mul(radius).mul(shape);
+                DoubleVector dashpot = k.div(inverseInertia).sqrt().mul(twiceEta);
                 DoubleVector gx = k.fma(x, dashpot.mul(wx));
                 DoubleVector gy = k.fma(y, dashpot.mul(wy));
                 DoubleVector gz = k.fma(z, dashpot.mul(wz));
-                DoubleVector den = step.mul(0.5).mul(dashpot).fma(inverseInertia, one);
+                DoubleVector den = halfStep.mul(dashpot).fma(inverseInertia, one);
 
-                // 4 the limit moment; one division serves both quotients
+                // 3 the limit moment; one division serves both quotients
                 DoubleVector size = Lanes.larger(gx.fma(gx, gy.fma(gy, gz.mul(gz))).sqrt(), tiny);
-                DoubleVector limit = load(c, Column.NORMAL_FORCE, r).mul(radius).mul(friction).mul(den);
+                DoubleVector limit = load(c, Column.NORMAL_FORCE, r).mul(radius).mul(mu).mul(den);
                 DoubleVector share = Lanes.smaller(size, limit).mul(touch).div(size.mul(den));
                 DoubleVector keepAngle = share.mul(den);
                 store(gx.mul(share), c, Column.ROLLING_MOMENT, r);
@@ -135,26 +163,13 @@ final class RollingLaw implements ContactLaw {
             double step = block.step();
             for (int r = 0; r < block.rows(); r++) {
                 int at = block.historyAtRow(r, column);
-                double nx = c[at(Column.NORMAL) + r], ny = c[at(Column.NORMAL + 1) + r], nz = c[at(Column.NORMAL + 2) + r];
                 double touch = c[at(Column.TOUCH) + r];
-
-                // 1 rolling part of the relative spin
                 double wx = c[at(Column.SPIN) + r], wy = c[at(Column.SPIN + 1) + r], wz = c[at(Column.SPIN + 2) + r];
-                double twist = -Math.fma(wx, nx, Math.fma(wy, ny, wz * nz));
-                wx = Math.fma(twist, nx, wx);
-                wy = Math.fma(twist, ny, wy);
-                wz = Math.fma(twist, nz, wz);
 
-                // 2 turn the angle with the contact; loading keeps the moment
+                // 1 angle, already advanced
                 double x = history[at], y = history[at + Lanes.TILE], z = history[at + 2 * Lanes.TILE];
-                double along = -Math.fma(x, nx, Math.fma(y, ny, z * nz));
-                double ratio = c[at(Column.RADIUS_RATIO) + r];
-                double keep = ratio < 1.0 ? ratio : 1.0;
-                x = Math.fma(wx, step, Math.fma(along, c[at(Column.MEAN_NORMAL) + r], x) * keep);
-                y = Math.fma(wy, step, Math.fma(along, c[at(Column.MEAN_NORMAL + 1) + r], y) * keep);
-                z = Math.fma(wz, step, Math.fma(along, c[at(Column.MEAN_NORMAL + 2) + r], z) * keep);
 
-                // 3 spring and dashpot
+                // 2 spring and dashpot
                 double radius = c[at(Column.EFFECTIVE_RADIUS) + r];
                 double inverseInertia = c[at(Column.INVERSE_INERTIA) + r];
                 double k = c[at(Column.STIFFNESS) + r] * radius * radius * stiffness;
@@ -162,9 +177,9 @@ final class RollingLaw implements ContactLaw {
                 double gx = Math.fma(k, x, dashpot * wx);
                 double gy = Math.fma(k, y, dashpot * wy);
                 double gz = Math.fma(k, z, dashpot * wz);
-                double den = Math.fma(step * 0.5 * dashpot, inverseInertia, 1.0);
+                double den = Math.fma(0.5 * step * dashpot, inverseInertia, 1.0);
 
-                // 4 the limit moment; one division serves both quotients
+                // 3 the limit moment; one division serves both quotients
                 double raw = Math.sqrt(Math.fma(gx, gx, Math.fma(gy, gy, gz * gz)));
                 double size = raw > TINY ? raw : TINY;
                 double limit = c[at(Column.NORMAL_FORCE) + r] * radius * friction * den;
