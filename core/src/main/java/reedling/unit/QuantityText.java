@@ -20,12 +20,12 @@ public final class QuantityText {
     static {
         SCALES.put(Dimension.LENGTH, scales("m", 0, -3, -6, -9));
         SCALES.put(Dimension.TIME, scales("s", 0, -3, -6, -9));
-        SCALES.put(Dimension.FREQUENCY, scales("Hz", 6, 3, 0));
+        SCALES.put(Dimension.FREQUENCY, scales("Hz", 9, 6, 3, 0));
         SCALES.put(Dimension.FORCE, scales("N", 6, 3, 0, -3, -6, -9));
         SCALES.put(Dimension.PRESSURE, scales("Pa", 9, 6, 3, 0));
         SCALES.put(Dimension.ENERGY, scales("J", 6, 3, 0, -3, -6, -9));
         SCALES.put(Dimension.POWER, scales("W", 6, 3, 0, -3, -6));
-        SCALES.put(Dimension.STIFFNESS, scales("N/m", 6, 3, 0));
+        SCALES.put(Dimension.STIFFNESS, scales("N/m", 9, 6, 3, 0));
         SCALES.put(Dimension.MASS, new Scale[] {
             new Scale("t", 1e3, "1e-3"), new Scale("kg", 1, "1"), new Scale("g", 1e-3, "1e3"), new Scale("mg", 0, "1e6")
         });

@@ -21,12 +21,19 @@ record UnitFactor(BigDecimal numerator, BigDecimal denominator, Exponents expone
 
     /** This times the other raised to a power, which may be negative. */
     UnitFactor times(UnitFactor other, int power) {
-        BigDecimal up = other.numerator.pow(Math.abs(power));
-        BigDecimal down = other.denominator.pow(Math.abs(power));
+        // A choice between two fresh values (power > 0 ? up : down) came out null here: JDK 25.0.3, C2 with escape
+        // analysis, 64-byte object alignment, at the first negative power after many positive ones.
+        if (power < 0) {
+            return times(other.inverse(), -power);
+        }
         return new UnitFactor(
-                numerator.multiply(power > 0 ? up : down),
-                denominator.multiply(power > 0 ? down : up),
+                numerator.multiply(other.numerator.pow(power)),
+                denominator.multiply(other.denominator.pow(power)),
                 exponents.plus(other.exponents, power));
+    }
+
+    private UnitFactor inverse() {
+        return new UnitFactor(denominator, numerator, Exponents.NONE.plus(exponents, -1));
     }
 
     /** A number in this unit, in SI; rounded once. */

@@ -71,7 +71,8 @@ final class UnitTable {
         PLAIN.put(symbol, factor(up, down, m, kg, s, a, rad));
     }
 
-    private static void plain(String symbol, String up, String down, String times, int m, int kg, int s, int a, int rad) {
+    private static void plain(
+            String symbol, String up, String down, String times, int m, int kg, int s, int a, int rad) {
         BigDecimal product = new BigDecimal(up).multiply(new BigDecimal(times));
         PLAIN.put(symbol, new UnitFactor(product, new BigDecimal(down), new Exponents(m, kg, s, a, rad)));
     }
