@@ -191,6 +191,8 @@ class CaseFileTest {
         Path file = Path.of("..", "cases", name, "case.toml");
         CaseReading reading = CaseFile.read(file, List.of(), Cases::providers);
         assertThat(reading.cautions()).isEmpty();
+        CaseReading again = CaseFile.read(reading.resolvedText(), "resolved", List.of(), Cases::providers);
+        assertThat(again.specification()).isEqualTo(reading.specification());
         CaseReading rigid = CaseFile.read(file, List.of("wires.deck.rigid=true"), Cases::providers);
         assertThat(rigid.specification().wires().get("deck").rigid()).isTrue();
     }
