@@ -107,7 +107,7 @@ public final class CheckpointFolder {
     }
 
     private static int number(Path file) {
-        Matcher matcher = NAME.matcher(file.getFileName().toString());
+        Matcher matcher = NAME.matcher(String.valueOf(file.getFileName()));
         return matcher.matches() ? Integer.parseInt(matcher.group(1)) : 0;
     }
 }

@@ -46,6 +46,7 @@ public final class CheckpointReader implements AutoCloseable {
      *
      * @throws reedling.error.ReedlingException with exit code CHECKPOINT if the file cannot be used
      */
+    @SuppressWarnings("MustBeClosedChecker") // the reader owns the arena and closes it
     public static CheckpointReader open(Path file) throws IOException {
         Arena arena = Arena.ofShared();
         try (FileChannel channel = FileChannel.open(file, StandardOpenOption.READ)) {

@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import org.jspecify.annotations.Nullable;
 import reedling.material.MaterialPair;
 import reedling.material.MaterialTable;
@@ -22,7 +23,9 @@ public final class LawSet {
      * @param rolling null where the case has no rolling law
      */
     public record Bound(
-            ContactKernel normal, @Nullable ContactKernel tangential, @Nullable ContactKernel rolling) {}
+            ContactKernel normal,
+            @Nullable ContactKernel tangential,
+            @Nullable ContactKernel rolling) {}
 
     private final Map<Stage, ContactLaw> laws;
     private final Map<ContactKind, List<Bound>> bound = new EnumMap<>(ContactKind.class);
@@ -64,7 +67,7 @@ public final class LawSet {
 
     private Bound bind(MaterialPair pair, ContactKind kind, Map<Stage, Integer> start) {
         return new Bound(
-                laws.get(Stage.NORMAL).bind(pair, kind, start.get(Stage.NORMAL)),
+                Objects.requireNonNull(laws.get(Stage.NORMAL)).bind(pair, kind, startOf(Stage.NORMAL, start)),
                 optional(Stage.TANGENTIAL, pair, kind, start),
                 optional(Stage.ROLLING, pair, kind, start));
     }
@@ -72,12 +75,16 @@ public final class LawSet {
     private @Nullable ContactKernel optional(
             Stage stage, MaterialPair pair, ContactKind kind, Map<Stage, Integer> start) {
         ContactLaw law = laws.get(stage);
-        return law == null ? null : law.bind(pair, kind, start.get(stage));
+        return law == null ? null : law.bind(pair, kind, startOf(stage, start));
+    }
+
+    private static int startOf(Stage stage, Map<Stage, Integer> start) {
+        return Objects.requireNonNull(start.get(stage));
     }
 
     /** Kernels for a contact kind and the number of a material pair. */
     public Bound bound(ContactKind kind, int materialPair) {
-        return bound.get(kind).get(materialPair);
+        return Objects.requireNonNull(bound.get(kind)).get(materialPair);
     }
 
     /** For each history column of a row, whether it turns its sign when first and second are exchanged. */

@@ -11,6 +11,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.nio.file.StandardOpenOption;
+import java.util.Objects;
 
 /**
  * Writes a file that appears whole or not at all: under a temporary name in the same folder, forced to the disk, then
@@ -53,7 +54,7 @@ public final class WholeFile {
     /** Writes UTF-8 text as a whole file and makes its name safe too. */
     public static void writeText(Path target, String text) throws IOException {
         write(target, channel -> writeFully(channel, ByteBuffer.wrap(text.getBytes(StandardCharsets.UTF_8))));
-        syncFolder(target.toAbsolutePath().getParent());
+        syncFolder(Objects.requireNonNull(target.toAbsolutePath().getParent(), "a file lies in a folder"));
     }
 
     /** Writes all that remains in a buffer; a channel may take less at one call. */

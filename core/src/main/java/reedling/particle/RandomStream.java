@@ -30,6 +30,7 @@ public final class RandomStream {
     private long s3;
 
     /** The stream of a seed. */
+    @SuppressWarnings("ConstantOverflow") // the sums are meant modulo 2^64
     public RandomStream(long seed) {
         identity = seed;
         s0 = mix(seed + GOLDEN);

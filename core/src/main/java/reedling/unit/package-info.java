@@ -1,5 +1,5 @@
 // SPDX-License-Identifier: Apache-2.0
-/** Physical dimensions, and quantities written as text; kernels below the edge hold SI doubles only. */
+/** Dimensions, and quantities written as text; units exist only at the edge, everything inside is SI. */
 @NullMarked
 package reedling.unit;
 

@@ -8,7 +8,6 @@ import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.concurrent.CountDownLatch;
-import java.util.concurrent.TimeUnit;
 import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.Timeout;
@@ -93,7 +92,7 @@ class WriteQueueTest {
         });
         assertThatThrownBy(() -> {
                     for (int i = 0; i < 1000; i++) {
-                        queue.submit("next", () -> TimeUnit.MICROSECONDS.toMillis(1));
+                        queue.submit("next", Thread::onSpinWait);
                         queue.drain();
                     }
                 })

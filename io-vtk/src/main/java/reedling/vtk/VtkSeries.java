@@ -122,7 +122,7 @@ final class VtkSeries implements SnapshotWriter {
         WholeFile.removeLeftovers(folder.resolve(FILES));
         try (Stream<Path> files = Files.list(folder.resolve(FILES))) {
             for (Path file : files.toList()) {
-                if (NUMBERED.matcher(file.getFileName().toString()).matches() && !listed.contains(file)) {
+                if (NUMBERED.matcher(String.valueOf(file.getFileName())).matches() && !listed.contains(file)) {
                     Files.delete(file);
                 }
             }
