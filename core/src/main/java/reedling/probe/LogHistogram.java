@@ -6,7 +6,7 @@ import reedling.checkpoint.SectionReader;
 import reedling.checkpoint.SectionWriter;
 
 /**
- * Counts of positive numbers in bins of equal ratio, 64 a factor of ten, so that a percentile is known to 2 %. Numbers
+ * Counts of positive numbers in bins of equal ratio, 64 a factor of ten, so that a percentile is at most 4 % too high. Numbers
  * below or above all bins count in the first or last. Threads: one.
  */
 public final class LogHistogram {
