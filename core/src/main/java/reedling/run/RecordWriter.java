@@ -5,7 +5,6 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import java.util.TreeMap;
 import reedling.math.Lanes;
 import reedling.output.RunRecord;
@@ -14,16 +13,16 @@ import reedling.probe.Estimate;
 /** Fills the run record {@code run.json}. Threads: one. */
 final class RecordWriter {
 
+    private final RunResult result;
     private final Simulation simulation;
     private final RunProbes probes;
-    private final RunPlan plan;
     private final RunClock clock;
 
-    RecordWriter(Simulation simulation, RunProbes probes, RunPlan plan, RunClock clock) {
-        this.simulation = simulation;
-        this.probes = probes;
-        this.plan = plan;
+    private RecordWriter(RunResult result, RunClock clock) {
+        this.result = result;
         this.clock = clock;
+        simulation = result.simulation();
+        probes = result.probes();
     }
 
     /**
@@ -31,17 +30,21 @@ final class RecordWriter {
      *
      * @param status running, finished, stopped, or what failed
      */
-    RunRecord record(String status, Optional<ScreenFigures> figures, Trust trust) {
-        RunIdentity identity = plan.identity();
+    static RunRecord record(RunResult result, RunClock clock, String status) {
+        return new RecordWriter(result, clock).record(status);
+    }
+
+    private RunRecord record(String status) {
+        RunIdentity identity = result.plan().identity();
         RunRecord record = new RunRecord()
                 .set("title", identity.title())
                 .set("status", status)
                 .set("time_s", simulation.time())
-                .set("end_time_s", plan.endTime())
+                .set("end_time_s", result.plan().endTime())
                 .set("steps", simulation.stepCount())
                 .set("state_digest", StateDigest.of(simulation))
                 .set("ledger_residual", simulation.ledger().relativeResidual())
-                .set("ledger", ledger(trust))
+                .set("ledger", ledger(result.trust()))
                 .set("wall_s", clock.elapsed())
                 .set("grain_steps_per_s", clock.grainStepsPerSecond(simulation))
                 .set("phases_s", phases())
@@ -52,9 +55,9 @@ final class RecordWriter {
                 .set("seed", identity.seed())
                 .set("machine", machine())
                 .set("lots", lots());
-        figures.ifPresent(one -> record.set("screen", screen(one)));
+        result.figures().ifPresent(one -> record.set("screen", screen(one)));
         List<String> cautions = new ArrayList<>(identity.cautions());
-        cautions.addAll(trust.overlaps());
+        cautions.addAll(result.trust().overlaps());
         return record.set("cautions", cautions);
     }
 

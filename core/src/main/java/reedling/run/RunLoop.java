@@ -4,7 +4,6 @@ package reedling.run;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.util.Locale;
-import java.util.Optional;
 import reedling.checkpoint.CheckpointHeader;
 import reedling.checkpoint.CheckpointReader;
 import reedling.checkpoint.CheckpointWriter;
@@ -244,23 +243,15 @@ public final class RunLoop implements AutoCloseable {
         }
     }
 
-    private Optional<ScreenFigures> figures() {
-        return plan.screen().map(screen -> ScreenFigures.of(probes, screen, simulation.time()));
-    }
-
     private void submitRecord(String status) {
-        Optional<ScreenFigures> figures = figures();
-        Trust trust = Trust.of(simulation, probes, plan, figures);
-        RunRecord record = new RecordWriter(simulation, probes, plan, clock).record(status, figures, trust);
+        RunRecord record = RecordWriter.record(RunResult.of(simulation, probes, plan), clock, status);
         output.queue().submit("run.json", record.saving(output.folder().resolve("run.json")));
     }
 
     private String summaryText(String word) {
-        Optional<ScreenFigures> figures = figures();
-        Trust trust = Trust.of(simulation, probes, plan, figures);
         String heading = word + " at " + time() + " of simulated time, "
                 + simulation.model().grains().count() + " grains in the run";
-        return Summary.of(heading, simulation, probes, plan, figures, trust, timing());
+        return Summary.of(RunResult.of(simulation, probes, plan), heading, timing());
     }
 
     private String timing() {
