@@ -77,6 +77,7 @@ final class RainDeck {
 
     private final boolean shaken;
     private double perSecond = 1500;
+    private double longest = 1e-3;
     private final GrainStore grains = new GrainStore();
 
     private RainDeck(boolean shaken) {
@@ -93,6 +94,11 @@ final class RainDeck {
 
     RainDeck feeding(double grainsPerSecond) {
         perSecond = grainsPerSecond;
+        return this;
+    }
+
+    RainDeck longestStep(double seconds) {
+        longest = seconds;
         return this;
     }
 
@@ -151,7 +157,7 @@ final class RainDeck {
                 new LawSet(laws, table),
                 perSecond > 0 ? List.of(new Model.FeedLine(rain(lots, table), new int[] {0, 1})) : List.of(),
                 exits(),
-                new StepSettings(20, 1e-3, shaken ? 0.05 : Double.POSITIVE_INFINITY, 1e-3, 20));
+                new StepSettings(20, longest, shaken ? 0.05 : Double.POSITIVE_INFINITY, 1e-3, 20));
     }
 
     private static Wall side(String name, double y, double normal) {
