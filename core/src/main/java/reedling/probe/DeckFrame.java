@@ -51,7 +51,8 @@ public final class DeckFrame {
         for (int k = 1; k < bodies.length; k++) {
             double pitch = Math.abs(acrossOf(k) - acrossOf(k - 1));
             pitches += pitch;
-            sumGap += pitch - all.get(bodies[k]).section().contactRadius()
+            sumGap += pitch
+                    - all.get(bodies[k]).section().contactRadius()
                     - all.get(bodies[k - 1]).section().contactRadius();
         }
         meanGap = sumGap / (bodies.length - 1);
@@ -91,8 +92,10 @@ public final class DeckFrame {
             }
             origin[axis] = ends / (2.0 * bodies.length);
             along[axis] = direction;
-            across[axis] = x[3 * startNode[last] + axis] + x[3 * endNode[last] + axis]
-                    - x[3 * startNode[0] + axis] - x[3 * endNode[0] + axis];
+            across[axis] = x[3 * startNode[last] + axis]
+                    + x[3 * endNode[last] + axis]
+                    - x[3 * startNode[0] + axis]
+                    - x[3 * endNode[0] + axis];
         }
         scale(along);
         double common = dot(along, across);

@@ -92,7 +92,8 @@ public record Estimate(double value, double halfWidth, int batches, double trend
             double miss = Double.isNaN(batches[k]) ? 0 : batches[k] - mean - slope * (k - middle);
             left += miss * miss;
         }
-        return left == 0 ? (slope == 0 ? 0 : Math.copySign(Double.POSITIVE_INFINITY, slope))
+        return left == 0
+                ? (slope == 0 ? 0 : Math.copySign(Double.POSITIVE_INFINITY, slope))
                 : slope / Math.sqrt(left / (n - 2) / along);
     }
 }

@@ -53,8 +53,7 @@ public final class FibreRange {
 
     /** Some fibre of the element went through at least so much, Pa; not a number without a sample. */
     public double lower(int element) {
-        return finite(Math.max(
-                highestMax[element] - lowestMax[element], highestMin[element] - lowestMin[element]));
+        return finite(Math.max(highestMax[element] - lowestMax[element], highestMin[element] - lowestMin[element]));
     }
 
     private static double finite(double value) {

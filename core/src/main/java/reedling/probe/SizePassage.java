@@ -34,8 +34,10 @@ public final class SizePassage implements GrainWatch, Persistent {
         this.window = window;
         this.lots = lots.size();
         this.exits = exits;
-        smallest = lots.stream().mapToDouble(lot -> lot.sizes().smallest()).min().orElse(0);
-        double largest = lots.stream().mapToDouble(lot -> lot.sizes().largest()).max().orElse(1e-3);
+        smallest =
+                lots.stream().mapToDouble(lot -> lot.sizes().smallest()).min().orElse(0);
+        double largest =
+                lots.stream().mapToDouble(lot -> lot.sizes().largest()).max().orElse(1e-3);
         width = Math.max(largest - smallest, 1e-6 * largest) / CLASSES;
         counts = new long[window.batches() * exits * this.lots * CLASSES];
         masses = new double[window.batches() * exits * this.lots];

@@ -77,8 +77,7 @@ public final class WireLoads implements Persistent {
         Body body = structure.bodies().get(b);
         for (int k = 0; k < body.elementCount(); k++) {
             int e = body.firstElement() + k;
-            double stress = Math.max(
-                    Math.abs(results.fibreStress()[e]), Math.abs(results.smallestFibreStress()[e]));
+            double stress = Math.max(Math.abs(results.fibreStress()[e]), Math.abs(results.smallestFibreStress()[e]));
             peaks.element(b, k, results.axialForce()[e], results.bendingMoment()[e], stress);
         }
         peaks.sag(b, WireShape.largestSag(structure.nodes(), body));

@@ -91,8 +91,14 @@ final class FrameCopy {
                 new NamedArray.Floats("axial force [N]", 1, floats(results.axialForce())),
                 new NamedArray.Floats("bending moment [N m]", 1, floats(results.bendingMoment())),
                 new NamedArray.Floats("max fibre stress [Pa]", 1, floats(results.fibreStress())),
-                new NamedArray.Floats("radius [m]", 1, floats(radius.stream().mapToDouble(Float::doubleValue).toArray())),
-                new NamedArray.Ints("body", 1, bodyNumber.stream().mapToInt(Integer::intValue).toArray()));
+                new NamedArray.Floats(
+                        "radius [m]",
+                        1,
+                        floats(radius.stream().mapToDouble(Float::doubleValue).toArray())),
+                new NamedArray.Ints(
+                        "body",
+                        1,
+                        bodyNumber.stream().mapToInt(Integer::intValue).toArray()));
         NodeStore nodes = structure.nodes();
         List<NamedArray> points = List.of(
                 new NamedArray.Floats("displacement [m]", 3, displacement(structure)),

@@ -14,7 +14,11 @@ final class PartitionTable {
 
     static WriteQueue.Job saving(SizePassage sizes, ScreenPlan screen, RunFolder folder) {
         Partition partition = Partition.of(
-                sizes, screen.passedOutlet(), screen.overOutlet(), 0, sizes.window().batches());
+                sizes,
+                screen.passedOutlet(),
+                screen.overOutlet(),
+                0,
+                sizes.window().batches());
         StringBuilder text = new StringBuilder("diameter [m],grains passed,grains over,part over\n");
         for (int k = 0; k < partition.diameter().length; k++) {
             if (partition.passed()[k] + partition.over()[k] > 0) {

@@ -106,11 +106,15 @@ final class RecordWriter {
             map.put("name", simulation.model().lots().get(lot).name());
             map.put("fed", amount(passage.fedCount(lot), passage.fedMass(lot)));
             for (int exit = 0; exit < outlets.size(); exit++) {
-                map.put("out_" + outlets.get(exit).name(), amount(passage.outCount(exit, lot), passage.outMass(exit, lot)));
+                map.put(
+                        "out_" + outlets.get(exit).name(),
+                        amount(passage.outCount(exit, lot), passage.outMass(exit, lot)));
             }
             map.put("spilled", amount(passage.outCount(outlets.size(), lot), passage.outMass(outlets.size(), lot)));
-            probes.deck().ifPresent(deck ->
-                    map.put("pegged", amount(deck.pegging().count(number), deck.pegging().mass(number))));
+            probes.deck()
+                    .ifPresent(deck -> map.put(
+                            "pegged",
+                            amount(deck.pegging().count(number), deck.pegging().mass(number))));
             all.add(map);
         }
         return all;
@@ -133,7 +137,9 @@ final class RecordWriter {
         map.put("open_area_pegged_percent", estimate(figures.pegged()));
         map.put("worst_stress_range_at_most_Pa", estimate(figures.stressRange()));
         map.put("worst_stress_range_at_least_Pa", figures.stressRangeLower());
-        map.put("worst_wire", simulation.model().structure().bodies().get(figures.worstBody()).name());
+        map.put(
+                "worst_wire",
+                simulation.model().structure().bodies().get(figures.worstBody()).name());
         map.put("worst_element", figures.worstElement());
         return map;
     }

@@ -59,12 +59,7 @@ public final class RunLoop implements AutoCloseable {
      * @param resumeTime time of the checkpoint a run is resumed from, s; not a number for a fresh run
      */
     public RunLoop(
-            Simulation simulation,
-            RunPlan plan,
-            RunOutput output,
-            StateOwners owners,
-            StopFlag stop,
-            double resumeTime)
+            Simulation simulation, RunPlan plan, RunOutput output, StateOwners owners, StopFlag stop, double resumeTime)
             throws IOException {
         this.simulation = simulation;
         this.plan = plan;
@@ -220,13 +215,13 @@ public final class RunLoop implements AutoCloseable {
         tables.submit(output.queue());
         String word = outcome == Outcome.FINISHED ? "finished" : "stopped";
         submitRecord(word);
-        plan.screen().ifPresent(screen -> output.queue()
-                .submit("partition.csv", PartitionTable.saving(probes.sizes(), screen, output.folder())));
+        plan.screen()
+                .ifPresent(screen -> output.queue()
+                        .submit("partition.csv", PartitionTable.saving(probes.sizes(), screen, output.folder())));
         summary = summaryText(word);
         String text = summary;
         output.queue()
-                .submit("summary.txt", () -> WholeFile.writeText(
-                        output.folder().resolve("summary.txt"), text));
+                .submit("summary.txt", () -> WholeFile.writeText(output.folder().resolve("summary.txt"), text));
         output.queue().drain();
         log(word + " at " + time());
     }

@@ -91,7 +91,8 @@ public final class RunProbes {
             overlaps.sample(simulation.interactions(), simulation.model().grains());
         }
         deck.ifPresent(one -> {
-            one.pegging.sample(time, simulation.model().grains(), simulation.interactions().wires());
+            one.pegging.sample(
+                    time, simulation.model().grains(), simulation.interactions().wires());
             one.openAreaLost.add(time, one.pegging.openAreaLost());
             if (measured) {
                 one.opening.sample();

@@ -12,8 +12,7 @@ import java.util.Optional;
  * @param figures of the screen; empty without one
  * @param trust how far to trust them
  */
-record RunResult(
-        Simulation simulation, RunProbes probes, RunPlan plan, Optional<ScreenFigures> figures, Trust trust) {
+record RunResult(Simulation simulation, RunProbes probes, RunPlan plan, Optional<ScreenFigures> figures, Trust trust) {
 
     static RunResult of(Simulation simulation, RunProbes probes, RunPlan plan) {
         Optional<ScreenFigures> figures =

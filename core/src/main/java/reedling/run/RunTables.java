@@ -147,7 +147,9 @@ final class RunTables implements AutoCloseable {
                 row.add(passage.outMass(exit, lot));
             }
             row.add(probes.deck().map(deck -> deck.pegging().mass(number)).orElse(Double.NaN));
-            row.add(probes.deck().map(deck -> (double) deck.pegging().count(number)).orElse(Double.NaN));
+            row.add(probes.deck()
+                    .map(deck -> (double) deck.pegging().count(number))
+                    .orElse(Double.NaN));
         }
         row.add(probes.deck().map(deck -> deck.pegging().openAreaLost()).orElse(Double.NaN));
         return row.stream().mapToDouble(Double::doubleValue).toArray();

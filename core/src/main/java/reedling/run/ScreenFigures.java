@@ -41,10 +41,12 @@ record ScreenFigures(
         RunProbes.Deck deck = probes.deck().orElseThrow();
         int worst = worstBody(plan, loads);
         double perWidth = 1 / (deck.frame().width() * probes.window().batchLength());
-        double[] fed = each(batches, batch -> IntStream.of(plan.undersizeLot(), plan.productLot())
-                .distinct()
-                .mapToDouble(lot -> sizes.fedMass(batch, lot) * perWidth)
-                .sum());
+        double[] fed = each(
+                batches,
+                batch -> IntStream.of(plan.undersizeLot(), plan.productLot())
+                        .distinct()
+                        .mapToDouble(lot -> sizes.fedMass(batch, lot) * perWidth)
+                        .sum());
         double[] cuts = each(batches, batch -> cut(sizes, plan, batch, batch + 1));
         double[] ranges = java.util.Arrays.copyOf(loads.batchRanges(worst), batches);
         return new ScreenFigures(
@@ -73,7 +75,8 @@ record ScreenFigures(
     }
 
     private static double cut(SizePassage sizes, ScreenPlan plan, int from, int to) {
-        return Partition.of(sizes, plan.passedOutlet(), plan.overOutlet(), from, to).cutSize();
+        return Partition.of(sizes, plan.passedOutlet(), plan.overOutlet(), from, to)
+                .cutSize();
     }
 
     /** Part of a lot that passed: of the whole window, with the scatter of its batches. */

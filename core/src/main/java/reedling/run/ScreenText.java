@@ -27,14 +27,21 @@ record ScreenText(RunResult result, ScreenFigures figures) {
         text.entry("", "feed " + figure(figures.throughput(), 3.6, "t/(h m)"));
         text.entry("2 good product lost", percent(figures.loss()) + limit(limits.loss(), 100, "at most"));
         text.entry("", "d50 " + figure(figures.cutSize(), 1e3, "mm"));
-        text.entry("3 open area pegged", figure(figures.pegged(), 1, "%") + trendOf(figures.pegged())
-                + limit(limits.pegged(), 1, "at most"));
+        text.entry(
+                "3 open area pegged",
+                figure(figures.pegged(), 1, "%") + trendOf(figures.pegged()) + limit(limits.pegged(), 1, "at most"));
         stress(text, limits.stressRange());
         Estimate recovery = figures.recovery();
-        text.entry("5 trust in figure 1", recovery.batches() > 1
-                ? format("+- %.2g %% of the undersize; largest contributor:", 100 * recovery.halfWidth())
-                : "no interval; largest contributor:");
-        text.entry("", result.trust().contributors().isEmpty() ? UNKNOWN : result.trust().contributors().getFirst());
+        text.entry(
+                "5 trust in figure 1",
+                recovery.batches() > 1
+                        ? format("+- %.2g %% of the undersize; largest contributor:", 100 * recovery.halfWidth())
+                        : "no interval; largest contributor:");
+        text.entry(
+                "",
+                result.trust().contributors().isEmpty()
+                        ? UNKNOWN
+                        : result.trust().contributors().getFirst());
     }
 
     private void stress(PlainText text, OptionalDouble allowable) {
@@ -43,16 +50,23 @@ record ScreenText(RunResult result, ScreenFigures figures) {
             text.entry("4 worst stress range", UNKNOWN);
             return;
         }
-        text.entry("4 worst stress range", "at most " + figure(range, 1e-6, "MPa")
-                + format(", at least %.4g MPa", 1e-6 * figures.stressRangeLower()));
-        text.entry("", allowable.isPresent()
-                ? format("%.2f of the allowable %.4g MPa", range.value() / allowable.getAsDouble(),
-                        1e-6 * allowable.getAsDouble())
-                : "no allowable range was given");
+        text.entry(
+                "4 worst stress range",
+                "at most " + figure(range, 1e-6, "MPa")
+                        + format(", at least %.4g MPa", 1e-6 * figures.stressRangeLower()));
+        text.entry(
+                "",
+                allowable.isPresent()
+                        ? format(
+                                "%.2f of the allowable %.4g MPa",
+                                range.value() / allowable.getAsDouble(), 1e-6 * allowable.getAsDouble())
+                        : "no allowable range was given");
         var body = result.simulation().model().structure().bodies().get(figures.worstBody());
-        text.entry("", format(
-                "%s, element %d of %d from its start",
-                body.name(), figures.worstElement() + 1, body.elementCount()));
+        text.entry(
+                "",
+                format(
+                        "%s, element %d of %d from its start",
+                        body.name(), figures.worstElement() + 1, body.elementCount()));
     }
 
     private static String percent(Estimate part) {

@@ -35,9 +35,8 @@ public final class StateDigest {
     public static String of(Simulation simulation) {
         try {
             MessageDigest digest = MessageDigest.getInstance("SHA-256");
-            try (DataOutputStream out =
-                    new DataOutputStream(new BufferedOutputStream(
-                            new DigestOutputStream(OutputStream.nullOutputStream(), digest), 1 << 16))) {
+            try (DataOutputStream out = new DataOutputStream(new BufferedOutputStream(
+                    new DigestOutputStream(OutputStream.nullOutputStream(), digest), 1 << 16))) {
                 new StateDigest(simulation).write(out);
             }
             return HexFormat.of().formatHex(digest.digest());

@@ -11,8 +11,7 @@ import reedling.checkpoint.SectionWriter;
 public final class StepTally implements Persistent {
 
     /** What can bound a step, by number, as {@link reedling.time.StepLimits#binding} names it. */
-    public static final List<String> LIMITS =
-            List.of("contact", "approach", "stability", "margin", "drive", "maximum");
+    public static final List<String> LIMITS = List.of("contact", "approach", "stability", "margin", "drive", "maximum");
 
     private final long[] bound = new long[LIMITS.size()];
     private long steps;

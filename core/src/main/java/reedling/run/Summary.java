@@ -9,7 +9,6 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.IntStream;
-import reedling.probe.Estimate;
 import reedling.probe.LogHistogram;
 import reedling.probe.WireLoads;
 import reedling.probe.WirePeaks;
@@ -72,7 +71,9 @@ final class Summary {
                 .sorted(Comparator.comparingDouble((Integer b) -> -orZero(loads.rangeUpper(b))))
                 .toList();
         for (int b : order.subList(0, Math.min(MOST_WIRES, bodies))) {
-            text.line(format("%-18.18s", simulation.model().structure().bodies().get(b).name())
+            text.line(format(
+                            "%-18.18s",
+                            simulation.model().structure().bodies().get(b).name())
                     + cell(12, 1e-6 * loads.rangeUpper(b))
                     + cell(9, 1e-6 * peaks.fibreStress(b))
                     + cell(9, peaks.axialForce(b))
@@ -100,7 +101,8 @@ final class Summary {
         for (int wall = 0; wall < probes.wallLoads().walls(); wall++) {
             text.line(format(
                     "%-30.30s largest force %.4g N",
-                    simulation.model().walls().get(wall).name(), probes.wallLoads().largestEver(wall)));
+                    simulation.model().walls().get(wall).name(),
+                    probes.wallLoads().largestEver(wall)));
         }
     }
 
@@ -116,12 +118,18 @@ final class Summary {
         if (steps.steps() > 0) {
             text.line(format(
                     "Steps: %d of %.3g us on average (%.3g to %.3g us), %.3g fine steps each.",
-                    steps.steps(), 1e6 * steps.mean(), 1e6 * steps.shortest(), 1e6 * steps.longest(),
+                    steps.steps(),
+                    1e6 * steps.mean(),
+                    1e6 * steps.shortest(),
+                    1e6 * steps.longest(),
                     steps.meanFineSteps()));
             text.line("Bounded by " + bounds(steps) + ".");
         }
-        figures.ifPresent(f -> text.line("Drift of recovery: " + (f.recovery().tooShort() ? "run too short to tell"
-                : f.recovery().drifts() ? "yes, the start is not over" : "none seen") + "."));
+        figures.ifPresent(f -> text.line("Drift of recovery: "
+                + (f.recovery().tooShort()
+                        ? "run too short to tell"
+                        : f.recovery().drifts() ? "yes, the start is not over" : "none seen")
+                + "."));
         plan.identity().cautions().forEach(text::line);
     }
 
@@ -166,8 +174,10 @@ final class Summary {
                 text.line("  " + name + " " + amount(passage.outCount(exit, lot), passage.outMass(exit, lot)));
             }
             int number = lot;
-            probes.deck().ifPresent(deck -> text.line("  pegged "
-                    + amount(deck.pegging().count(number), deck.pegging().mass(number))));
+            probes.deck()
+                    .ifPresent(deck -> text.line("  pegged "
+                            + amount(
+                                    deck.pegging().count(number), deck.pegging().mass(number))));
         }
     }
 

@@ -39,7 +39,8 @@ record Trust(double residual, double expected, String verdict, List<String> over
                 expected,
                 verdict(residual / expected),
                 List.copyOf(overlaps),
-                figures.map(one -> contributors(one, residual / expected, !overlaps.isEmpty())).orElse(List.of()));
+                figures.map(one -> contributors(one, residual / expected, !overlaps.isEmpty()))
+                        .orElse(List.of()));
     }
 
     private static String verdict(double ratio) {
@@ -55,24 +56,29 @@ record Trust(double residual, double expected, String verdict, List<String> over
         double depth = probes.overlaps().wireDepth().percentile(0.99);
         for (int lot : new int[] {screen.undersizeLot(), screen.productLot()}) {
             var one = simulation.model().lots().get(lot);
-            double distance = Math.abs(Math.cbrt(one.sizes().meanCube()) - deck.frame().gap());
+            double distance =
+                    Math.abs(Math.cbrt(one.sizes().meanCube()) - deck.frame().gap());
             if (depth > SOFT * distance) {
                 warnings.add(String.format(
                         Locale.ROOT,
                         "Softening decides for lot %s: overlaps on wires reach %.3g mm, over 10 %% of the %.3g mm "
                                 + "between grain and gap. Repeat with four times the modulus.",
-                        one.name(), 1e3 * depth, 1e3 * distance));
+                        one.name(),
+                        1e3 * depth,
+                        1e3 * distance));
             }
         }
         double opening = deck.opening().changes().percentile(0.99);
         boolean bends = IntStream.of(screen.bodies())
-                .anyMatch(body -> !simulation.model().structure().bodies().get(body).rigid());
+                .anyMatch(body ->
+                        !simulation.model().structure().bodies().get(body).rigid());
         if (bends && depth > SOFT * opening) {
             warnings.add(String.format(
                     Locale.ROOT,
                     "Softening: overlaps on wires reach %.3g mm, over 10 %% of the %.3g mm by which gaps open. "
                             + "Repeat with four times the modulus.",
-                    1e3 * depth, 1e3 * opening));
+                    1e3 * depth,
+                    1e3 * opening));
         }
         return warnings;
     }
@@ -93,8 +99,7 @@ record Trust(double residual, double expected, String verdict, List<String> over
             all.add("drift (recovery still rises or falls from batch to batch)");
         }
         if (recovery.batches() > 1) {
-            all.add(String.format(
-                    Locale.ROOT, "scatter from batch to batch (+- %.2g %%)", 100 * recovery.halfWidth()));
+            all.add(String.format(Locale.ROOT, "scatter from batch to batch (+- %.2g %%)", 100 * recovery.halfWidth()));
         }
         return List.copyOf(all);
     }

@@ -30,7 +30,8 @@ class PartitionTest {
 
     @Test
     void thereIsNoCutSizeWhereEverythingPassesOrNothingCame() {
-        assertThat(new Partition(SIZES, new long[] {5, 5, 5, 5}, new long[4]).cutSize()).isNaN();
+        assertThat(new Partition(SIZES, new long[] {5, 5, 5, 5}, new long[4]).cutSize())
+                .isNaN();
         assertThat(new Partition(SIZES, new long[4], new long[4]).cutSize()).isNaN();
     }
 

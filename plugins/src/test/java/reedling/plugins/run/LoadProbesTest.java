@@ -51,7 +51,8 @@ class LoadProbesTest {
         double k = Math.sqrt(tension / stiffness);
         double length = RainDeck.SPAN;
         double weight = 1200 * Math.PI * 1e-6 * GRAVITY / (1 + tension / (6e7 * Math.PI * 1e-6)); // stretched: lighter
-        double sag = weight * length * length / (8 * tension) - weight * length / (2 * tension * k) * Math.tanh(k * length / 4);
+        double sag = weight * length * length / (8 * tension)
+                - weight * length / (2 * tension * k) * Math.tanh(k * length / 4);
         for (int wire = 0; wire < RainDeck.WIRES; wire++) {
             assertThat(loads.window().sag(wire)).isCloseTo(sag, within(0.05 * sag));
             assertThat(loads.window().axialForce(wire)).isCloseTo(tension, within(1e-3 * tension));
@@ -71,7 +72,12 @@ class LoadProbesTest {
         double radius = 4e-3;
         double height = Math.sqrt(Math.pow(radius + 1e-3, 2) - Math.pow(0.5 * RainDeck.PITCH, 2));
         Simulation simulation = after(
-                0.25, RainDeck.still().feeding(0).longestStep(2e-5).grain(0.03, 0.5 * RainDeck.PITCH, height + 1e-5, radius).model());
+                0.25,
+                RainDeck.still()
+                        .feeding(0)
+                        .longestStep(2e-5)
+                        .grain(0.03, 0.5 * RainDeck.PITCH, height + 1e-5, radius)
+                        .model());
         double weight = simulation.model().grains().mass(0) * GRAVITY;
         double[] forces = new double[3 * RainDeck.WIRES];
         assertThat(simulation.interactions().wires().addForces(forces)).isTrue();
@@ -86,7 +92,8 @@ class LoadProbesTest {
     @Test
     void overlapsOfGrainsPlacedByHandAreFound() {
         Simulation simulation = new Simulation(
-                RainDeck.still().feeding(0)
+                RainDeck.still()
+                        .feeding(0)
                         .grain(0.02, 0, 0.02, 3e-3)
                         .grain(0.02, 4.94e-3, 0.02, 2e-3) // overlap 0.06 mm: 3 % of the smaller radius
                         .grain(0.04, RainDeck.PITCH, 3.97e-3, 3e-3) // on a wire: 0.03 mm, 1 % of its radius

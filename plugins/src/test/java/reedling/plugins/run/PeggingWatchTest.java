@@ -38,7 +38,8 @@ class PeggingWatchTest {
     }
 
     private static PeggingWatch watch(Model model) {
-        DeckFrame frame = new DeckFrame(model.structure(), IntStream.range(0, RainDeck.WIRES).toArray());
+        DeckFrame frame = new DeckFrame(
+                model.structure(), IntStream.range(0, RainDeck.WIRES).toArray());
         return new PeggingWatch(frame, new PegRule(0.05, 0.5e-3), RainDeck.WIRES, 2);
     }
 
@@ -49,7 +50,8 @@ class PeggingWatchTest {
     }
 
     private static void sample(PeggingWatch watch, double time, Simulation simulation) {
-        watch.sample(time, simulation.model().grains(), simulation.interactions().wires());
+        watch.sample(
+                time, simulation.model().grains(), simulation.interactions().wires());
     }
 
     /** Moves grains and deck together, m. */
@@ -122,8 +124,10 @@ class PeggingWatchTest {
             sample(watch, 0.01 * k, simulation);
         }
         int[] touches = new int[2];
-        simulation.interactions().wires().visitOverlaps(
-                simulation.model().grains(), (grain, body, overlap) -> touches[grain]++);
+        simulation
+                .interactions()
+                .wires()
+                .visitOverlaps(simulation.model().grains(), (grain, body, overlap) -> touches[grain]++);
         assertThat(touches).containsExactlyInAnyOrder(1, 2);
         assertThat(watch.count(1)).isZero();
     }
@@ -146,7 +150,8 @@ class PeggingWatchTest {
 
     @Test
     void theFrameKnowsTheDeck() {
-        DeckFrame frame = new DeckFrame(deck.structure(), IntStream.range(0, RainDeck.WIRES).toArray());
+        DeckFrame frame = new DeckFrame(
+                deck.structure(), IntStream.range(0, RainDeck.WIRES).toArray());
         assertThat(frame.gap()).isCloseTo(5.4e-3, within(1e-15));
         assertThat(frame.length()).isCloseTo(RainDeck.SPAN, within(1e-15));
         assertThat(frame.width()).isCloseTo(RainDeck.WIRES * RainDeck.PITCH, within(1e-15));

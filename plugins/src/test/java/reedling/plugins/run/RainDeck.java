@@ -119,12 +119,24 @@ final class RainDeck {
             double y = PITCH * k;
             double drop = shaken ? -0.015 : 0;
             WireEnds ends = new WireEnds(
-                    new Position(0, y, 0), new Position(SPAN, y, drop), EndCondition.CLAMPED, EndCondition.CLAMPED, motion);
+                    new Position(0, y, 0),
+                    new Position(SPAN, y, drop),
+                    EndCondition.CLAMPED,
+                    EndCondition.CLAMPED,
+                    motion);
             WireMesh.add(
                     builder,
                     new WireSpecification(
-                            "wire " + (k + 1), POLYURETHANE, new CrossSection.SolidCircle(0.002), ends, 16, TENSION,
-                            new WireDamping(0, 0.05, 0.05), "beam", Map.of(), false),
+                            "wire " + (k + 1),
+                            POLYURETHANE,
+                            new CrossSection.SolidCircle(0.002),
+                            ends,
+                            16,
+                            TENSION,
+                            new WireDamping(0, 0.05, 0.05),
+                            "beam",
+                            Map.of(),
+                            false),
                     new BeamElement());
         }
         return builder.build();
@@ -138,7 +150,8 @@ final class RainDeck {
                         new MaterialPair(GRAIN, POLYURETHANE, 0.5, 0.25, 0.03),
                         new MaterialPair(POLYURETHANE, POLYURETHANE, 0.5, 0.25, 0.03)));
         List<Lot> lots = List.of(
-                new Lot("vetch", 0, new UniformSize(3.6e-3, 5.2e-3)), new Lot("peas", 0, new UniformSize(5.0e-3, 7.0e-3)));
+                new Lot("vetch", 0, new UniformSize(3.6e-3, 5.2e-3)),
+                new Lot("peas", 0, new UniformSize(5.0e-3, 7.0e-3)));
         Map<Stage, ContactLaw> laws = new EnumMap<>(Stage.class);
         laws.put(Stage.NORMAL, new HertzProvider().create(new ParameterValues(Map.of())));
         laws.put(Stage.TANGENTIAL, new MindlinProvider().create(new ParameterValues(Map.of())));
@@ -162,17 +175,21 @@ final class RainDeck {
 
     private static Wall side(String name, double y, double normal) {
         return new Wall(
-                name, 1, new HalfSpace(), Placement.facing(new Vector3d(0, y, 0), new Vector3d(0, normal, 0)), new Still());
+                name,
+                1,
+                new HalfSpace(),
+                Placement.facing(new Vector3d(0, y, 0), new Vector3d(0, normal, 0)),
+                new Still());
     }
 
     private RainFeed rain(List<Lot> lots, MaterialTable table) {
         LotMix mix = new LotMix(List.of(new LotShare(lots.get(0), 0.5), new LotShare(lots.get(1), 0.5)), table);
-        BoxRegion region = new BoxRegion(
-                new Vector3d(0.005, 0, 0.015), new Vector3d(0.03, PITCH * (WIRES - 1), 0.03));
+        BoxRegion region = new BoxRegion(new Vector3d(0.005, 0, 0.015), new Vector3d(0.03, PITCH * (WIRES - 1), 0.03));
         double never = Double.POSITIVE_INFINITY;
         FeedRate rate = new FeedRate(FeedRate.Measure.COUNT, perSecond, never, 0, never);
         return new RainFeed(
-                new Rain("rain", mix, region, rate, new Launch(new Vector3d(0.3, 0, -0.8), 0.05, 20)), new RandomStream(7));
+                new Rain("rain", mix, region, rate, new Launch(new Vector3d(0.3, 0, -0.8), 0.05, 20)),
+                new RandomStream(7));
     }
 
     private static Exits exits() {
@@ -185,7 +202,13 @@ final class RainDeck {
 
     static RunPlan plan(double endTime, double measureFrom) {
         ScreenPlan screen = new ScreenPlan(
-                IntStream.range(0, WIRES).toArray(), 0, 1, 0, 1, new PegRule(0.03, 0.5e-3), measureFrom,
+                IntStream.range(0, WIRES).toArray(),
+                0,
+                1,
+                0,
+                1,
+                new PegRule(0.03, 0.5e-3),
+                measureFrom,
                 new ScreenPlan.Limits(
                         OptionalDouble.of(0.9), OptionalDouble.of(0.05), OptionalDouble.of(5), OptionalDouble.of(2e6)));
         return new RunPlan(endTime, new RunPlan.Intervals(0.02, 0.01, 0.05, 1e9), Optional.of(screen), identity());

@@ -77,16 +77,25 @@ class RunLoopResumeTest {
         double[] measured = runTo(0.16);
         Path rows = folder.resolve("run/ledger.csv");
         List<String> whole = Files.readAllLines(rows);
-        Files.writeString(rows, String.join("\n", whole) + "\n0.17,1,2,3,4,5,6,7,8,9\n0.18,1,2", java.nio.charset.StandardCharsets.UTF_8);
+        Files.writeString(
+                rows,
+                String.join("\n", whole) + "\n0.17,1,2,3,4,5,6,7,8,9\n0.18,1,2",
+                java.nio.charset.StandardCharsets.UTF_8);
         try (WorkerTeam team = new WorkerTeam(1);
-                CheckpointReader reader = CheckpointFolder.latest(folder.resolve("run")).reader();
+                CheckpointReader reader =
+                        CheckpointFolder.latest(folder.resolve("run")).reader();
                 RunFolder run = RunFolder.resume(folder.resolve("run"));
                 WriteQueue queue = new WriteQueue(2)) {
             Simulation simulation = new Simulation(RainDeck.shaken().model(), team);
             RunOutput output = new RunOutput(
                     run, queue, List.of(), CheckpointFolder.resume(run.path(), reader.file()), Progress.SILENT);
             try (RunLoop loop = new RunLoop(
-                    simulation, PLAN, output, NO_ENGINE, new StopFlag(), reader.header().time())) {
+                    simulation,
+                    PLAN,
+                    output,
+                    NO_ENGINE,
+                    new StopFlag(),
+                    reader.header().time())) {
                 assertThat(figures(loop.probes())).isNotEqualTo(measured);
                 loop.restore(reader);
                 double[] restored = figures(loop.probes());

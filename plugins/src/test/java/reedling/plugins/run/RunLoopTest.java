@@ -55,7 +55,10 @@ class RunLoopTest {
             simulation.begin();
             before.run();
             RunOutput output = new RunOutput(
-                    run, queue, List.of(frames::add), CheckpointFolder.create(run.path()),
+                    run,
+                    queue,
+                    List.of(frames::add),
+                    CheckpointFolder.create(run.path()),
                     new ProgressText(out, false, 80, System::nanoTime));
             try (RunLoop loop = new RunLoop(simulation, plan, output, List::of, stop, Double.NaN)) {
                 RunLoop.Outcome outcome = loop.run();
@@ -95,7 +98,8 @@ class RunLoopTest {
         double[] second = row(lines("ledger.csv").get(2));
         assertThat(second[0]).isBetween(0.01, 0.0111);
         assertThat(lines("run.json")).anyMatch(line -> line.contains("\"state_digest\": \"" + ended.digest + "\""));
-        assertThat(Files.list(folder.resolve("run")).map(file -> file.getFileName().toString()))
+        assertThat(Files.list(folder.resolve("run"))
+                        .map(file -> file.getFileName().toString()))
                 .contains("checkpoint_000003.rck", "checkpoint_000002.rck", "walls.csv", "steps.csv", "partition.csv");
     }
 
@@ -105,12 +109,13 @@ class RunLoopTest {
         SnapshotFrame last = frames.getLast();
         assertThat(last.grains().fields())
                 .extracting(NamedArray::name)
-                .containsExactly(
-                        "radius [m]", "velocity [m/s]", "spin [rad/s]", "lot", "material", "id", "pegged");
+                .containsExactly("radius [m]", "velocity [m/s]", "spin [rad/s]", "lot", "material", "id", "pegged");
         int[] ids = ((NamedArray.Ints) last.grains().fields().get(5)).values();
         assertThat(ids).isSorted().hasSizeGreaterThan(20);
         SnapshotFrame.LineMesh wires = last.structures().getFirst();
-        assertThat(wires.pointFields()).extracting(NamedArray::name).containsExactly("displacement [m]", "velocity [m/s]");
+        assertThat(wires.pointFields())
+                .extracting(NamedArray::name)
+                .containsExactly("displacement [m]", "velocity [m/s]");
         assertThat(wires.cellFields())
                 .extracting(NamedArray::name)
                 .containsExactly(
@@ -129,17 +134,20 @@ class RunLoopTest {
     void passageAddsUpToWhatWasFed() throws IOException {
         run(RainDeck.shaken().model(), RainDeck.plan(0.25, 0.05), () -> {});
         List<String> lines = lines("passage.csv");
-        assertThat(lines.getFirst()).startsWith("time [s],vetch: mass fed [kg],vetch: mass in the run [kg],"
-                + "vetch: mass out at below [kg],vetch: mass out at end [kg],vetch: mass spilled [kg]");
+        assertThat(lines.getFirst())
+                .startsWith("time [s],vetch: mass fed [kg],vetch: mass in the run [kg],"
+                        + "vetch: mass out at below [kg],vetch: mass out at end [kg],vetch: mass spilled [kg]");
         double[] last = row(lines.getLast());
         for (int lot = 0; lot < 2; lot++) {
             int at = 1 + 7 * lot;
             assertThat(last[at]).isPositive();
-            assertThat(last[at + 1] + last[at + 2] + last[at + 3] + last[at + 4]).isCloseTo(last[at], within(1e-15));
+            assertThat(last[at + 1] + last[at + 2] + last[at + 3] + last[at + 4])
+                    .isCloseTo(last[at], within(1e-15));
             assertThat(last[at + 2] + last[at + 3]).isPositive();
         }
         long passed = 0;
-        for (String line : lines("partition.csv").subList(1, lines("partition.csv").size())) {
+        for (String line :
+                lines("partition.csv").subList(1, lines("partition.csv").size())) {
             passed += (long) row(line)[1];
         }
         assertThat(passed).isPositive();
@@ -153,8 +161,14 @@ class RunLoopTest {
         assertThat(ended.summary.chars()).allMatch(c -> c == '\n' || c >= ' ' && c < 127);
         assertThat(ended.summary)
                 .contains(
-                        "1 undersize recovery", "2 good product lost", "3 open area pegged", "4 worst stress range",
-                        "5 trust in figure 1", "10 of 10 batches", "(duty: at least 90.0 %)", "A caution.");
+                        "1 undersize recovery",
+                        "2 good product lost",
+                        "3 open area pegged",
+                        "4 worst stress range",
+                        "5 trust in figure 1",
+                        "10 of 10 batches",
+                        "(duty: at least 90.0 %)",
+                        "A caution.");
         assertThat(ended.summary.replaceAll("\\s+", " ")).contains("licensed engineer under local codes");
         assertThat(ended.summary).doesNotContain("NaN");
         assertThat(progress.toString(StandardCharsets.UTF_8).lines()).hasSizeBetween(9, 20);
@@ -180,11 +194,13 @@ class RunLoopTest {
 
     @Test
     void aGuardFailureLeavesTheFolderReadable() {
-        Model model = RainDeck.still().feeding(0).grain(0.03, 0.0185, 0.05, 3e-3).model();
+        Model model =
+                RainDeck.still().feeding(0).grain(0.03, 0.0185, 0.05, 3e-3).model();
         Runnable poison = () -> model.grains().rows()[GrainRow.at(0) + GrainRow.V] = Double.NaN;
         assertThatThrownBy(() -> run(model, RainDeck.plan(0.1, 0.05), poison))
-                .isInstanceOfSatisfying(ReedlingException.class, failure ->
-                        assertThat(failure.exitCode()).isEqualTo(ExitCode.GUARD));
+                .isInstanceOfSatisfying(
+                        ReedlingException.class,
+                        failure -> assertThat(failure.exitCode()).isEqualTo(ExitCode.GUARD));
         assertThat(folder.resolve("run/run.json")).content().contains("\"status\": \"failed: ", "grain 0");
         assertThat(folder.resolve("run/run.log")).content().contains("failed at");
         assertThat(folder.resolve("run/passage.csv")).content().hasLineCount(2);

@@ -40,7 +40,9 @@ class StateDigestTest {
             assertThat(model.grains().count()).isGreaterThan(20);
             String before = StateDigest.of(run);
             double[][] arrays = {
-                model.grains().rows(), model.grains().orientation(), model.structure().nodes().velocity,
+                model.grains().rows(),
+                model.grains().orientation(),
+                model.structure().nodes().velocity,
                 model.structure().elementSets().getFirst().history
             };
             int[] places = {GrainRow.at(3) + GrainRow.W, 5, 40, 1};
