@@ -1,14 +1,24 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.probe;
 
+import reedling.error.RangeCheck;
+
 /**
- * The part of a run that is measured, cut into batches of equal length.
+ * The part of a run that is measured, cut into batches of equal length. Errors: no length, no batch.
  *
  * @param from start, s
  * @param until end, s, later than the start
  * @param batches number of batches, at least 1
  */
 public record MeasuredWindow(double from, double until, int batches) {
+
+    public MeasuredWindow {
+        new RangeCheck("measured window")
+                .finite("start", from, "s")
+                .positive("length", until - from, "s")
+                .require(batches > 0, "batches", batches, "", "at least 1")
+                .finish();
+    }
 
     /** Number that {@link #batchOf} gives outside the window. */
     public static final int OUTSIDE = -1;

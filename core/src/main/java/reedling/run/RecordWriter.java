@@ -9,6 +9,7 @@ import java.util.TreeMap;
 import reedling.math.Lanes;
 import reedling.output.RunRecord;
 import reedling.probe.Estimate;
+import reedling.structure.Body;
 
 /** Fills the run record {@code run.json}. Threads: one. */
 final class RecordWriter {
@@ -54,8 +55,15 @@ final class RecordWriter {
                 .set("plugins", new TreeMap<>(identity.plugins()))
                 .set("seed", identity.seed())
                 .set("machine", machine())
-                .set("lots", lots());
-        result.figures().ifPresent(one -> record.set("screen", screen(one)));
+                .set("lots", lots())
+                .set(
+                        "wires",
+                        simulation.model().structure().bodies().stream()
+                                .map(Body::name)
+                                .toList());
+        result.figures()
+                .ifPresent(one -> record.set("screen", screen(one))
+                        .set("uncertainty", result.trust().contributors()));
         List<String> cautions = new ArrayList<>(identity.cautions());
         cautions.addAll(result.trust().overlaps());
         return record.set("cautions", cautions);

@@ -12,6 +12,7 @@ import reedling.file.WholeFile;
 import reedling.output.RunRecord;
 import reedling.output.SnapshotFrame;
 import reedling.output.SnapshotWriter;
+import reedling.output.WriteQueue;
 
 /**
  * The outer loop of a run: steps, looks, and writes what is due at the first step at or after its time; it never changes
@@ -228,19 +229,34 @@ public final class RunLoop implements AutoCloseable {
 
     /** Hands over what is known when a run fails; a second failure is added to the first. */
     private void leaveReadable(Throwable failure) {
+        String status = "failed: " + failure.getMessage();
         try {
             log("failed at " + time() + ": " + failure.getMessage());
             tables.submit(output.queue());
-            submitRecord("failed: " + failure.getMessage());
+            submitRecord(status);
             output.queue().drain();
         } catch (RuntimeException second) {
             failure.addSuppressed(second);
+            recordDirectly(status, failure);
+        }
+    }
+
+    /** A queue that failed drops its jobs: the record, which must say so, is then written on this thread. */
+    private void recordDirectly(String status, Throwable failure) {
+        try {
+            recordJob(status).run();
+        } catch (IOException | RuntimeException third) {
+            failure.addSuppressed(third);
         }
     }
 
     private void submitRecord(String status) {
+        output.queue().submit("run.json", recordJob(status));
+    }
+
+    private WriteQueue.Job recordJob(String status) {
         RunRecord record = RecordWriter.record(RunResult.of(simulation, probes, plan), clock, status);
-        output.queue().submit("run.json", record.saving(output.folder().resolve("run.json")));
+        return record.saving(output.folder().resolve("run.json"));
     }
 
     private String summaryText(String word) {

@@ -94,7 +94,7 @@ final class Summary {
         if (probes.wallLoads().walls() == 0) {
             return;
         }
-        text.section("Loads of walls");
+        text.section("Loads of walls (whole run)");
         if (simulation.model().structure().bodies().isEmpty()) {
             text.line(LOAD_CAUTION);
         }

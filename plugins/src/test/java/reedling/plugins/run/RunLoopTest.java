@@ -14,9 +14,11 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Consumer;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import reedling.checkpoint.CheckpointFolder;
+import reedling.checkpoint.CheckpointReader;
 import reedling.error.ExitCode;
 import reedling.error.ReedlingException;
 import reedling.output.RunFolder;
@@ -32,6 +34,7 @@ import reedling.run.RunOutput;
 import reedling.run.RunPlan;
 import reedling.run.Simulation;
 import reedling.run.StateDigest;
+import reedling.run.StateOwners;
 import reedling.run.StopFlag;
 
 class RunLoopTest {
@@ -42,6 +45,8 @@ class RunLoopTest {
     private final List<SnapshotFrame> frames = new ArrayList<>();
     private final ByteArrayOutputStream progress = new ByteArrayOutputStream();
     private final StopFlag stop = new StopFlag();
+    private StateOwners owners = List::of;
+    private Consumer<SnapshotFrame> onFrame = frame -> {};
 
     private record Ended(RunLoop.Outcome outcome, String digest, String summary) {}
 
@@ -57,10 +62,13 @@ class RunLoopTest {
             RunOutput output = new RunOutput(
                     run,
                     queue,
-                    List.of(frames::add),
+                    List.of(frame -> {
+                        frames.add(frame);
+                        onFrame.accept(frame);
+                    }),
                     CheckpointFolder.create(run.path()),
                     new ProgressText(out, false, 80, System::nanoTime));
-            try (RunLoop loop = new RunLoop(simulation, plan, output, List::of, stop, Double.NaN)) {
+            try (RunLoop loop = new RunLoop(simulation, plan, output, owners, stop, Double.NaN)) {
                 RunLoop.Outcome outcome = loop.run();
                 return new Ended(outcome, StateDigest.of(simulation), loop.summary());
             }
@@ -192,17 +200,62 @@ class RunLoopTest {
         assertThat(folder.resolve("run/checkpoint_000001.rck")).exists();
     }
 
+    /** Grains of 5 MPa on bending wires overlap by a tenth of what decides whether they pass. */
     @Test
-    void aGuardFailureLeavesTheFolderReadable() {
+    void softeningAndTheLedgerAreJudgedInPlainWords() throws IOException {
+        Ended ended = run(RainDeck.shaken().model(), RainDeck.plan(0.15, 0.05), () -> {});
+        assertThat(ended.summary.replaceAll("\\s+", " "))
+                .contains("Softening decides for lot peas", "Repeat with four times the modulus", "is expected (good)");
+    }
+
+    @Test
+    void aStopEndsTheRunAfterItsStepWithACheckpoint() throws IOException {
+        RunPlan plan = RainDeck.plan(5, 0.05);
+        onFrame = frame -> {
+            if (frame.time() > 0.03) {
+                stop.raise();
+            }
+        };
+        Ended ended = run(RainDeck.shaken().model(), plan, () -> {});
+        assertThat(ended.outcome).isEqualTo(RunLoop.Outcome.STOPPED);
+        double last = row(lines("steps.csv").getLast())[0];
+        assertThat(last).isBetween(0.04, 4.9);
+        try (CheckpointReader reader =
+                CheckpointFolder.latest(folder.resolve("run")).reader()) {
+            assertThat(reader.header().time()).isEqualTo(last);
+        }
+    }
+
+    @Test
+    void aWriterThatFailsEndsTheRunAndTheRecordSaysSo() {
+        onFrame = frame -> {
+            throw new java.io.UncheckedIOException(new IOException("disk full"));
+        };
+        assertThatThrownBy(() -> run(RainDeck.shaken().model(), RainDeck.plan(0.5, 0.05), () -> {}))
+                .isInstanceOf(ReedlingException.class)
+                .hasMessageContaining("snapshot");
+        assertThat(folder.resolve("run/run.json")).content().contains("\"status\": \"failed: ", "disk full");
+    }
+
+    /** A grain falls freely; what makes it fail happens while the first checkpoint is taken. */
+    @Test
+    void aGuardFailureLeavesTheFolderReadableWithTheLastGoodCheckpoint() throws IOException {
         Model model =
-                RainDeck.still().feeding(0).grain(0.03, 0.0185, 0.05, 3e-3).model();
-        Runnable poison = () -> model.grains().rows()[GrainRow.at(0) + GrainRow.V] = Double.NaN;
-        assertThatThrownBy(() -> run(model, RainDeck.plan(0.1, 0.05), poison))
+                RainDeck.still().feeding(0).grain(0.03, 0.0185, 0.19, 3e-3).model();
+        owners = () -> {
+            model.grains().rows()[GrainRow.at(0) + GrainRow.V] = Double.NaN;
+            return List.of();
+        };
+        assertThatThrownBy(() -> run(model, RainDeck.plan(0.1, 0.05), () -> {}))
                 .isInstanceOfSatisfying(
                         ReedlingException.class,
                         failure -> assertThat(failure.exitCode()).isEqualTo(ExitCode.GUARD));
         assertThat(folder.resolve("run/run.json")).content().contains("\"status\": \"failed: ", "grain 0");
         assertThat(folder.resolve("run/run.log")).content().contains("failed at");
-        assertThat(folder.resolve("run/passage.csv")).content().hasLineCount(2);
+        assertThat(lines("passage.csv")).hasSize(1 + 6); // at 0, 0.01 ... 0.05
+        try (CheckpointReader reader =
+                CheckpointFolder.latest(folder.resolve("run")).reader()) {
+            assertThat(reader.header().time()).isBetween(0.05, 0.0511);
+        }
     }
 }
