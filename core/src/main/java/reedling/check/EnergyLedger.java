@@ -20,6 +20,17 @@ import reedling.wall.WallPose;
 public final class EnergyLedger {
 
     private static final int LOAD = 6; // force 3, torque 3
+    private static final int HEAD = 13; // numbers saved before the loads
+
+    /**
+     * What the bodies held at the last report, J.
+     *
+     * @param kinetic of grains and structures
+     * @param potential in fields, of grains and structures
+     * @param contacts elastic, of all contacts
+     * @param strain elastic, of structures
+     */
+    public record Holdings(double kinetic, double potential, double contacts, double strain) {}
 
     private final double[] oldLoads;
     private double contactWork;
@@ -31,6 +42,7 @@ public final class EnergyLedger {
     private double residual;
     private double throughput;
     private double dissipated;
+    private Holdings holdings = new Holdings(0, 0, 0, 0);
 
     /**
      * @param walls number of walls
@@ -104,6 +116,16 @@ public final class EnergyLedger {
         residual = balance - start;
         dissipated = contactWork - springs + energy.strainDissipation() + energy.modalDissipation();
         throughput = dissipated + kinetic + energy.kinetic() + stored + springs + energy.strain();
+        holdings = new Holdings(
+                kinetic + energy.kinetic(),
+                interactions.potentialEnergy() + energy.gravity(),
+                stored + springs,
+                energy.strain());
+    }
+
+    /** What the bodies held at the last report. */
+    public Holdings holdings() {
+        return holdings;
     }
 
     /** What is left over, J. */
@@ -133,8 +155,11 @@ public final class EnergyLedger {
 
     /** Numbers that decide the next reports, for a checkpoint. */
     public double[] save() {
-        double[] saved = new double[9 + oldLoads.length];
-        double[] head = {contactWork, wallWork, brought, taken, start, started ? 1 : 0, residual, throughput, dissipated};
+        double[] saved = new double[HEAD + oldLoads.length];
+        double[] head = {
+            contactWork, wallWork, brought, taken, start, started ? 1 : 0, residual, throughput, dissipated,
+            holdings.kinetic, holdings.potential, holdings.contacts, holdings.strain
+        };
         System.arraycopy(head, 0, saved, 0, head.length);
         System.arraycopy(oldLoads, 0, saved, head.length, oldLoads.length);
         return saved;
@@ -151,6 +176,7 @@ public final class EnergyLedger {
         residual = saved[6];
         throughput = saved[7];
         dissipated = saved[8];
-        System.arraycopy(saved, 9, oldLoads, 0, oldLoads.length);
+        holdings = new Holdings(saved[9], saved[10], saved[11], saved[12]);
+        System.arraycopy(saved, HEAD, oldLoads, 0, oldLoads.length);
     }
 }

@@ -8,6 +8,7 @@ import reedling.field.Field;
 import reedling.material.MaterialTable;
 import reedling.neighbour.Chunk;
 import reedling.neighbour.NeighbourLists;
+import reedling.neighbour.PairSegment;
 import reedling.parallel.Phase;
 import reedling.parallel.WorkerTeam;
 import reedling.particle.GrainStore;
@@ -272,6 +273,33 @@ public final class Interactions {
             total += potentials[c];
         }
         return total;
+    }
+
+    /** Contact rows of grains with grains, chunk by chunk. */
+    public List<PairSegment> pairRows() {
+        List<PairSegment> all = new ArrayList<>();
+        lists.chunks().forEach(chunk -> all.addAll(List.of(chunk.segments())));
+        return all;
+    }
+
+    /** Contact rows of grains (first) with wall facets (second), chunk by chunk. */
+    public List<PairSegment> wallRows() {
+        List<PairSegment> all = new ArrayList<>();
+        for (int c = 0; c < chunkCount(); c++) {
+            all.addAll(List.of(walls.segments(c)));
+        }
+        return all;
+    }
+
+    /** Contact rows of grains (first) with wires (second), chunk by chunk. */
+    public List<PairSegment> wireRows() {
+        List<PairSegment> all = new ArrayList<>();
+        for (int c = 0; c < wires.chunkCount(); c++) {
+            for (WireRows rows : wires.chunk(c).rows()) {
+                all.add(rows.segment());
+            }
+        }
+        return all;
     }
 
     /** Gap between a point and the nearest wall or wire, m; for placing new grains. */

@@ -230,4 +230,9 @@ public final class WallContacts {
         }
         return total;
     }
+
+    /** What {@link #sumLoads} gave last, that is in the last step; not to be changed. */
+    public double[] lastLoads() {
+        return total;
+    }
 }

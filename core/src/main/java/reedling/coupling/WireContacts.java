@@ -43,6 +43,7 @@ public final class WireContacts implements NodalLoads {
     private final List<WireTouch> touches = new ArrayList<>();
     private int chunks;
     private long pass;
+    private boolean listedAnew;
 
     WireContacts(LawSet laws, MaterialTable materials, Structure structure, int[] materialOfBody) {
         this.laws = laws;
@@ -104,6 +105,7 @@ public final class WireContacts implements NodalLoads {
         layOut(lists.chunks().size(), team.workers());
         elements.enter(lists.grid(), largestRadius + margin);
         team.run((task, worker) -> list(lists.chunks().get(task), grains, margin), chunks);
+        listedAnew = true;
     }
 
     private void list(Chunk range, GrainStore grains, double margin) {
@@ -153,6 +155,7 @@ public final class WireContacts implements NodalLoads {
     /** Opens a pass over all contacts; one thread. */
     void openPass() {
         pass++;
+        listedAnew = false;
     }
 
     /** Finds the touching rows of a chunk and adds their forces to the near grains and the rows' loads. */
@@ -267,6 +270,71 @@ public final class WireContacts implements NodalLoads {
         }
         if (second >= firstNode && second < lastNode) {
             add(rows.segment().exports(), from, along, force, moment, 3 * second);
+        }
+    }
+
+    /** Takes a grain that overlaps a wire. */
+    @FunctionalInterface
+    public interface OverlapVisitor {
+
+        /**
+         * @param grain row of the grain
+         * @param body number of the wire's body
+         * @param overlap deepest overlap of the two at their present places, m, > 0
+         */
+        void touch(int grain, int body, double overlap);
+    }
+
+    /** Shows every grain and wire that overlap at their present places, between two steps; one thread, in chunk order. */
+    public void visitOverlaps(GrainStore grains, OverlapVisitor visitor) {
+        for (int c = 0; c < chunks; c++) {
+            WireChunk chunk = pool.get(c);
+            for (int number = 0; number < chunk.near().count(); number++) {
+                visitGrain(chunk, number, grains, visitor);
+            }
+        }
+    }
+
+    private void visitGrain(WireChunk chunk, int number, GrainStore grains, OverlapVisitor visitor) {
+        int grain = chunk.near().grain(number);
+        int end = chunk.candidateEnd(number);
+        int k = chunk.candidateStart(number);
+        while (k < end) {
+            int body = elements.body(chunk.candidate(k));
+            double deepest = 0;
+            for (; k < end && elements.body(chunk.candidate(k)) == body; k++) {
+                deepest = Math.max(deepest, elements.overlap(chunk.candidate(k), grains.rows(), GrainRow.at(grain)));
+            }
+            if (deepest > 0) {
+                visitor.touch(grain, body, deepest);
+            }
+        }
+    }
+
+    /**
+     * Adds the forces of the last pass on each wire; one thread, between two steps.
+     *
+     * @param perBody three doubles a body, N, world frame; added to
+     * @return false if the rows were listed anew since that pass, which leaves no forces to add
+     */
+    public boolean addForces(double[] perBody) {
+        for (int c = 0; c < chunks && !listedAnew; c++) {
+            for (WireRows rows : pool.get(c).rows()) {
+                for (int k = 0; k < rows.segment().activeCount(); k++) {
+                    if (rows.seen()[k] == pass) {
+                        addForce(rows, k, perBody);
+                    }
+                }
+            }
+        }
+        return !listedAnew;
+    }
+
+    private static void addForce(WireRows rows, int k, double[] perBody) {
+        int to = 3 * rows.segment().second()[k];
+        int from = PairSegment.PAD + 8 * k + GrainRow.FORCE;
+        for (int axis = 0; axis < 3; axis++) {
+            perBody[to + axis] += rows.segment().exports()[from + axis];
         }
     }
 

@@ -3,6 +3,7 @@ package reedling.coupling;
 
 import java.util.Arrays;
 import reedling.neighbour.CellGrid;
+import reedling.particle.GrainRow;
 import reedling.structure.Body;
 import reedling.structure.NodeStore;
 import reedling.structure.Structure;
@@ -154,6 +155,19 @@ final class WireElements {
         double dot = Math.fma(px - x[a], dx, Math.fma(py - x[a + 1], dy, (pz - x[a + 2]) * dz));
         double along = dot / Math.fma(dx, dx, Math.fma(dy, dy, dz * dz));
         return along > 0 ? Math.min(along, 1) : 0;
+    }
+
+    /** Overlap of an element and the grain whose row starts at a place, m; negative for a gap. */
+    double overlap(int element, double[] rows, int at) {
+        double along = nearest(element, rows[at], rows[at + 1], rows[at + 2]);
+        double[] x = nodes.position;
+        int a = 3 * firstNode[element];
+        int b = 3 * secondNode[element];
+        double dx = Math.fma(along, x[b] - x[a], x[a]) - rows[at];
+        double dy = Math.fma(along, x[b + 1] - x[a + 1], x[a + 1]) - rows[at + 1];
+        double dz = Math.fma(along, x[b + 2] - x[a + 2], x[a + 2]) - rows[at + 2];
+        double distance = Math.sqrt(Math.fma(dx, dx, Math.fma(dy, dy, dz * dz)));
+        return rows[at + GrainRow.RADIUS] + radiusOfBody[body[element]] - distance;
     }
 
     /** Gap between a point and the nearest element, m; infinite where there is none. */

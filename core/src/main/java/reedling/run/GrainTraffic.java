@@ -7,6 +7,7 @@ import reedling.feed.GrainSeeds;
 import reedling.field.Field;
 import reedling.particle.GrainRow;
 import reedling.particle.GrainStore;
+import reedling.probe.GrainWatch;
 import reedling.wall.WallPose;
 
 /**
@@ -27,6 +28,7 @@ final class GrainTraffic {
     private final GrainSeeds seeds = new GrainSeeds();
     private final double[] uniform = new double[3];
     private double nextRelease;
+    private GrainWatch watch = GrainWatch.NONE;
 
     GrainTraffic(Model model, Interactions interactions, Passage passage, EnergyLedger ledger) {
         this.model = model;
@@ -39,6 +41,10 @@ final class GrainTraffic {
                 uniform[axis] += acceleration[axis];
             }
         }
+    }
+
+    void watch(GrainWatch watcher) {
+        watch = watcher;
     }
 
     /** Counts the grains that are there before the first step. */
@@ -65,19 +71,20 @@ final class GrainTraffic {
             seeds.clear();
             line.feed().release(time, this::free, seeds);
             for (int k = 0; k < seeds.size(); k++) {
-                add(k, line.lotNumbers()[seeds.lot(k)], past);
+                add(k, line.lotNumbers()[seeds.lot(k)], time, past);
             }
             added += seeds.size();
         }
         return added;
     }
 
-    private void add(int k, int lot, double past) {
+    private void add(int k, int lot, double time, double past) {
         GrainStore grains = model.grains();
         double density = model.materials().materials().get(seeds.material(k)).density();
         int g = grains.add(seeds.x(k), seeds.y(k), seeds.z(k), seeds.radius(k), density, seeds.material(k), lot);
         grains.velocity(g, seeds.velocityX(k), seeds.velocityY(k), seeds.velocityZ(k));
         passage.fed(lot, grains.mass(g));
+        watch.fed(lot, grains.mass(g), time);
         if (past > 0) {
             ledger.brought(energy(g, past));
         }
@@ -118,7 +125,7 @@ final class GrainTraffic {
     }
 
     /** Marks the grains that reached an exit and counts them; an empty array if there are none. */
-    boolean[] leaving(double past) {
+    boolean[] leaving(double time, double past) {
         GrainStore grains = model.grains();
         double[] rows = grains.rows();
         boolean[] removed = new boolean[0];
@@ -129,6 +136,7 @@ final class GrainTraffic {
                 removed = removed.length == 0 ? new boolean[grains.count()] : removed;
                 removed[g] = true;
                 passage.left(exit, grains.lot()[g], grains.mass(g));
+                watch.left(exit, grains.lot()[g], 2 * grains.radius(g), grains.mass(g), time);
                 ledger.taken(energy(g, past));
             }
         }

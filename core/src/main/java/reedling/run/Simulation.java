@@ -8,6 +8,7 @@ import reedling.coupling.Interactions;
 import reedling.coupling.MoveTally;
 import reedling.coupling.PastStep;
 import reedling.parallel.WorkerTeam;
+import reedling.probe.GrainWatch;
 import reedling.time.StepControl;
 import reedling.time.StepLimits;
 import reedling.wall.WallPose;
@@ -234,7 +235,7 @@ public final class Simulation {
         boolean released = traffic.releaseDue(time) && traffic.release(time, pastStep) > 0;
         boolean used = 2 * (travel + largestSpeed * control.longestNext()) > model.steps().margin();
         if (released || used) {
-            search(traffic.leaving(pastStep));
+            search(traffic.leaving(time, pastStep));
         }
     }
 
@@ -258,6 +259,11 @@ public final class Simulation {
 
     public Passage passage() {
         return passage;
+    }
+
+    /** Has every grain that a feed gives or that leaves shown to a watcher. */
+    public void watch(GrainWatch watcher) {
+        traffic.watch(watcher);
     }
 
     public StepControl control() {
