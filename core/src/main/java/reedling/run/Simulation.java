@@ -116,14 +116,48 @@ public final class Simulation {
             ledger.report(interactions, model.structure(), strain);
         }
 
-        // bend: further fine steps of the structure and the grains near it
-        for (int k = 1; k < fineSteps; k++) {
+        fine = bend(next, fine);
+        closeStep(next, fine);
+    }
+
+    /**
+     * Takes the further fine steps of the structure and the grains near it. What is left of the step is divided anew when a
+     * contact that began, or is about to, needs shorter ones.
+     *
+     * @return length of the last fine step, s
+     */
+    private double bend(double next, double firstFine) {
+        double fine = firstFine;
+        double done = firstFine;
+        int left = fineSteps - 1;
+        while (left > 0) {
             interactions.fineForce(fine, team);
             bookContacts(false);
-            model.structure().poseSupports(k + 1 == fineSteps ? time + next : time + (k + 1) * fine, fine);
-            interactions.fineMove(team);
+            double limit = fineLimit();
+            double coming = fine;
+            if (limit < fine) {
+                int parts = parts(next - done, limit);
+                fineSteps += parts - left;
+                left = parts;
+                coming = (next - done) / parts;
+            }
+            done = left == 1 ? next : done + coming;
+            model.structure().poseSupports(time + done, coming);
+            interactions.fineMove(fine, coming, team);
+            fine = coming;
+            left--;
         }
-        closeStep(next, fine);
+        return fine;
+    }
+
+    /** Number of fine steps no longer than a limit, s, that a time, s, is divided into. */
+    private int parts(double seconds, double limit) {
+        double parts = Math.ceil(seconds / limit);
+        if (!(parts <= MOST_FINE_STEPS)) {
+            throw StateGuard.stop(step, time, "structure", "fine step", limit + " s",
+                    "More than " + MOST_FINE_STEPS + " fine steps would be needed in one step: use larger elements.");
+        }
+        return Math.max(1, (int) parts);
     }
 
     private void bookContacts(boolean coarseToo) {
@@ -146,6 +180,9 @@ public final class Simulation {
             frequencySquared = Math.max(frequencySquared, tally.largestFrequencySquared());
             touching |= tally.touching();
         }
+        if (step % STRUCTURE_EVERY == 0) {
+            structureStep = model.structure().stableStep();
+        }
         double fineLimit = fineLimit();
         for (ContactTally tally : interactions.fine()) {
             touching |= tally.touching();
@@ -163,19 +200,12 @@ public final class Simulation {
                     "A law reported a time that is not positive.");
         }
         double next = control.choose(smallest, touching);
-        fineSteps = (int) Math.min(MOST_FINE_STEPS + 1.0, Math.ceil(next / fineLimit));
-        if (fineSteps > MOST_FINE_STEPS) {
-            throw StateGuard.stop(step, time, "structure", "fine step", fineLimit + " s",
-                    "More than " + MOST_FINE_STEPS + " fine steps would be needed in one step: use larger elements.");
-        }
-        fineSteps = Math.max(1, fineSteps);
+        fineSteps = parts(next, fineLimit);
         return next;
     }
 
+    /** Longest fine step that the structure and its contacts allow, as the last fine pass found them, s. */
     private double fineLimit() {
-        if (step % STRUCTURE_EVERY == 0) {
-            structureStep = model.structure().stableStep();
-        }
         double limit = structureStep;
         double frequencySquared = 0;
         for (ContactTally tally : interactions.fine()) {
@@ -279,7 +309,7 @@ public final class Simulation {
         return pastStep;
     }
 
-    /** Fine steps in the last step. */
+    /** Fine steps in the last step, those of the remainder divided anew included. */
     public int fineSteps() {
         return fineSteps;
     }
