@@ -57,11 +57,11 @@ public record Momentum(double[] sum, double[] scale) {
         scale[1] += Math.sqrt(angular);
     }
 
-    /** Largest change of any component since an earlier state, over the sum of magnitudes. */
+    /** Largest change of any component since an earlier state, over the larger sum of magnitudes. */
     public double largestChange(Momentum before) {
         double largest = 0;
         for (int i = 0; i < 6; i++) {
-            largest = Math.max(largest, Math.abs(sum[i] - before.sum[i]) / before.scale[i / 3]);
+            largest = Math.max(largest, Math.abs(sum[i] - before.sum[i]) / Math.max(scale[i / 3], before.scale[i / 3]));
         }
         return largest;
     }
