@@ -83,10 +83,11 @@ public final class Simulation {
         structureStep = model.structure().stableStep();
         traffic.release(0, 0);
         search(new boolean[0]);
-        largestSpeed = speedBeforeFirstStep();
+        largestSpeed = fastest();
     }
 
-    private double speedBeforeFirstStep() {
+    /** Largest speed of any grain, wall or node as they are now, m/s. */
+    private double fastest() {
         double largest = 0;
         for (int g = 0; g < model.grains().count(); g++) {
             largest = Math.max(largest, traffic.speed(g));
@@ -262,6 +263,9 @@ public final class Simulation {
 
     private void searchIfDue() {
         boolean released = traffic.releaseDue(time) && traffic.release(time, pastStep) > 0;
+        if (released) {
+            largestSpeed = Math.max(largestSpeed, fastest()); // new grains may be the fastest
+        }
         boolean used = 2 * (travel + largestSpeed * control.longestNext()) > model.steps().margin();
         if (released || used) {
             search(traffic.leaving(pastStep));
