@@ -32,6 +32,9 @@ public final class Simulation {
     /** Share of the search margin that one step may use up. */
     private static final double MARGIN_SHARE = 0.2;
 
+    /** Time over which walls and supports show their velocity before the first step, s. */
+    private static final double GLIMPSE = 1e-6;
+
     private static final int MOST_FINE_STEPS = 10_000;
 
     /** Steps between two looks at the structure's own stable step, which tension changes slowly. */
@@ -77,9 +80,16 @@ public final class Simulation {
         traffic = new GrainTraffic(model, interactions, passage, ledger);
     }
 
-    /** Places the first grains and lists all pairs; call once, before the first step of a fresh run. */
+    /**
+     * Places the first grains, sets walls and supports in motion and lists all pairs; call once, before the first step of a
+     * fresh run.
+     */
     public void begin() {
         traffic.bookInitialGrains();
+        for (WallPose pose : interactions.facets().walls()) {
+            pose.restore(-GLIMPSE, 0, GLIMPSE);
+        }
+        model.structure().startWithSupports(0, GLIMPSE);
         structureStep = model.structure().stableStep();
         traffic.release(0, 0);
         search(new boolean[0]);
