@@ -26,7 +26,9 @@ class StepLadderTest {
         for (int exponent = -10; exponent < 30; exponent++) {
             for (int quarter = 0; quarter < 4; quarter++) {
                 double rung = StepLadder.floor(1e-9 * Math.pow(2, exponent + 0.25 * quarter) * (1 + 1e-9));
-                assertThat(StepLadder.floor(rung)).as("2^(%d + %d/4) ns", exponent, quarter).isEqualTo(rung);
+                assertThat(StepLadder.floor(rung))
+                        .as("2^(%d + %d/4) ns", exponent, quarter)
+                        .isEqualTo(rung);
             }
         }
     }

@@ -124,7 +124,9 @@ class NeighbourListsTest {
         if (!active) {
             assertThat(gap).isGreaterThan(-1e-12);
         }
-        assertThat(pairs.put(Pair.of(grains.id()[i], grains.id()[j]), gap)).as("listed twice").isNull();
+        assertThat(pairs.put(Pair.of(grains.id()[i], grains.id()[j]), gap))
+                .as("listed twice")
+                .isNull();
     }
 
     private static NeighbourLists lists() {
@@ -229,7 +231,9 @@ class NeighbourListsTest {
                 for (int round = 0; round < 5; round++) {
                     jostle(grains, random);
                     lists.search(grains, MARGIN, new boolean[0], team);
-                    assertThat(assertMarks(lists, grains)).as("seed %d, round %d", seed, round).isEqualTo(living);
+                    assertThat(assertMarks(lists, grains))
+                            .as("seed %d, round %d", seed, round)
+                            .isEqualTo(living);
                     assertComplete(lists, grains);
                 }
             }

@@ -22,8 +22,14 @@ public record Momentum(double[] sum, double[] scale) {
         for (int g = 0; g < grains.count(); g++) {
             int at = GrainRow.at(g);
             total.add(
-                    rows, at, rows, at + GrainRow.V, rows, at + GrainRow.W,
-                    1 / rows[at + GrainRow.INVERSE_MASS], 1 / rows[at + GrainRow.INVERSE_INERTIA]);
+                    rows,
+                    at,
+                    rows,
+                    at + GrainRow.V,
+                    rows,
+                    at + GrainRow.W,
+                    1 / rows[at + GrainRow.INVERSE_MASS],
+                    1 / rows[at + GrainRow.INVERSE_INERTIA]);
         }
         return total;
     }
@@ -33,14 +39,19 @@ public record Momentum(double[] sum, double[] scale) {
         Momentum total = of(grains);
         for (int n = 0; n < nodes.count; n++) {
             total.add(
-                    nodes.position, 3 * n, nodes.velocity, 3 * n, nodes.spin, 3 * n,
-                    nodes.mass[n], 1 / nodes.inverseInertia[n]);
+                    nodes.position,
+                    3 * n,
+                    nodes.velocity,
+                    3 * n,
+                    nodes.spin,
+                    3 * n,
+                    nodes.mass[n],
+                    1 / nodes.inverseInertia[n]);
         }
         return total;
     }
 
-    private void add(
-            double[] x, int ix, double[] v, int iv, double[] w, int iw, double mass, double inertia) {
+    private void add(double[] x, int ix, double[] v, int iv, double[] w, int iw, double mass, double inertia) {
         double linear = 0;
         double angular = 0;
         for (int i = 0; i < 3; i++) {

@@ -92,8 +92,15 @@ class ObliqueImpactTest {
         "24, 0.5, 0, -0.097619, -0.119048, 21.0238, 0.00238095, 0.000952381, -0.0047619"
     })
     void spinningSpheresExchangeImpulse(
-            double spin, double otherRadius, double otherSpin,
-            double vn1, double vt1, double w1, double vn2, double vt2, double w2) {
+            double spin,
+            double otherRadius,
+            double otherSpin,
+            double vn1,
+            double vt1,
+            double w1,
+            double vn2,
+            double vt2,
+            double w2) {
         Rig rig = benchmark();
         Impact impact = Impact.ofTwo(
                 rig,

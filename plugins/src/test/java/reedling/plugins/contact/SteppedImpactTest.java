@@ -58,7 +58,14 @@ class SteppedImpactTest {
     @ParameterizedTest
     @Tag("reference")
     @CsvSource({
-        "10, 0.261", "15, 0.0893", "20, 0.0424", "30, 0.0150", "40, 0.00723", "60, 0.00259", "80, 0.00125", "160, 0.00022"
+        "10, 0.261",
+        "15, 0.0893",
+        "20, 0.0424",
+        "30, 0.0150",
+        "40, 0.00723",
+        "60, 0.00259",
+        "80, 0.00125",
+        "160, 0.00022"
     })
     void errorOfReboundStaysInItsBand(int steps, double percent) {
         assertThat(worst(steps)).isBetween(0.5 * percent / 100, 1.5 * percent / 100);

@@ -54,7 +54,9 @@ class GrainCloudTest {
             assertThat(run.interactions().lists().chunks().size()).isGreaterThan(2);
             assertThat(run.searches()).isGreaterThan(3);
             assertThat(run.ledger().dissipated()).isPositive();
-            assertThat(Momentum.of(rig.grains()).largestChange(before)).as("seed %d", seed).isLessThan(1e-12);
+            assertThat(Momentum.of(rig.grains()).largestChange(before))
+                    .as("seed %d", seed)
+                    .isLessThan(1e-12);
         }
     }
 

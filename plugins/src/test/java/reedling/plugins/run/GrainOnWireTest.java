@@ -32,12 +32,23 @@ class GrainOnWireTest {
     private static Bounce bounce(double radius, double maximumStep, int stepsPerContact) {
         StructureBuilder builder = new StructureBuilder();
         WireEnds ends = new WireEnds(
-                new Position(0, 0, 0), new Position(0.3, 0, 0), EndCondition.CLAMPED, EndCondition.CLAMPED,
+                new Position(0, 0, 0),
+                new Position(0.3, 0, 0),
+                EndCondition.CLAMPED,
+                EndCondition.CLAMPED,
                 WireEnds.AT_REST);
         WireMesh.add(
                 builder,
                 new WireSpecification(
-                        "wire", SOFT, new CrossSection.SolidCircle(0.002), ends, 60, 8, WireDamping.NONE, "beam", Map.of(),
+                        "wire",
+                        SOFT,
+                        new CrossSection.SolidCircle(0.002),
+                        ends,
+                        60,
+                        8,
+                        WireDamping.NONE,
+                        "beam",
+                        Map.of(),
                         false),
                 new BeamElement());
         Rig rig = new Rig()
@@ -56,7 +67,9 @@ class GrainOnWireTest {
                 most = Math.max(most, run.fineSteps());
             }
             return new Bounce(
-                    rig.velocity(grain), rig.spin(grain), most,
+                    rig.velocity(grain),
+                    rig.spin(grain),
+                    most,
                     run.ledger().residual() / (0.5 * rig.grains().mass(0) * 4.09));
         }
     }

@@ -41,7 +41,10 @@ class MovingStartTest {
                 .margin(5e-3)
                 .stepsPerContact(40);
         rig.wall(new Wall(
-                "ram", 0, new HalfSpace(), Placement.facing(new Vector3d(), new Vector3d(1, 0, 0)),
+                "ram",
+                0,
+                new HalfSpace(),
+                Placement.facing(new Vector3d(), new Vector3d(1, 0, 0)),
                 new Gliding(new Vector3d(2, 0, 0), Timing.always())));
         long grain = rig.grain(0, 0.004, new double[] {0.0043, 0, 0}, new double[3], new double[3]);
         try (WorkerTeam team = new WorkerTeam(1)) {
@@ -73,7 +76,15 @@ class MovingStartTest {
         WireMesh.add(
                 builder,
                 new WireSpecification(
-                        "wire", soft, new CrossSection.SolidCircle(0.002), ends, 20, 8, WireDamping.NONE, "beam", Map.of(),
+                        "wire",
+                        soft,
+                        new CrossSection.SolidCircle(0.002),
+                        ends,
+                        20,
+                        8,
+                        WireDamping.NONE,
+                        "beam",
+                        Map.of(),
                         false),
                 new BeamElement());
         Structure structure = builder.build();

@@ -30,7 +30,8 @@ class RodImpactTest {
     /** Light and as good as rigid: its lowest bending period is 0.1 ms, the contact lasts 8 ms. */
     private static Structure rigidRod(int elements) {
         CrossSection section = new CrossSection.SolidCircle(THICKNESS);
-        return Rods.along(1, elements, section, new Material("rod", 0.5 / section.area(), 2e13, 0.3), EndCondition.FREE);
+        return Rods.along(
+                1, elements, section, new Material("rod", 0.5 / section.area(), 2e13, 0.3), EndCondition.FREE);
     }
 
     private static Rig rig(double restitution, double friction, Structure rod) {

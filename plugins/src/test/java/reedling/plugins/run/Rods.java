@@ -21,8 +21,7 @@ final class Rods {
 
     static Structure along(double length, int elements, CrossSection section, Material material, EndCondition ends) {
         BeamElement type = new BeamElement();
-        ElementLaw law = type.law(
-                new ElementProperties(section, material, 0, ParameterValues.of(type, Map.of())));
+        ElementLaw law = type.law(new ElementProperties(section, material, 0, ParameterValues.of(type, Map.of())));
         StructureBuilder builder = new StructureBuilder();
         int[] pairs = new int[2 * elements];
         for (int e = 0; e < elements; e++) {

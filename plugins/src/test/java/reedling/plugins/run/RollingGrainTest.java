@@ -76,7 +76,9 @@ class RollingGrainTest {
     }
 
     private static Rig lossy(double friction, double rollingFriction) {
-        return new Rig().material(GRAIN, 0.3, friction, rollingFriction).material(RIGID, 0.3, friction, rollingFriction);
+        return new Rig()
+                .material(GRAIN, 0.3, friction, rollingFriction)
+                .material(RIGID, 0.3, friction, rollingFriction);
     }
 
     private static void until(Simulation run, double time) {
@@ -183,8 +185,7 @@ class RollingGrainTest {
                 .material(GRAIN, 1, 0.8, mu)
                 .material(RIGID, 1, 0.8, mu)
                 .law(Stage.ROLLING, provider.create(ParameterValues.of(provider, Map.of("damping_ratio", 0.0))));
-        double normalStiffness =
-                2 * 1e8 / (1 - 0.3 * 0.3) * Math.sqrt(RADIUS * overlap(MASS * G));
+        double normalStiffness = 2 * 1e8 / (1 - 0.3 * 0.3) * Math.sqrt(RADIUS * overlap(MASS * G));
         double rollingStiffness = 2.25 * mu * mu * normalStiffness * RADIUS * RADIUS;
         double period = 2 * Math.PI * Math.sqrt(1.4 * MASS * RADIUS * RADIUS / rollingStiffness);
         double largest = mu * RADIUS * MASS * G / rollingStiffness;

@@ -61,11 +61,13 @@ class SameBitsTest {
     private static String digestWithLanes(int lanes) throws IOException, InterruptedException {
         Process process = new ProcessBuilder(
                         Path.of(System.getProperty("java.home"), "bin", "java").toString(),
-                        "--add-modules", "jdk.incubator.vector",
+                        "--add-modules",
+                        "jdk.incubator.vector",
                         "-XX:ObjectAlignmentInBytes=64",
                         "-XX:+UseSerialGC",
                         "-Dreedling.lanes=" + lanes,
-                        "-cp", System.getProperty("java.class.path"),
+                        "-cp",
+                        System.getProperty("java.class.path"),
                         ShakenScreen.class.getName(),
                         "700")
                 .redirectError(ProcessBuilder.Redirect.DISCARD)

@@ -53,7 +53,8 @@ class SettlingBedTest {
     }
 
     private static Wall box(Motion motion) {
-        return new Wall("box", 0, new BoxInside(0.04, 0.04, 0.04, Set.of(BoxInside.Face.HIGH_Z)), Placement.world(), motion);
+        return new Wall(
+                "box", 0, new BoxInside(0.04, 0.04, 0.04, Set.of(BoxInside.Face.HIGH_Z)), Placement.world(), motion);
     }
 
     private static Simulation run(Rig rig, WorkerTeam team, double end) {
@@ -109,8 +110,11 @@ class SettlingBedTest {
     private static Wall drum(double speed) {
         Motion turning = new Turning(new Vector3d(), new Vector3d(0, 1, 0), speed, Timing.always());
         return new Wall(
-                "drum", 0, new CylinderInside(0.04, 0.05, true, true),
-                Placement.along(new Vector3d(0, -0.025, 0), new Vector3d(0, 0.025, 0)), turning);
+                "drum",
+                0,
+                new CylinderInside(0.04, 0.05, true, true),
+                Placement.along(new Vector3d(0, -0.025, 0), new Vector3d(0, 0.025, 0)),
+                turning);
     }
 
     /** A settled bed presses on the floor with its weight; 0.1 % is what is left of its rattling. */

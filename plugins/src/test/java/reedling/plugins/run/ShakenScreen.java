@@ -69,10 +69,15 @@ public final class ShakenScreen {
                 .structure(wires(), 2, 2, 2, 2, 2);
         Stroke stroke = new Stroke(new Vector3d(0, 1, 1), 0.001, 0);
         rig.wall(new Wall(
-                "box", 1, new BoxInside(WIDTH, WIDTH, 0.08, Set.of(BoxInside.Face.HIGH_Z)), Placement.world(),
+                "box",
+                1,
+                new BoxInside(WIDTH, WIDTH, 0.08, Set.of(BoxInside.Face.HIGH_Z)),
+                Placement.world(),
                 Oscillating.harmonic(stroke, 20, Timing.always())));
         rig.wall(new Wall(
-                "roller", 1, new CylinderOutside(0.006, 0.04),
+                "roller",
+                1,
+                new CylinderOutside(0.006, 0.04),
                 Placement.along(new Vector3d(-0.02, 0, -0.0105), new Vector3d(0.02, 0, -0.0105)),
                 new Turning(new Vector3d(0, 0, -0.0105), new Vector3d(1, 0, 0), 20, Timing.always())));
         SplittableRandom random = new SplittableRandom(seed);
@@ -94,13 +99,24 @@ public final class ShakenScreen {
         for (int i = 0; i < 5; i++) {
             double y = (i - 2) * 0.008;
             WireEnds ends = new WireEnds(
-                    new Position(-0.022, y, 0), new Position(0.022, y, 0), EndCondition.CLAMPED, EndCondition.CLAMPED,
+                    new Position(-0.022, y, 0),
+                    new Position(0.022, y, 0),
+                    EndCondition.CLAMPED,
+                    EndCondition.CLAMPED,
                     motion);
             WireMesh.add(
                     builder,
                     new WireSpecification(
-                            "wire " + i, WIRE, new CrossSection.SolidCircle(0.002), ends, 16, 4,
-                            new WireDamping(0, 0.02, 0.02), "beam", Map.of(), false),
+                            "wire " + i,
+                            WIRE,
+                            new CrossSection.SolidCircle(0.002),
+                            ends,
+                            16,
+                            4,
+                            new WireDamping(0, 0.02, 0.02),
+                            "beam",
+                            Map.of(),
+                            false),
                     new BeamElement());
         }
         return builder.build();

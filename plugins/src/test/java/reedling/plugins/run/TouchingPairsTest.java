@@ -69,7 +69,8 @@ class TouchingPairsTest {
         for (Chunk chunk : run.interactions().lists().chunks()) {
             for (PairSegment segment : chunk.segments()) {
                 for (int row = 0; row < segment.activeCount(); row++) {
-                    assertThat(pairs.add(pair(grains, segment.first()[row], segment.second()[row]))).isTrue();
+                    assertThat(pairs.add(pair(grains, segment.first()[row], segment.second()[row])))
+                            .isTrue();
                 }
             }
         }
@@ -88,7 +89,9 @@ class TouchingPairsTest {
                     Set<Pair> touching = overlapping(rig.grains());
                     run.step();
                     seen += touching.size();
-                    assertThat(active(run)).as("seed %d, step %d", seed, run.stepCount()).containsAll(touching);
+                    assertThat(active(run))
+                            .as("seed %d, step %d", seed, run.stepCount())
+                            .containsAll(touching);
                 }
                 assertThat(seen).isGreaterThan(150);
             }

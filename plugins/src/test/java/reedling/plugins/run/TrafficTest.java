@@ -45,9 +45,11 @@ class TrafficTest {
         double far = 10;
         Exits.Outlet outlet = new Exits.Outlet("below", new double[] {-far, -far, -far, far, far, -0.1});
         rig.exits(new Exits(List.of(outlet), new double[] {-far, -far, -far, far, far, far}));
-        LotMix mix = new LotMix(List.of(new LotShare(new Lot("all", 0, new UniformSize(0.003, 0.005)), 1)), rig.table());
+        LotMix mix =
+                new LotMix(List.of(new LotShare(new Lot("all", 0, new UniformSize(0.003, 0.005)), 1)), rig.table());
         Rain plan = new Rain(
-                "rain", mix,
+                "rain",
+                mix,
                 new BoxRegion(new Vector3d(0.002, -0.02, 0.004), new Vector3d(width, 0.02, width)),
                 new FeedRate(FeedRate.Measure.COUNT, rate, 200, FIRST, Double.POSITIVE_INFINITY),
                 new Launch(new Vector3d(0, 0, -speed), 0.05, 20));
@@ -67,7 +69,8 @@ class TrafficTest {
             }
             assertThat(run.passage().fedCount()).isEqualTo(200);
             assertThat(run.passage().outCount()).isGreaterThan(100);
-            assertThat(run.passage().fedCount() - run.passage().outCount()).isEqualTo(rig.grains().count());
+            assertThat(run.passage().fedCount() - run.passage().outCount())
+                    .isEqualTo(rig.grains().count());
             double inside = 0;
             for (int g = 0; g < rig.grains().count(); g++) {
                 inside += rig.grains().mass(g);
@@ -90,7 +93,9 @@ class TrafficTest {
                 run.step();
                 for (int g = 0; g < rig.grains().count(); g++) {
                     double gap = (rig.grains().position(g, 0) + rig.grains().position(g, 2)) / Math.sqrt(2);
-                    assertThat(gap).as("grain over the chute").isGreaterThan(0.7 * rig.grains().radius(g));
+                    assertThat(gap)
+                            .as("grain over the chute")
+                            .isGreaterThan(0.7 * rig.grains().radius(g));
                 }
             }
             assertThat(run.ledger().dissipated()).isPositive();
