@@ -125,7 +125,7 @@ public final class ContactTally {
         return touching;
     }
 
-    void touch() {
-        touching = true;
+    void touch(boolean any) {
+        touching |= any;
     }
 }

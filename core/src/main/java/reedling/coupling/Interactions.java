@@ -253,16 +253,23 @@ public final class Interactions {
         NearMotion.first(near, grains, 0.5 * pastFine, nextCoarse, nextFine, energyDue, tally);
     }
 
-    /** Opens a further fine step of the same length; the supports must stand at its end. */
-    public void fineMove(WorkerTeam team) {
+    /**
+     * Closes a fine step and opens the next; the supports must stand at its end.
+     *
+     * @param past the fine step that led here, s
+     * @param next the next one, s
+     */
+    public void fineMove(double past, double next, WorkerTeam team) {
+        pastFine = past;
+        nextFine = next;
         team.run(fineMovePhase, chunkCount() + structure.nodeTasks());
     }
 
     private void fineMoveTask(int task, int worker) {
         if (task >= chunkCount()) {
-            structure.moveNodes(task - chunkCount(), nextFine, nextFine, wires);
+            structure.moveNodes(task - chunkCount(), pastFine, nextFine, wires);
         } else {
-            NearMotion.further(wires.chunk(task), grains, nextFine, moves.get(task));
+            NearMotion.further(wires.chunk(task), grains, 0.5 * pastFine, nextFine, moves.get(task));
         }
     }
 

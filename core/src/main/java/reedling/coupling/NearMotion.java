@@ -52,17 +52,22 @@ final class NearMotion {
         }
     }
 
-    /** A further fine step of the same length, s: closes one half kick, opens the next, drifts. */
-    static void further(WireChunk chunk, GrainStore grains, double fine, MoveTally tally) {
+    /**
+     * A further fine step: closes one half kick, opens the next, drifts.
+     *
+     * @param halfPast half of the fine step that ends, s
+     * @param next the next fine step, s
+     */
+    static void further(WireChunk chunk, GrainStore grains, double halfPast, double next, MoveTally tally) {
         NearGrains near = chunk.near();
         double[] rows = grains.rows();
-        double half = 0.5 * fine;
+        double halfNext = 0.5 * next;
         for (int k = 0; k < near.count(); k++) {
             int at = GrainRow.at(near.grain(k));
             int f = NearGrains.forceAt(k);
-            GrainMotion.kick(rows, at, near.forces(), f, half);
-            GrainMotion.kick(rows, at, near.forces(), f, half);
-            GrainMotion.drift(rows, at, fine, tally);
+            GrainMotion.kick(rows, at, near.forces(), f, halfPast);
+            GrainMotion.kick(rows, at, near.forces(), f, halfNext);
+            GrainMotion.drift(rows, at, next, tally);
             GrainMotion.clear(near.forces(), f);
         }
     }

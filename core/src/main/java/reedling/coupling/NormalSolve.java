@@ -43,7 +43,6 @@ final class NormalSolve implements RowStage {
         }
         if (!(block.shortestDuration() == Double.POSITIVE_INFINITY)) {
             tally.duration(block.shortestDuration());
-            tally.touch();
         }
     }
 
@@ -57,8 +56,10 @@ final class NormalSolve implements RowStage {
         DoubleVector deepest = DoubleVector.broadcast(Lanes.SPECIES, -DEEPEST);
         DoubleVector work = DoubleVector.fromArray(Lanes.SPECIES, tally.sums(), ContactTally.NORMAL);
         DoubleVector excess = DoubleVector.broadcast(Lanes.SPECIES, Double.NEGATIVE_INFINITY);
+        DoubleVector touched = zero;
         for (int r = 0; r < block.rows(); r += Lanes.TILE) {
             DoubleVector touch = load(c, Column.TOUCH, r);
+            touched = touched.max(touch);
             DoubleVector elastic = load(c, Column.ELASTIC_FORCE, r);
             DoubleVector damping = load(c, Column.DAMPING, r);
             DoubleVector closing = load(c, Column.CLOSING, r);
@@ -84,6 +85,7 @@ final class NormalSolve implements RowStage {
         }
         work.intoArray(tally.sums(), ContactTally.NORMAL);
         tally.excess(excess.reduceLanes(VectorOperators.MAX));
+        tally.touch(touched.reduceLanes(VectorOperators.MAX) > 0);
     }
 
     private static void scalar(ContactBlock block, float[] ledger, int ledgerAt, ContactTally tally) {
@@ -92,10 +94,12 @@ final class NormalSolve implements RowStage {
         double half = 0.5 * block.step();
         double[] sums = tally.sums();
         double excess = Double.NEGATIVE_INFINITY;
+        boolean touched = false;
         for (int r = 0; r < block.rows(); r++) {
             int lane = r & Lanes.TILE - 1;
             int tile = r - lane;
             double touch = c[at(Column.TOUCH) + r];
+            touched |= touch > 0;
             double elastic = c[at(Column.ELASTIC_FORCE) + r];
             double damping = c[at(Column.DAMPING) + r];
             double closing = c[at(Column.CLOSING) + r];
@@ -121,5 +125,6 @@ final class NormalSolve implements RowStage {
             excess = over > excess ? over : excess;
         }
         tally.excess(excess);
+        tally.touch(touched);
     }
 }

@@ -33,6 +33,9 @@ public final class Simulation {
     /** Share of the search margin that one step may use up. */
     private static final double MARGIN_SHARE = 0.2;
 
+    /** Time over which walls and supports show their velocity before the first step, s. */
+    private static final double GLIMPSE = 1e-6;
+
     private static final int MOST_FINE_STEPS = 10_000;
 
     /** Steps between two looks at the structure's own stable step, which tension changes slowly. */
@@ -78,16 +81,24 @@ public final class Simulation {
         traffic = new GrainTraffic(model, interactions, passage, ledger);
     }
 
-    /** Places the first grains and lists all pairs; call once, before the first step of a fresh run. */
+    /**
+     * Places the first grains, sets walls and supports in motion and lists all pairs; call once, before the first step of a
+     * fresh run.
+     */
     public void begin() {
         traffic.bookInitialGrains();
+        for (WallPose pose : interactions.facets().walls()) {
+            pose.restore(-GLIMPSE, 0, GLIMPSE);
+        }
+        model.structure().startWithSupports(0, GLIMPSE);
         structureStep = model.structure().stableStep();
         traffic.release(0, 0);
         search(new boolean[0]);
-        largestSpeed = speedBeforeFirstStep();
+        largestSpeed = fastest();
     }
 
-    private double speedBeforeFirstStep() {
+    /** Largest speed of any grain, wall or node as they are now, m/s. */
+    private double fastest() {
         double largest = 0;
         for (int g = 0; g < model.grains().count(); g++) {
             largest = Math.max(largest, traffic.speed(g));
@@ -117,14 +128,48 @@ public final class Simulation {
             ledger.report(interactions, model.structure(), strain);
         }
 
-        // bend: further fine steps of the structure and the grains near it
-        for (int k = 1; k < fineSteps; k++) {
+        fine = bend(next, fine);
+        closeStep(next, fine);
+    }
+
+    /**
+     * Takes the further fine steps of the structure and the grains near it. What is left of the step is divided anew when a
+     * contact that began, or is about to, needs shorter ones.
+     *
+     * @return length of the last fine step, s
+     */
+    private double bend(double next, double firstFine) {
+        double fine = firstFine;
+        double done = firstFine;
+        int left = fineSteps - 1;
+        while (left > 0) {
             interactions.fineForce(fine, team);
             bookContacts(false);
-            model.structure().poseSupports(k + 1 == fineSteps ? time + next : time + (k + 1) * fine, fine);
-            interactions.fineMove(team);
+            double limit = fineLimit();
+            double coming = fine;
+            if (limit < fine) {
+                int parts = parts(next - done, limit);
+                fineSteps += parts - left;
+                left = parts;
+                coming = (next - done) / parts;
+            }
+            done = left == 1 ? next : done + coming;
+            model.structure().poseSupports(time + done, coming);
+            interactions.fineMove(fine, coming, team);
+            fine = coming;
+            left--;
         }
-        closeStep(next, fine);
+        return fine;
+    }
+
+    /** Number of fine steps no longer than a limit, s, that a time, s, is divided into. */
+    private int parts(double seconds, double limit) {
+        double parts = Math.ceil(seconds / limit);
+        if (!(parts <= MOST_FINE_STEPS)) {
+            throw StateGuard.stop(step, time, "structure", "fine step", limit + " s",
+                    "More than " + MOST_FINE_STEPS + " fine steps would be needed in one step: use larger elements.");
+        }
+        return Math.max(1, (int) parts);
     }
 
     private void bookContacts(boolean coarseToo) {
@@ -147,6 +192,9 @@ public final class Simulation {
             frequencySquared = Math.max(frequencySquared, tally.largestFrequencySquared());
             touching |= tally.touching();
         }
+        if (step % STRUCTURE_EVERY == 0) {
+            structureStep = model.structure().stableStep();
+        }
         double fineLimit = fineLimit();
         for (ContactTally tally : interactions.fine()) {
             touching |= tally.touching();
@@ -164,19 +212,12 @@ public final class Simulation {
                     "A law reported a time that is not positive.");
         }
         double next = control.choose(smallest, touching);
-        fineSteps = (int) Math.min(MOST_FINE_STEPS + 1.0, Math.ceil(next / fineLimit));
-        if (fineSteps > MOST_FINE_STEPS) {
-            throw StateGuard.stop(step, time, "structure", "fine step", fineLimit + " s",
-                    "More than " + MOST_FINE_STEPS + " fine steps would be needed in one step: use larger elements.");
-        }
-        fineSteps = Math.max(1, fineSteps);
+        fineSteps = parts(next, fineLimit);
         return next;
     }
 
+    /** Longest fine step that the structure and its contacts allow, as the last fine pass found them, s. */
     private double fineLimit() {
-        if (step % STRUCTURE_EVERY == 0) {
-            structureStep = model.structure().stableStep();
-        }
         double limit = structureStep;
         double frequencySquared = 0;
         for (ContactTally tally : interactions.fine()) {
@@ -233,6 +274,9 @@ public final class Simulation {
 
     private void searchIfDue() {
         boolean released = traffic.releaseDue(time) && traffic.release(time, pastStep) > 0;
+        if (released) {
+            largestSpeed = Math.max(largestSpeed, fastest()); // new grains may be the fastest
+        }
         boolean used = 2 * (travel + largestSpeed * control.longestNext()) > model.steps().margin();
         if (released || used) {
             search(traffic.leaving(time, pastStep));
@@ -285,7 +329,7 @@ public final class Simulation {
         return pastStep;
     }
 
-    /** Fine steps in the last step. */
+    /** Fine steps in the last step, those of the remainder divided anew included. */
     public int fineSteps() {
         return fineSteps;
     }

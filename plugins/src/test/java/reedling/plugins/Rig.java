@@ -8,6 +8,7 @@ import java.util.Map;
 import reedling.contact.ContactLaw;
 import reedling.contact.LawSet;
 import reedling.contact.Stage;
+import reedling.feed.RainFeed;
 import reedling.field.Field;
 import reedling.material.Material;
 import reedling.material.MaterialPair;
@@ -39,6 +40,8 @@ public final class Rig {
     private final List<Field> fields = new ArrayList<>();
     private final GrainStore grains = new GrainStore();
     private final Map<Stage, ContactLaw> laws = new EnumMap<>(Stage.class);
+    private final List<Model.FeedLine> feeds = new ArrayList<>();
+    private Exits exits = Exits.none();
     private Structure structure = new StructureBuilder().build();
     private int[] materialOfBody = new int[0];
     private int stepsPerContact = 20;
@@ -76,6 +79,22 @@ public final class Rig {
     public Rig wall(Wall wall) {
         walls.add(wall);
         return this;
+    }
+
+    public Rig exits(Exits where) {
+        exits = where;
+        return this;
+    }
+
+    /** Adds a feed of the one lot of the rig. */
+    public Rig feed(RainFeed feed) {
+        feeds.add(new Model.FeedLine(feed, new int[] {0}));
+        return this;
+    }
+
+    /** The materials added so far. */
+    public MaterialTable table() {
+        return new MaterialTable(materials, pairs);
     }
 
     public Rig gravity(double x, double y, double z) {
@@ -124,7 +143,7 @@ public final class Rig {
     }
 
     public Simulation start(WorkerTeam team) {
-        MaterialTable table = new MaterialTable(materials, pairs);
+        MaterialTable table = table();
         Model model = new Model(
                 table,
                 List.of(new Lot("all", 0, new SingleSize(1e-3))),
@@ -134,8 +153,8 @@ public final class Rig {
                 walls,
                 fields,
                 new LawSet(laws, table),
-                List.of(),
-                Exits.none(),
+                feeds,
+                exits,
                 new StepSettings(stepsPerContact, maximumStep, Double.POSITIVE_INFINITY, margin, reportEvery));
         Simulation simulation = new Simulation(model, team);
         simulation.begin();
