@@ -38,7 +38,9 @@ class ElasticWallsTest {
                 Arguments.of("plate", new Rectangle(0.03, 0.02)),
                 Arguments.of("block", new BoxOutside(0.02, 0.025, 0.015)),
                 Arguments.of("tray", new BoxInside(0.022, 0.02, 0.018, Set.of(BoxInside.Face.HIGH_Z))),
-                Arguments.of("sleeve", new BoxInside(0.022, 0.02, 0.018, Set.of(BoxInside.Face.HIGH_Z, BoxInside.Face.LOW_Z))),
+                Arguments.of(
+                        "sleeve",
+                        new BoxInside(0.022, 0.02, 0.018, Set.of(BoxInside.Face.HIGH_Z, BoxInside.Face.LOW_Z))),
                 Arguments.of("roller", new CylinderOutside(0.008, 0.03)),
                 Arguments.of("pipe", new CylinderInside(0.014, 0.03)),
                 Arguments.of("cup", new CylinderInside(0.014, 0.03, true, false)));
@@ -60,7 +62,8 @@ class ElasticWallsTest {
                 name,
                 0,
                 obstacle,
-                Placement.axes(new Vector3d(0.001, -0.0007, 0.0004), new Vector3d(1, 0.3, -0.2), new Vector3d(0.1, 0.2, 1)),
+                Placement.axes(
+                        new Vector3d(0.001, -0.0007, 0.0004), new Vector3d(1, 0.3, -0.2), new Vector3d(0.1, 0.2, 1)),
                 new Still()));
         SplittableRandom random = new SplittableRandom(23);
         try (WorkerTeam team = new WorkerTeam(1)) {
