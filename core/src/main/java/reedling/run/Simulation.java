@@ -218,7 +218,7 @@ public final class Simulation {
                 approach,
                 persistentLimit(frequencySquared),
                 MARGIN_SHARE * model.steps().margin() / largestSpeed,
-                model.steps().drivenPeriod() / PER_PERIOD,
+                drivenLimit(),
                 model.steps().maximum());
         double smallest = limits.smallest();
         if (!(smallest > 0) || !(fineLimit > 0)) {
@@ -228,6 +228,14 @@ public final class Simulation {
         double next = control.choose(smallest, touching);
         fineSteps = parts(next, fineLimit);
         return next;
+    }
+
+    private double drivenLimit() {
+        double limit = model.steps().drivenPeriod() / PER_PERIOD;
+        for (WallPose pose : interactions.facets().walls()) {
+            limit = Math.min(limit, pose.wall().motion().longestStep(time));
+        }
+        return limit;
     }
 
     /** Longest fine step that the structure and its contacts allow, as the last fine pass found them, s. */
