@@ -1,7 +1,11 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.check;
 
+import java.io.IOException;
 import java.util.List;
+import reedling.checkpoint.Persistent;
+import reedling.checkpoint.SectionReader;
+import reedling.checkpoint.SectionWriter;
 import reedling.coupling.ContactTally;
 import reedling.coupling.Interactions;
 import reedling.coupling.MoveTally;
@@ -17,10 +21,10 @@ import reedling.wall.WallPose;
  *
  * <p>Threads: one thread, between phases; sums run in chunk order.
  */
-public final class EnergyLedger {
+public final class EnergyLedger implements Persistent {
 
     private static final int LOAD = 6; // force 3, torque 3
-    private static final int HEAD = 13; // numbers saved before the loads
+    private static final int NUMBERS = 12; // saved beside the loads
 
     /**
      * What the bodies held at the last report, J.
@@ -153,30 +157,36 @@ public final class EnergyLedger {
         return throughput > 0 ? residual / throughput : 0;
     }
 
-    /** Numbers that decide the next reports, for a checkpoint. */
-    public double[] save() {
-        double[] saved = new double[HEAD + oldLoads.length];
-        double[] head = {
-            contactWork, wallWork, brought, taken, start, started ? 1 : 0, residual, throughput, dissipated,
-            holdings.kinetic, holdings.potential, holdings.contacts, holdings.strain
-        };
-        System.arraycopy(head, 0, saved, 0, head.length);
-        System.arraycopy(oldLoads, 0, saved, head.length, oldLoads.length);
-        return saved;
+    @Override
+    public String section() {
+        return "ledger";
     }
 
-    /** Takes numbers that {@link #save} gave. */
-    public void restore(double[] saved) {
+    @Override
+    public void save(SectionWriter out) throws IOException {
+        double[] numbers = {
+            contactWork, wallWork, brought, taken, start, residual, throughput, dissipated,
+            holdings.kinetic, holdings.potential, holdings.contacts, holdings.strain
+        };
+        out.writeBoolean(started);
+        out.writeDoubles(numbers, 0, numbers.length);
+        out.writeDoubles(oldLoads, 0, oldLoads.length);
+    }
+
+    @Override
+    public void restore(SectionReader in) {
+        started = in.readBoolean();
+        double[] saved = new double[NUMBERS];
+        in.readDoubles(saved, 0, NUMBERS);
         contactWork = saved[0];
         wallWork = saved[1];
         brought = saved[2];
         taken = saved[3];
         start = saved[4];
-        started = saved[5] != 0;
-        residual = saved[6];
-        throughput = saved[7];
-        dissipated = saved[8];
-        holdings = new Holdings(saved[9], saved[10], saved[11], saved[12]);
-        System.arraycopy(saved, HEAD, oldLoads, 0, oldLoads.length);
+        residual = saved[5];
+        throughput = saved[6];
+        dissipated = saved[7];
+        holdings = new Holdings(saved[8], saved[9], saved[10], saved[11]);
+        in.readDoubles(oldLoads, 0, oldLoads.length);
     }
 }

@@ -74,8 +74,8 @@ public final class Interactions {
         candidates = new CandidateWatch(laws);
         pairs = new PairForces(laws, materials.pairs().size());
         facets = new WallFacets(walls, startTime);
-        this.walls = new WallContacts(laws, materials, facets);
-        wires = new WireContacts(laws, materials, structure, materialOfBody);
+        this.walls = new WallContacts(grains, laws, materials, facets);
+        wires = new WireContacts(grains, laws, materials, structure, materialOfBody);
         coarseStep = new StepContext(stepsPerContact);
         fineStep = new StepContext(stepsPerContact);
         time = startTime;
@@ -135,13 +135,14 @@ public final class Interactions {
         makeRoom(team.workers());
     }
 
-    /** Makes room for the chunks there are and so many workers. */
-    void makeRoom(int workers) {
+    /** Makes room for the chunks there are and so many workers; after a search or a restored state. */
+    public void makeRoom(int workers) {
         while (coarse.size() < chunkCount()) {
             coarse.add(new ContactTally());
             fine.add(new ContactTally());
             moves.add(new MoveTally());
         }
+        wires.layOut(chunkCount(), workers);
         while (workspaces.size() < workers) {
             workspaces.add(new Workspace());
         }
@@ -301,7 +302,7 @@ public final class Interactions {
     /** Contact rows of grains (first) with wires (second), chunk by chunk. */
     public List<PairSegment> wireRows() {
         List<PairSegment> all = new ArrayList<>();
-        for (int c = 0; c < wires.chunkCount(); c++) {
+        for (int c = 0; c < chunkCount(); c++) {
             for (WireRows rows : wires.chunk(c).rows()) {
                 all.add(rows.segment());
             }

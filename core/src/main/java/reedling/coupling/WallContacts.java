@@ -3,9 +3,13 @@ package reedling.coupling;
 
 import static reedling.contact.ContactBlock.at;
 
+import java.io.IOException;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import reedling.checkpoint.Persistent;
+import reedling.checkpoint.SectionReader;
+import reedling.checkpoint.SectionWriter;
 import reedling.contact.ContactBlock;
 import reedling.contact.ContactKind;
 import reedling.contact.LawSet;
@@ -25,7 +29,7 @@ import reedling.wall.WallPose;
  *
  * <p>Threads: each chunk's rows and sums belong to its task.
  */
-public final class WallContacts {
+public final class WallContacts implements Persistent {
 
     /** Doubles a wall: force 3, torque about the pivot 3. */
     static final int LOAD = 6;
@@ -33,6 +37,7 @@ public final class WallContacts {
     private static final int FACET_LIMIT = 1 << 20; // facets a grain can name
     private static final int FORCE_COLUMN = 12; // force on the second body after the finish stage
 
+    private final GrainStore grains;
     private final LawSet laws;
     private final MaterialTable materials;
     private final WallFacets facets;
@@ -44,7 +49,8 @@ public final class WallContacts {
     private final double[] total;
     private int chunks;
 
-    WallContacts(LawSet laws, MaterialTable materials, WallFacets facets) {
+    WallContacts(GrainStore grains, LawSet laws, MaterialTable materials, WallFacets facets) {
+        this.grains = grains;
         if (facets.count() >= FACET_LIMIT) {
             throw new IllegalArgumentException(facets.count() + " wall facets are more than " + FACET_LIMIT);
         }
@@ -119,18 +125,6 @@ public final class WallContacts {
         double[] wide = row < values.length ? values : Arrays.copyOf(values, Math.max(64, 2 * row));
         wide[row] = value;
         return wide;
-    }
-
-    /** Effective radii of rows read from a checkpoint. */
-    void restoreRadii(int chunk, GrainStore grains) {
-        for (int pair = 0; pair < segments.get(chunk).length; pair++) {
-            PairSegment segment = segments.get(chunk)[pair];
-            for (int row = 0; row < segment.activeCount(); row++) {
-                double radius = grains.radius(segment.first()[row]);
-                double[] kept = radii.get(chunk)[pair];
-                radii.get(chunk)[pair] = keep(kept, row, facets.effectiveRadius(segment.second()[row], radius));
-            }
-        }
     }
 
     void apply(int chunk, GrainStore grains, StepContext step, Workspace workspace, ContactTally tally) {
@@ -234,5 +228,61 @@ public final class WallContacts {
     /** What {@link #sumLoads} gave last, that is in the last step; not to be changed. */
     public double[] lastLoads() {
         return total;
+    }
+
+    @Override
+    public String section() {
+        return "wall contacts";
+    }
+
+    @Override
+    public void save(SectionWriter out) throws IOException {
+        out.writeInt(chunks);
+        for (int chunk = 0; chunk < chunks; chunk++) {
+            for (PairSegment segment : segments.get(chunk)) {
+                int count = segment.activeCount();
+                out.writeInt(count);
+                out.writeInts(segment.first(), 0, count);
+                out.writeInts(segment.second(), 0, count);
+                segment.saveHistory(out);
+            }
+        }
+        for (WallPose pose : facets.walls()) {
+            out.writeDouble(pose.timeBefore());
+            out.writeDouble(pose.time());
+            out.writeDouble(pose.step());
+        }
+    }
+
+    @Override
+    public void restore(SectionReader in) {
+        layOut(in.readInt());
+        for (int chunk = 0; chunk < chunks; chunk++) {
+            for (int pair = 0; pair < segments.get(chunk).length; pair++) {
+                restoreSegment(chunk, pair, in);
+            }
+        }
+        for (WallPose pose : facets.walls()) {
+            double before = in.readDouble();
+            double now = in.readDouble();
+            pose.restore(before, now, in.readDouble());
+        }
+    }
+
+    private void restoreSegment(int chunk, int pair, SectionReader in) {
+        PairSegment segment = segments.get(chunk)[pair];
+        int count = in.readInt();
+        int[] first = new int[count];
+        int[] second = new int[count];
+        in.readInts(first, 0, count);
+        in.readInts(second, 0, count);
+        segment.clear();
+        double[] kept = radii.get(chunk)[pair];
+        for (int k = 0; k < count; k++) {
+            int row = segment.activate(first[k], second[k], grains.ghost());
+            kept = keep(kept, row, facets.effectiveRadius(second[k], grains.radius(first[k])));
+        }
+        radii.get(chunk)[pair] = kept;
+        segment.restoreHistory(in);
     }
 }

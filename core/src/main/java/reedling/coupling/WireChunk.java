@@ -1,7 +1,10 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.coupling;
 
+import java.io.IOException;
 import java.util.Arrays;
+import reedling.checkpoint.SectionReader;
+import reedling.checkpoint.SectionWriter;
 
 /**
  * What one chunk keeps of its grains near wires: the grains, for each the elements it may touch before the next search,
@@ -87,5 +90,61 @@ final class WireChunk {
                 near.grain(nearNumber), wire, nearNumber, lastRow[pair][nearNumber], effectiveRadius, ghost);
         lastRow[pair][nearNumber] = row;
         return row;
+    }
+
+    /** Writes near grains, candidates and rows. */
+    void save(SectionWriter out) throws IOException {
+        out.writeInt(near.count());
+        for (int number = 0; number < near.count(); number++) {
+            out.writeInt(near.grain(number));
+            out.writeInt(candidateEnd(number) - candidateStart(number));
+        }
+        out.writeInts(candidates, 0, candidateCount);
+        for (WireRows one : rows) {
+            one.save(out);
+        }
+    }
+
+    /** Reads what {@link #save} wrote into an opened chunk. */
+    void restore(SectionReader in, int ghost) {
+        int count = in.readInt();
+        int[] grains = new int[count];
+        int[] elements = new int[count];
+        int total = 0;
+        for (int k = 0; k < count; k++) {
+            grains[k] = in.readInt();
+            elements[k] = in.readInt();
+            total += elements[k];
+        }
+        int[] listed = new int[total];
+        in.readInts(listed, 0, total);
+        int next = 0;
+        for (int k = 0; k < count; k++) {
+            beginGrain(grains[k]);
+            for (int e = 0; e < elements[k]; e++) {
+                addCandidate(listed[next++]);
+            }
+        }
+        for (int pair = 0; pair < rows.length; pair++) {
+            restoreRows(pair, in, ghost);
+        }
+    }
+
+    private void restoreRows(int pair, SectionReader in, int ghost) {
+        WireRows into = rows[pair];
+        int count = in.readInt();
+        int[] grain = new int[count];
+        int[] wire = new int[count];
+        int[] number = new int[count];
+        in.readInts(grain, 0, count);
+        in.readInts(wire, 0, count);
+        in.readInts(number, 0, count);
+        for (int k = 0; k < count; k++) {
+            addRow(pair, number[k], wire[k], 0, ghost); // the effective radius stands in the geometry
+        }
+        in.readInts(into.element(), 0, count);
+        in.readLongs(into.seen(), 0, count);
+        in.readDoubles(into.geometry(), 0, WireRows.GEOMETRY * count);
+        into.segment().restoreHistory(in);
     }
 }

@@ -3,8 +3,12 @@ package reedling.coupling;
 
 import static reedling.contact.ContactBlock.at;
 
+import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
+import reedling.checkpoint.Persistent;
+import reedling.checkpoint.SectionReader;
+import reedling.checkpoint.SectionWriter;
 import reedling.contact.ContactBlock;
 import reedling.contact.ContactKind;
 import reedling.contact.LawSet;
@@ -12,6 +16,7 @@ import reedling.material.MaterialTable;
 import reedling.math.Lanes;
 import reedling.math.Tile;
 import reedling.neighbour.Chunk;
+import reedling.neighbour.ChunkLayout;
 import reedling.neighbour.HistoryCarry;
 import reedling.neighbour.NeighbourLists;
 import reedling.neighbour.PairSegment;
@@ -29,11 +34,12 @@ import reedling.structure.Structure;
  *
  * <p>Threads: each chunk's rows belong to its task; nodes add loads of all chunks in chunk order after a barrier.
  */
-public final class WireContacts implements NodalLoads {
+public final class WireContacts implements NodalLoads, Persistent {
 
     private static final int STRIDE = at(1) - at(0);
     private static final int SECOND = 8;
 
+    private final GrainStore grains;
     private final LawSet laws;
     private final MaterialTable materials;
     private final WireElements elements;
@@ -45,7 +51,8 @@ public final class WireContacts implements NodalLoads {
     private long pass;
     private boolean listedAnew;
 
-    WireContacts(LawSet laws, MaterialTable materials, Structure structure, int[] materialOfBody) {
+    WireContacts(GrainStore grains, LawSet laws, MaterialTable materials, Structure structure, int[] materialOfBody) {
+        this.grains = grains;
         this.laws = laws;
         this.materials = materials;
         elements = new WireElements(structure, materialOfBody);
@@ -61,18 +68,6 @@ public final class WireContacts implements NodalLoads {
 
     WireChunk chunk(int number) {
         return pool.get(number);
-    }
-
-    int chunkCount() {
-        return chunks;
-    }
-
-    long pass() {
-        return pass;
-    }
-
-    void pass(long value) {
-        pass = value;
     }
 
     void copyOut(WorkerTeam team) {
@@ -342,6 +337,31 @@ public final class WireContacts implements NodalLoads {
         for (int axis = 0; axis < 3; axis++) {
             force[to + axis] += weight * exports[from + GrainRow.FORCE + axis];
             moment[to + axis] += weight * exports[from + GrainRow.TORQUE + axis];
+        }
+    }
+
+    @Override
+    public String section() {
+        return "wire contacts";
+    }
+
+    @Override
+    public void save(SectionWriter out) throws IOException {
+        out.writeInt(chunks);
+        out.writeLong(pass);
+        for (int c = 0; c < chunks; c++) {
+            pool.get(c).save(out);
+        }
+    }
+
+    @Override
+    public void restore(SectionReader in) {
+        layOut(in.readInt(), touches.size());
+        pass = in.readLong();
+        ChunkLayout layout = ChunkLayout.of(grains.count());
+        for (int c = 0; c < chunks; c++) {
+            pool.get(c).open(layout.from(c), layout.to(c));
+            pool.get(c).restore(in, grains.ghost());
         }
     }
 }

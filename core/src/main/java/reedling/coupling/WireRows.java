@@ -1,7 +1,9 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.coupling;
 
+import java.io.IOException;
 import java.util.Arrays;
+import reedling.checkpoint.SectionWriter;
 import reedling.neighbour.PairSegment;
 
 /**
@@ -82,5 +84,18 @@ final class WireRows {
         element[row] = -1;
         geometry[GEOMETRY * row + EFFECTIVE_RADIUS] = effectiveRadius;
         return row;
+    }
+
+    /** Writes rows, history and geometry. */
+    void save(SectionWriter out) throws IOException {
+        int count = segment.activeCount();
+        out.writeInt(count);
+        out.writeInts(segment.first(), 0, count);
+        out.writeInts(segment.second(), 0, count);
+        out.writeInts(near, 0, count);
+        out.writeInts(element, 0, count);
+        out.writeLongs(seen, 0, count);
+        out.writeDoubles(geometry, 0, GEOMETRY * count);
+        segment.saveHistory(out);
     }
 }

@@ -1,9 +1,11 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.neighbour;
 
+import java.io.IOException;
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.List;
+import reedling.checkpoint.SectionReader;
+import reedling.checkpoint.SectionWriter;
 
 /**
  * A range of grains that one task works on, with the pairs it computes: two segments for each material pair, one for
@@ -85,7 +87,7 @@ public final class Chunk {
     void addCandidate(int segmentNumber, int i, int j, double gap, ChunkLayout layout) {
         PairSegment segment = segments[segmentNumber];
         segment.addCandidate(i, j, gap);
-        if (segment.cross()) {
+        if (segment.cross() && j < layout.grains()) {
             link(segmentNumber, layout.chunkOf(j));
         }
     }
@@ -113,10 +115,33 @@ public final class Chunk {
         }
     }
 
-    /** Links that leave a segment, by target chunk; for checkpoints. */
-    public List<CrossLink> outgoing(int segmentNumber) {
-        List<CrossLink> sorted = new ArrayList<>(outgoing.get(segmentNumber));
-        sorted.sort(Comparator.comparingInt(CrossLink::targetChunk));
-        return sorted;
+    void save(SectionWriter out) throws IOException {
+        for (PairSegment segment : segments) {
+            segment.save(out);
+        }
+    }
+
+    /** Reads pairs into an opened chunk; links follow from the order of the rows. */
+    void restore(SectionReader in, ChunkLayout layout, int ghost) {
+        for (int s = 0; s < segments.length; s++) {
+            int[][] active = readPairs(in);
+            for (int k = 0; k < active[0].length; k++) {
+                activate(s, active[0][k], active[1][k], layout, ghost);
+            }
+            segments[s].restoreHistory(in);
+            int[][] candidates = readPairs(in);
+            for (int k = 0; k < candidates[0].length; k++) {
+                addCandidate(s, candidates[0][k], candidates[1][k], 0, layout);
+            }
+            segments[s].restoreBlocks(in);
+        }
+    }
+
+    private static int[][] readPairs(SectionReader in) {
+        int count = in.readInt();
+        int[][] pairs = new int[2][count];
+        in.readInts(pairs[0], 0, count);
+        in.readInts(pairs[1], 0, count);
+        return pairs;
     }
 }

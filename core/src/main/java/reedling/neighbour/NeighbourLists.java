@@ -1,8 +1,12 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.neighbour;
 
+import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
+import reedling.checkpoint.Persistent;
+import reedling.checkpoint.SectionReader;
+import reedling.checkpoint.SectionWriter;
 import reedling.material.MaterialTable;
 import reedling.parallel.WorkerTeam;
 import reedling.particle.GrainRow;
@@ -15,7 +19,7 @@ import reedling.particle.GrainStore;
  *
  * <p>Threads: a search is called by one thread between steps and uses the team.
  */
-public final class NeighbourLists {
+public final class NeighbourLists implements Persistent {
 
     private final int materialPairs;
     private final int historyColumns;
@@ -116,11 +120,6 @@ public final class NeighbourLists {
         }
     }
 
-    /** Connects the chunks after their pairs were read from a checkpoint. */
-    public void connect() {
-        Chunk.connect(chunks);
-    }
-
     private void list(Chunk chunk, GrainStore grains, double margin, CandidateSort sort) {
         for (int i = chunk.from(); i < chunk.to(); i++) {
             listPairsOf(i, chunk, grains, margin);
@@ -184,5 +183,28 @@ public final class NeighbourLists {
         } else {
             chunk.addCandidate(segmentNumber, i, j, gap, layout);
         }
+    }
+
+    @Override
+    public String section() {
+        return "pairs";
+    }
+
+    @Override
+    public void save(SectionWriter out) throws IOException {
+        out.writeInt(layout.grains());
+        for (Chunk chunk : chunks) {
+            chunk.save(out);
+        }
+    }
+
+    @Override
+    public void restore(SectionReader in) {
+        int grains = in.readInt();
+        layOut(grains);
+        for (Chunk chunk : chunks) {
+            chunk.restore(in, layout, grains); // the first ghost's row is the number of grains
+        }
+        Chunk.connect(chunks);
     }
 }

@@ -1,7 +1,10 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.neighbour;
 
+import java.io.IOException;
 import java.util.Arrays;
+import reedling.checkpoint.SectionReader;
+import reedling.checkpoint.SectionWriter;
 import reedling.math.Lanes;
 
 /**
@@ -33,9 +36,9 @@ public final class PairSegment {
     private int activeCount;
     private int[] first = new int[0];
     private int[] second = new int[0];
-    private double[] history = new double[0];
-    private float[] ledgerHistory = new float[0];
-    private double[] exports = new double[0];
+    private double[] history = new double[PAD];
+    private float[] ledgerHistory = new float[FLOAT_PAD];
+    private double[] exports = new double[PAD];
 
     private int candidateCount;
     private int[] candidateFirst = new int[0];
@@ -216,19 +219,39 @@ public final class PairSegment {
         }
     }
 
-    /** Restores counts read from a checkpoint and makes room; the caller then fills the arrays. */
-    public void restore(int active, int candidates, int ghost) {
-        clear();
-        for (int row = 0; row < active; row++) {
-            activate(ghost, ghost + 1, ghost);
-        }
-        for (int k = 0; k < candidates; k++) {
-            addCandidate(ghost, ghost + 1, 0);
-        }
+    /** Writes active pairs with their history, and candidates. */
+    public void save(SectionWriter out) throws IOException {
+        out.writeInt(activeCount);
+        out.writeInts(first, 0, activeCount);
+        out.writeInts(second, 0, activeCount);
+        saveHistory(out);
+        out.writeInt(candidateCount);
+        out.writeInts(candidateFirst, 0, candidateCount);
+        out.writeInts(candidateSecond, 0, candidateCount);
+        out.writeDoubles(blockGap, 0, candidateBlocks());
+        out.writeDoubles(blockTravel, 0, candidateBlocks());
+    }
+
+    /** Writes the history of the active rows. */
+    public void saveHistory(SectionWriter out) throws IOException {
+        out.writeDoubles(history, historyAt(0), historyAt(paddedCount()));
+        out.writeFloats(ledgerHistory, ledgerAt(0), ledgerAt(paddedCount()));
+    }
+
+    /** Reads the history of the active rows, which must stand already. */
+    public void restoreHistory(SectionReader in) {
+        in.readDoubles(history, historyAt(0), historyAt(paddedCount()));
+        in.readFloats(ledgerHistory, ledgerAt(0), ledgerAt(paddedCount()));
+    }
+
+    /** Reads the bounds of the candidate blocks, whose candidates must stand already. */
+    void restoreBlocks(SectionReader in) {
         int blocks = candidateBlocks();
         if (blocks > blockGap.length) {
             blockGap = new double[blocks];
             blockTravel = new double[blocks];
         }
+        in.readDoubles(blockGap, 0, blocks);
+        in.readDoubles(blockTravel, 0, blocks);
     }
 }

@@ -1,7 +1,11 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.particle;
 
+import java.io.IOException;
 import java.util.Arrays;
+import reedling.checkpoint.Persistent;
+import reedling.checkpoint.SectionReader;
+import reedling.checkpoint.SectionWriter;
 
 /**
  * All grains of a run, in memory order: rows as {@link GrainRow} describes, and beside them material, lot, stable id
@@ -10,7 +14,7 @@ import java.util.Arrays;
  *
  * <p>Threads: between two barriers each grain belongs to one chunk; only that chunk's task writes its rows.
  */
-public final class GrainStore {
+public final class GrainStore implements Persistent {
 
     /** Ghost rows after the last grain. */
     public static final int GHOSTS = 2;
@@ -216,5 +220,34 @@ public final class GrainStore {
         material[to] = material[from];
         lot[to] = lot[from];
         id[to] = id[from];
+    }
+
+    @Override
+    public String section() {
+        return "grains";
+    }
+
+    @Override
+    public void save(SectionWriter out) throws IOException {
+        out.writeInt(count);
+        out.writeLong(nextId);
+        out.writeDoubles(rows, GrainRow.at(0), GrainRow.at(count));
+        out.writeInts(material, 0, count);
+        out.writeInts(lot, 0, count);
+        out.writeLongs(id, 0, count);
+        out.writeDoubles(orientation, 0, 4 * count);
+    }
+
+    @Override
+    public void restore(SectionReader in) {
+        resize(0);
+        resize(in.readInt());
+        nextId = in.readLong();
+        in.readDoubles(rows, GrainRow.at(0), GrainRow.at(count));
+        in.readInts(material, 0, count);
+        in.readInts(lot, 0, count);
+        in.readLongs(id, 0, count);
+        in.readDoubles(orientation, 0, 4 * count);
+        Arrays.fill(forces, 0);
     }
 }

@@ -1,12 +1,17 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.run;
 
+import java.io.IOException;
+import reedling.checkpoint.Persistent;
+import reedling.checkpoint.SectionReader;
+import reedling.checkpoint.SectionWriter;
+
 /**
  * Count and mass of grains by lot, and where they went: fed, and out through each exit (outlets in order, spilled last).
  *
  * <p>Threads: one, between phases.
  */
-public final class Passage {
+public final class Passage implements Persistent {
 
     private final int lots;
     private final long[] fedCount;
@@ -68,24 +73,24 @@ public final class Passage {
         return total;
     }
 
-    long[] counts() {
-        long[] all = new long[fedCount.length + outCount.length];
-        System.arraycopy(fedCount, 0, all, 0, fedCount.length);
-        System.arraycopy(outCount, 0, all, fedCount.length, outCount.length);
-        return all;
+    @Override
+    public String section() {
+        return "passage";
     }
 
-    double[] masses() {
-        double[] all = new double[fedMass.length + outMass.length];
-        System.arraycopy(fedMass, 0, all, 0, fedMass.length);
-        System.arraycopy(outMass, 0, all, fedMass.length, outMass.length);
-        return all;
+    @Override
+    public void save(SectionWriter out) throws IOException {
+        out.writeLongs(fedCount, 0, fedCount.length);
+        out.writeDoubles(fedMass, 0, fedMass.length);
+        out.writeLongs(outCount, 0, outCount.length);
+        out.writeDoubles(outMass, 0, outMass.length);
     }
 
-    void restore(long[] counts, double[] masses) {
-        System.arraycopy(counts, 0, fedCount, 0, fedCount.length);
-        System.arraycopy(counts, fedCount.length, outCount, 0, outCount.length);
-        System.arraycopy(masses, 0, fedMass, 0, fedMass.length);
-        System.arraycopy(masses, fedMass.length, outMass, 0, outMass.length);
+    @Override
+    public void restore(SectionReader in) {
+        in.readLongs(fedCount, 0, fedCount.length);
+        in.readDoubles(fedMass, 0, fedMass.length);
+        in.readLongs(outCount, 0, outCount.length);
+        in.readDoubles(outMass, 0, outMass.length);
     }
 }

@@ -1,8 +1,14 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.run;
 
+import java.io.IOException;
+import java.util.ArrayList;
+import java.util.List;
 import reedling.check.EnergyLedger;
 import reedling.check.StateGuard;
+import reedling.checkpoint.Persistent;
+import reedling.checkpoint.SectionReader;
+import reedling.checkpoint.SectionWriter;
 import reedling.coupling.ContactTally;
 import reedling.coupling.Interactions;
 import reedling.coupling.MoveTally;
@@ -26,6 +32,12 @@ public final class Simulation {
 
     /** A coarse step may take so much of the stability limit of lasting contacts. */
     private static final double COARSE_STABLE = 0.8;
+
+    /**
+     * A contact with a wire takes so many times fewer coarse steps than a contact between grains: its own force is found
+     * on the fine step, but what else pushes the grain reaches it once a coarse step.
+     */
+    private static final double COARSE_SHARE = 4;
 
     /** Steps in the fastest prescribed period. */
     private static final double PER_PERIOD = 100;
@@ -183,6 +195,7 @@ public final class Simulation {
 
     private double chooseStep() {
         double duration = Double.POSITIVE_INFINITY;
+        double wireDuration = Double.POSITIVE_INFINITY;
         double approach = Double.POSITIVE_INFINITY;
         double frequencySquared = moveFrequencySquared;
         boolean touching = false;
@@ -198,13 +211,14 @@ public final class Simulation {
         double fineLimit = fineLimit();
         for (ContactTally tally : interactions.fine()) {
             touching |= tally.touching();
+            wireDuration = Math.min(wireDuration, tally.shortestDuration());
         }
         limits = new StepLimits(
-                duration / model.steps().stepsPerContact(),
+                Math.min(duration, COARSE_SHARE * wireDuration) / model.steps().stepsPerContact(),
                 approach,
                 persistentLimit(frequencySquared),
                 MARGIN_SHARE * model.steps().margin() / largestSpeed,
-                model.steps().drivenPeriod() / PER_PERIOD,
+                drivenLimit(),
                 model.steps().maximum());
         double smallest = limits.smallest();
         if (!(smallest > 0) || !(fineLimit > 0)) {
@@ -214,6 +228,14 @@ public final class Simulation {
         double next = control.choose(smallest, touching);
         fineSteps = parts(next, fineLimit);
         return next;
+    }
+
+    private double drivenLimit() {
+        double limit = model.steps().drivenPeriod() / PER_PERIOD;
+        for (WallPose pose : interactions.facets().walls()) {
+            limit = Math.min(limit, pose.wall().motion().longestStep(time));
+        }
+        return limit;
     }
 
     /** Longest fine step that the structure and its contacts allow, as the last fine pass found them, s. */
@@ -354,29 +376,59 @@ public final class Simulation {
         return team;
     }
 
-    /** Numbers of the step loop that decide the next bits, for a checkpoint. */
-    double[] saveClock() {
-        return new double[] {
-            time, pastStep, pastFine, travel, largestSpeed, moveFrequencySquared, structureStep, fineSteps
-        };
+    /** Everything that decides the next bits, in the order in which it is restored. */
+    public List<Persistent> persistents() {
+        List<Persistent> owners = new ArrayList<>(List.of(
+                model.grains(),
+                interactions.lists(),
+                interactions.walls(),
+                interactions.wires(),
+                new StructureSection(model.structure()),
+                control,
+                ledger,
+                passage));
+        for (Model.FeedLine line : model.feeds()) {
+            owners.add(new FeedSection(line.feed()));
+        }
+        owners.add(new StepClock());
+        return owners;
     }
 
-    long[] saveCounts() {
-        return new long[] {step, searches, grainSteps};
-    }
+    /** Numbers of the step loop itself; restored last, when chunks and walls stand. */
+    private final class StepClock implements Persistent {
 
-    void restore(double[] clock, long[] counts) {
-        time = clock[0];
-        pastStep = clock[1];
-        pastFine = clock[2];
-        travel = clock[3];
-        largestSpeed = clock[4];
-        moveFrequencySquared = clock[5];
-        structureStep = clock[6];
-        fineSteps = (int) clock[7];
-        step = counts[0];
-        searches = counts[1];
-        grainSteps = counts[2];
+        @Override
+        public String section() {
+            return "step";
+        }
+
+        @Override
+        public void save(SectionWriter out) throws IOException {
+            double[] clock = {time, pastStep, pastFine, travel, largestSpeed, moveFrequencySquared, structureStep};
+            out.writeLong(step);
+            out.writeLong(searches);
+            out.writeLong(grainSteps);
+            out.writeInt(fineSteps);
+            out.writeDoubles(clock, 0, clock.length);
+            out.writeDouble(traffic.nextRelease());
+        }
+
+        @Override
+        public void restore(SectionReader in) {
+            step = in.readLong();
+            searches = in.readLong();
+            grainSteps = in.readLong();
+            fineSteps = in.readInt();
+            time = in.readDouble();
+            pastStep = in.readDouble();
+            pastFine = in.readDouble();
+            travel = in.readDouble();
+            largestSpeed = in.readDouble();
+            moveFrequencySquared = in.readDouble();
+            structureStep = in.readDouble();
+            traffic.nextRelease(in.readDouble());
+            interactions.makeRoom(team.workers());
+        }
     }
 
     GrainTraffic traffic() {

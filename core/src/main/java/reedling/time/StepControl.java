@@ -1,6 +1,10 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.time;
 
+import java.io.IOException;
+import reedling.checkpoint.Persistent;
+import reedling.checkpoint.SectionReader;
+import reedling.checkpoint.SectionWriter;
 import reedling.math.StepLadder;
 
 /**
@@ -10,7 +14,7 @@ import reedling.math.StepLadder;
  *
  * <p>Threads: one thread, between phases.
  */
-public final class StepControl {
+public final class StepControl implements Persistent {
 
     private static final double RISE = 1.02 * StepLadder.RATIO;
     private static final double LARGEST_GROWTH = 2;
@@ -71,15 +75,22 @@ public final class StepControl {
         return step;
     }
 
-    /** Numbers that decide the next choices, for a checkpoint. */
-    public double[] save() {
-        return new double[] {rung, permitting, step};
+    @Override
+    public String section() {
+        return "step control";
     }
 
-    /** Takes numbers that {@link #save} gave. */
-    public void restore(double[] saved) {
-        rung = saved[0];
-        permitting = (int) saved[1];
-        step = saved[2];
+    @Override
+    public void save(SectionWriter out) throws IOException {
+        out.writeDouble(rung);
+        out.writeInt(permitting);
+        out.writeDouble(step);
+    }
+
+    @Override
+    public void restore(SectionReader in) {
+        rung = in.readDouble();
+        permitting = in.readInt();
+        step = in.readDouble();
     }
 }

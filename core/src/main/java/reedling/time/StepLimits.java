@@ -8,7 +8,7 @@ package reedling.time;
  * @param approach bodies about to touch
  * @param persistent contacts that last, by their frequency
  * @param margin the search margin: no body may use up more than a fifth of it in one step
- * @param driven the fastest prescribed motion
+ * @param driven the fastest prescribed motion, or one that starts or stops
  * @param maximum the case's own
  */
 public record StepLimits(

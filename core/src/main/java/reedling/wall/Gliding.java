@@ -23,6 +23,11 @@ public record Gliding(Vector3dc velocity, Timing timing) implements Motion {
     }
 
     @Override
+    public double longestStep(double time) {
+        return timing.longestStep(time);
+    }
+
+    @Override
     public void pose(double time, Pose out) {
         double elapsed = timing.elapsed(time);
         out.reset();

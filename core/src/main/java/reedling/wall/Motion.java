@@ -16,4 +16,12 @@ public sealed interface Motion permits Still, Gliding, Turning, Oscillating {
      * @param out filled; owned by the caller
      */
     void pose(double time, Pose out);
+
+    /**
+     * Longest step from {@code time} (s) in which the velocity does not change unforeseen, s: bodies near a wall look ahead
+     * with the velocity of the step before.
+     */
+    default double longestStep(double time) {
+        return Double.POSITIVE_INFINITY;
+    }
 }

@@ -45,6 +45,11 @@ public record Oscillating(Stroke first, Stroke second, double frequency, Timing 
     }
 
     @Override
+    public double longestStep(double time) {
+        return timing.longestStep(time);
+    }
+
+    @Override
     public void pose(double time, Pose out) {
         double strength = timing.strength(time);
         double periods = frequency * (time - timing.origin());

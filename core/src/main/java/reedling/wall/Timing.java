@@ -21,6 +21,11 @@ import reedling.error.RangeCheck;
  */
 public record Timing(double start, double stop, double ramp) {
 
+    /** Steps that show the speed of a motion which switches at once, s: a wall moves a fraction of a micrometre in them. */
+    private static final double INSTANT = 1e-7;
+
+    private static final double STEPS_IN_A_RAMP = 50;
+
     private static final Timing ALWAYS = new Timing(Double.NEGATIVE_INFINITY, Double.POSITIVE_INFINITY, 0);
 
     public Timing {
@@ -78,6 +83,22 @@ public record Timing(double start, double stop, double ramp) {
         double seen = Math.min(time, stop);
         double rise = stepIntegral(seen - start);
         return stop == Double.POSITIVE_INFINITY ? rise : rise - stepIntegral(seen - (stop - ramp));
+    }
+
+    /**
+     * Longest step from a time, s, that does not run past a change of strength before anybody could see it: a step ends
+     * where a change begins, those inside are short.
+     */
+    public double longestStep(double time) {
+        return Math.min(untilChange(start - time), untilChange(stop - ramp - time));
+    }
+
+    private double untilChange(double left) {
+        double inside = Math.max(INSTANT, ramp / STEPS_IN_A_RAMP);
+        if (left > inside) {
+            return left;
+        }
+        return left > -ramp - 2 * inside ? inside : Double.POSITIVE_INFINITY;
     }
 
     private double step(double since) {

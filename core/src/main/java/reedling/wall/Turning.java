@@ -30,6 +30,11 @@ public record Turning(Vector3dc point, Vector3dc axis, double speed, Timing timi
     }
 
     @Override
+    public double longestStep(double time) {
+        return timing.longestStep(time);
+    }
+
+    @Override
     public void pose(double time, Pose out) {
         double halfTurns = speed * timing.elapsed(time) / (4 * Math.PI);
         double sine = Circle.sine(halfTurns);

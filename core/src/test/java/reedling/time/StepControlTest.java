@@ -57,17 +57,4 @@ class StepControlTest {
         }
         assertThat(control.choose(RUNG * 2, true)).isGreaterThan(RUNG);
     }
-
-    @Test
-    void savedNumbersContinueTheSameChoices() {
-        control.choose(RUNG * 1.1, true);
-        for (int k = 0; k < 7; k++) {
-            control.choose(RUNG * 2, true);
-        }
-        StepControl resumed = new StepControl(N, 1e-3);
-        resumed.restore(control.save());
-        for (int k = 0; k < 30; k++) {
-            assertThat(resumed.choose(RUNG * 2, true)).isEqualTo(control.choose(RUNG * 2, true));
-        }
-    }
 }

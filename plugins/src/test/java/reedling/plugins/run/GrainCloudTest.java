@@ -92,4 +92,25 @@ class GrainCloudTest {
             return run.ledger().relativeResidual();
         }
     }
+
+    /** Friction and rolling resistance alone, no dashpot: what they took never comes back. */
+    @ParameterizedTest
+    @Tag("conservation")
+    @ValueSource(longs = {1, 2})
+    void dissipationNeverFalls(long seed) {
+        Rig rig = cloud(seed, 1).stepsPerContact(40);
+        try (WorkerTeam team = new WorkerTeam(1)) {
+            Simulation run = rig.start(team);
+            double before = 0;
+            double fallen = 0;
+            while (run.time() < 4e-3) {
+                run.step();
+                double now = run.ledger().dissipated();
+                fallen += Math.max(0, before - now);
+                before = now;
+            }
+            assertThat(before).isGreaterThan(0.05 * run.ledger().throughput());
+            assertThat(fallen).isLessThan(1e-9 * before);
+        }
+    }
 }

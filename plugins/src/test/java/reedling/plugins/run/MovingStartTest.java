@@ -8,6 +8,8 @@ import java.util.Map;
 import org.joml.Vector3d;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import reedling.material.Material;
 import reedling.parallel.WorkerTeam;
 import reedling.plugins.Rig;
@@ -54,6 +56,31 @@ class MovingStartTest {
             }
             assertThat(rig.velocity(grain)[0]).isCloseTo(4, within(4e-4));
             assertThat(run.ledger().wallWork()).isCloseTo(0.5 * rig.grains().mass(0) * 16, within(1e-3 * 4e-3));
+        }
+    }
+
+    /** A wall that starts at once, or in a few microseconds, while nothing limits the step: same throw as above. */
+    @ParameterizedTest
+    @Tag("reference")
+    @CsvSource({"0, 0", "0.0051, 0", "0.0203, 1e-5", "0.0203, 1e-3"})
+    void wallThatStartsAtOnceIsSeenComing(double start, double ramp) {
+        Rig rig = new Rig()
+                .material(new Material("grain", 2500, 1e8, 0.3), 1, 0, 0)
+                .margin(5e-3)
+                .stepsPerContact(40);
+        rig.wall(new Wall(
+                "ram",
+                0,
+                new HalfSpace(),
+                Placement.facing(new Vector3d(), new Vector3d(1, 0, 0)),
+                new Gliding(new Vector3d(2, 0, 0), Timing.from(start, ramp))));
+        long grain = rig.grain(0, 0.004, new double[] {0.0053, 0, 0}, new double[3], new double[3]);
+        try (WorkerTeam team = new WorkerTeam(1)) {
+            Simulation run = rig.start(team);
+            while (run.time() < start + 3e-3) {
+                run.step();
+            }
+            assertThat(rig.velocity(grain)[0]).isCloseTo(4, within(4e-4));
         }
     }
 

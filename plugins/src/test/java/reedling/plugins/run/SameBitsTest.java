@@ -63,7 +63,6 @@ class SameBitsTest {
                         Path.of(System.getProperty("java.home"), "bin", "java").toString(),
                         "--add-modules",
                         "jdk.incubator.vector",
-                        "-XX:ObjectAlignmentInBytes=64",
                         "-XX:+UseSerialGC",
                         "-Dreedling.lanes=" + lanes,
                         "-cp",
