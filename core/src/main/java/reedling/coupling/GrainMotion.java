@@ -2,6 +2,8 @@
 package reedling.coupling;
 
 import java.util.List;
+import jdk.incubator.vector.DoubleVector;
+import reedling.math.Lanes;
 import reedling.neighbour.Chunk;
 import reedling.neighbour.CrossLink;
 import reedling.neighbour.PairSegment;
@@ -32,9 +34,7 @@ final class GrainMotion {
             for (int r = 0; r < link.count(); r++) {
                 int from = PairSegment.PAD + 8 * rows[r];
                 int to = GrainRow.forceAt(second[rows[r]]);
-                for (int c = 0; c < GrainRow.FORCE_LENGTH; c++) {
-                    forces[to + c] += exports[from + c];
-                }
+                addRow(exports, from, forces, to);
             }
         }
     }
@@ -118,9 +118,24 @@ final class GrainMotion {
         tally.frequencySquared(Math.max(translation, rotation) * rows[at + GrainRow.INVERSE_MASS]);
     }
 
+    private static void addRow(double[] from, int fromAt, double[] to, int toAt) {
+        if (Lanes.VECTORISED) {
+            DoubleVector sum = DoubleVector.fromArray(Lanes.SPECIES, to, toAt);
+            sum.add(DoubleVector.fromArray(Lanes.SPECIES, from, fromAt)).intoArray(to, toAt);
+        } else {
+            for (int c = 0; c < GrainRow.FORCE_LENGTH; c++) {
+                to[toAt + c] += from[fromAt + c];
+            }
+        }
+    }
+
     static void clear(double[] forces, int f) {
-        for (int c = 0; c < GrainRow.FORCE_LENGTH; c++) {
-            forces[f + c] = 0;
+        if (Lanes.VECTORISED) {
+            DoubleVector.zero(Lanes.SPECIES).intoArray(forces, f);
+        } else {
+            for (int c = 0; c < GrainRow.FORCE_LENGTH; c++) {
+                forces[f + c] = 0;
+            }
         }
     }
 
