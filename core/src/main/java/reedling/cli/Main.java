@@ -22,12 +22,23 @@ public final class Main {
     /** Runs one command and ends the program with its exit code. */
     public static void main(String[] arguments) {
         StandardError.restore();
+        Ending ending = new Ending();
+        int code = commandLine(new FaultRecord(Path.of("")), ending).execute(arguments);
+        ending.reached(code);
         // The one call of System.exit: a program can hand its exit code to the shell in no other way.
-        System.exit(commandLine(new FaultRecord(Path.of(""))).execute(arguments));
+        System.exit(code);
     }
 
+    /** All commands, for a program that no signal ends. */
     static CommandLine commandLine(FaultRecord faultRecord) {
+        return commandLine(faultRecord, Ending.NONE);
+    }
+
+    private static CommandLine commandLine(FaultRecord faultRecord, Ending ending) {
         CommandLine commandLine = new CommandLine(new Main());
+        commandLine.addSubcommand(new RunCommand(ending));
+        commandLine.addSubcommand(new ResumeCommand(ending));
+        commandLine.addSubcommand(new CheckCommand());
         ServiceLoader.load(SubCommand.class).forEach(commandLine::addSubcommand);
         commandLine.setCaseInsensitiveEnumValuesAllowed(true);
         setUsageExitCode(commandLine);

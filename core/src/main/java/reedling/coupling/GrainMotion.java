@@ -123,4 +123,35 @@ final class GrainMotion {
             forces[f + c] = 0;
         }
     }
+
+    /**
+     * Turns the orientations of a chunk's grains by their spin over a time (s), q' = exp(t w / 2) q. A sphere's orientation
+     * pushes nothing, it is only looked at; so it is advanced now and then.
+     */
+    static void turn(Chunk chunk, GrainStore grains, double time) {
+        double[] rows = grains.rows();
+        double[] q = grains.orientation();
+        for (int g = chunk.from(); g < chunk.to(); g++) {
+            int at = GrainRow.at(g) + GrainRow.W;
+            double x = 0.5 * time * rows[at], y = 0.5 * time * rows[at + 1], z = 0.5 * time * rows[at + 2];
+            double half = Math.sqrt(x * x + y * y + z * z);
+            double c = StrictMath.cos(half);
+            double s = half > 0 ? StrictMath.sin(half) / half : 1;
+            compose(q, 4 * g, c, s * x, s * y, s * z);
+        }
+    }
+
+    /** Sets q' = (w, x, y, z) q, kept at length 1. */
+    private static void compose(double[] q, int at, double w, double x, double y, double z) {
+        double a = q[at], b = q[at + 1], c = q[at + 2], d = q[at + 3];
+        double newW = w * a - x * b - y * c - z * d;
+        double newX = w * b + x * a + y * d - z * c;
+        double newY = w * c - x * d + y * a + z * b;
+        double newZ = w * d + x * c - y * b + z * a;
+        double scale = 1 / Math.sqrt(newW * newW + newX * newX + newY * newY + newZ * newZ);
+        q[at] = scale * newW;
+        q[at + 1] = scale * newX;
+        q[at + 2] = scale * newY;
+        q[at + 3] = scale * newZ;
+    }
 }
