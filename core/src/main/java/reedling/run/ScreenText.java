@@ -5,6 +5,7 @@ import static reedling.run.PlainText.format;
 
 import java.util.OptionalDouble;
 import reedling.probe.Estimate;
+import reedling.probe.LogHistogram;
 import reedling.probe.MeasuredWindow;
 
 /** The five figures a screen is judged by, in words. */
@@ -42,9 +43,38 @@ record ScreenText(RunResult result, ScreenFigures figures) {
                 result.trust().contributors().isEmpty()
                         ? UNKNOWN
                         : result.trust().contributors().getFirst());
+        wires(text);
+    }
+
+    /** What the wires did and what that means for near-size grains. */
+    private void wires(PlainText text) {
+        LogHistogram changes = result.probes().deck().orElseThrow().opening().changes();
+        if (rigid()) {
+            text.line("The wires are rigid, so no gap can open: a grain close to a gap's width wedges there and stays "
+                    + "until something lifts it. Let them bend to see how many of these the wires would let go.");
+        } else {
+            text.line(format(
+                    "The wires bend, so gaps breathe: of all places and moments one in two is off its width by %.2g mm "
+                            + "or more, one in ten by %.2g mm. Near-size grains then work through or are lifted out "
+                            + "instead of staying pegged, and the cut moves up. Compare with rigid = true.",
+                    1e3 * changes.percentile(0.5), 1e3 * changes.percentile(0.9)));
+        }
+    }
+
+    private boolean rigid() {
+        for (int body : result.plan().screen().orElseThrow().bodies()) {
+            if (!result.simulation().model().structure().bodies().get(body).rigid()) {
+                return false;
+            }
+        }
+        return true;
     }
 
     private void stress(PlainText text, OptionalDouble allowable) {
+        if (rigid()) {
+            text.entry("4 worst stress range", "none: the wires are rigid");
+            return;
+        }
         Estimate range = figures.stressRange();
         if (Double.isNaN(range.value())) {
             text.entry("4 worst stress range", UNKNOWN);
