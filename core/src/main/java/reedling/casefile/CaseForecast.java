@@ -16,7 +16,7 @@ import reedling.unit.Dimension;
 public final class CaseForecast {
 
     /** Wall-clock time of each of two timed trials, s. */
-    private static final double TRIAL = 1;
+    private static final double TRIAL = 1.5;
 
     /** Solid fraction at which the loaded trial fills the regions that feeds rain from. */
     private static final double LOADED = 0.25;
@@ -58,7 +58,7 @@ public final class CaseForecast {
         if (!specification.lots().isEmpty()) {
             impacts.writeTo(text);
         }
-        steps(impacts.shortest(), fall.fastest(), feeds, threads);
+        steps(impacts, fall.fastest(), feeds, threads);
         assembly.reading().cautions().forEach(caution -> text.caution(caution.toString()));
         text.heading(text.cautions() == 0 ? "No cautions." : text.cautions() + " cautions.");
         return text.toString();
@@ -74,52 +74,53 @@ public final class CaseForecast {
         return new Position(sum[0], sum[1], sum[2]);
     }
 
-    private void steps(double contact, double speed, FeedFigures feeds, int threads) {
+    /** Contacts of grains with grains and walls bound the step, those with wires the fine step of the structure. */
+    private void steps(ImpactFigures impacts, double speed, FeedFigures feeds, int threads) {
         int parts = assembly.model().steps().stepsPerContact();
+        double contact = impacts.shortest(ContactKind.GRAIN_GRAIN, ContactKind.GRAIN_WALL) / parts;
+        double onWire = impacts.shortest(ContactKind.GRAIN_WIRE) / parts;
+        double stable = assembly.model().structure().stableStep();
         double longest = Math.min(assembly.model().steps().maximum(), assembly.model().steps().drivenPeriod() / 100);
-        double step = Math.min(contact / parts, longest);
-        double fine = assembly.model().structure().stableStep();
-        double end = specification.output().endTime();
-        double count = end / step;
+        double step = Math.min(contact, longest);
         text.heading("Steps");
+        text.entry("longest", time(longest) + " (maximum, and 1/100 of the shortest period)");
         if (contact < Double.POSITIVE_INFINITY) {
-            text.entry(
-                    "contact",
-                    "impact at " + ForecastText.figure(speed, Dimension.SPEED) + " lasts " + time(contact) + "; 1/"
-                            + parts + " of it is " + time(contact / parts));
+            text.entry("contact", time(contact) + ": 1/" + parts + " of an impact at "
+                    + ForecastText.figure(speed, Dimension.SPEED));
         }
-        if (fine < Double.POSITIVE_INFINITY) {
-            text.entry("structure", "stable up to " + time(fine) + ", " + (int) Math.ceil(step / fine)
-                    + " fine steps in a step");
+        if (stable < Double.POSITIVE_INFINITY) {
+            double fine = Math.min(stable, onWire);
+            text.entry("structure", "stable up to " + time(stable) + ", contact on wires " + time(onWire) + ": "
+                    + (int) Math.ceil(step / fine) + " fine steps in a step, at most");
         }
-        text.entry("in all", "about " + ForecastText.number(count) + " steps to " + time(end));
+        double end = specification.output().endTime();
+        text.entry("in all", "at most about " + ForecastText.number(end / step) + " steps to " + time(end));
         text.entry(
                 "memory",
                 "about " + ForecastText.number((BASE_MEMORY + GRAIN_MEMORY * feeds.total()) / 1e6) + " MB at most");
-        wallTime(count, feeds, threads);
+        wallTime(step, feeds, threads);
     }
 
-    private void wallTime(double count, FeedFigures feeds, int threads) {
+    private void wallTime(double shortest, FeedFigures feeds, int threads) {
         double end = specification.output().endTime();
         double present = specification.outlets().isEmpty() ? feeds.total() : Math.min(feeds.total(), feeds.rate());
         present = Math.max(present, assembly.model().grains().count());
         try (WorkerTeam team = new WorkerTeam(threads)) {
             Trial plain = Trial.run(assembly.model(), team, TRIAL, end);
-            double perGrain = plain.grains() > 0 ? plain.perStep() / plain.grains() : 0;
-            double base = 0;
-            Optional<CaseAssembly> loaded = loaded();
-            if (loaded.isPresent()) {
-                Trial full = Trial.run(loaded.get().model(), team, TRIAL, end);
-                double more = full.grains() - plain.grains();
-                perGrain = more > 0 ? Math.max(0, full.perStep() - plain.perStep()) / more : 0;
-                base = plain.perStep() - perGrain * plain.grains();
-            }
-            double wall = count * Math.max(plain.perStep(), base + perGrain * present);
+            Optional<CaseAssembly> crowd = loaded();
+            Trial loaded = crowd.isEmpty() ? plain : Trial.run(crowd.get().model(), team, TRIAL, end);
+            double more = loaded.grains() - plain.grains();
+            double perGrain = more > 0
+                    ? Math.max(0, loaded.perStep() - plain.perStep()) / more
+                    : plain.perStep() / Math.max(1, plain.grains());
+            double step = Math.max(shortest, Math.min(plain.step(), loaded.step()));
+            double wall =
+                    end / step * Math.max(plain.perStep(), loaded.perStep() + perGrain * (present - loaded.grains()));
             text.entry(
                     "wall-clock time",
-                    "roughly " + ForecastText.duration(wall) + " on " + threads + " threads with "
-                            + ForecastText.number(present) + " grains present; a guess within a factor of three, from"
-                            + " trials of " + (int) TRIAL + " s");
+                    "very roughly " + ForecastText.duration(wall) + " on " + threads + " threads with "
+                            + ForecastText.number(present) + " grains present; from trials of a second or two with "
+                            + ForecastText.number(loaded.grains()) + " grains, wrong by a factor of three or so");
         } catch (ReedlingException stopped) {
             stopped.findings().forEach(finding -> text.caution("the trial was stopped: " + finding));
         }

@@ -13,8 +13,8 @@ import reedling.unit.Dimension;
 /** How softly grains of each lot meet each other, walls and wires at the fastest impact. */
 final class ImpactFigures {
 
-    /** Largest overlap over radius that passes without a word. */
-    private static final double DEEP = 0.05;
+    /** Largest overlap over radius that passes without a word; without damping and at the fastest impact. */
+    private static final double DEEP = 0.1;
 
     /** Largest overlap on wires over the difference of grain and gap. */
     private static final double TRAP = 0.1;
@@ -37,12 +37,7 @@ final class ImpactFigures {
         this.speed = speed;
     }
 
-    /** Shortest duration of an impact as the normal law tells it, s; infinite without grains. */
-    double shortest() {
-        return shortest(ContactKind.values());
-    }
-
-    /** The same for contacts of some kinds. */
+    /** Shortest duration of an impact of some kinds as the normal law tells it, s; infinite if there is none. */
     double shortest(ContactKind... kinds) {
         double shortest = Double.POSITIVE_INFINITY;
         for (LotSpecification lot : specification.lots().values()) {
