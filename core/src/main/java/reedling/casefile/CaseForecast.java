@@ -80,18 +80,22 @@ public final class CaseForecast {
         double contact = impacts.shortest(ContactKind.GRAIN_GRAIN, ContactKind.GRAIN_WALL) / parts;
         double onWire = impacts.shortest(ContactKind.GRAIN_WIRE) / parts;
         double stable = assembly.model().structure().stableStep();
-        double longest = Math.min(assembly.model().steps().maximum(), assembly.model().steps().drivenPeriod() / 100);
+        double longest = Math.min(
+                assembly.model().steps().maximum(), assembly.model().steps().drivenPeriod() / 100);
         double step = Math.min(contact, longest);
         text.heading("Steps");
         text.entry("longest", time(longest) + " (maximum, and 1/100 of the shortest period)");
         if (contact < Double.POSITIVE_INFINITY) {
-            text.entry("contact", time(contact) + ": 1/" + parts + " of an impact at "
-                    + ForecastText.figure(speed, Dimension.SPEED));
+            text.entry(
+                    "contact",
+                    time(contact) + ": 1/" + parts + " of an impact at " + ForecastText.figure(speed, Dimension.SPEED));
         }
         if (stable < Double.POSITIVE_INFINITY) {
             double fine = Math.min(stable, onWire);
-            text.entry("structure", "stable up to " + time(stable) + ", contact on wires " + time(onWire) + ": "
-                    + (int) Math.ceil(step / fine) + " fine steps in a step, at most");
+            text.entry(
+                    "structure",
+                    "stable up to " + time(stable) + ", contact on wires " + time(onWire) + ": "
+                            + (int) Math.ceil(step / fine) + " fine steps in a step, at most");
         }
         double end = specification.output().endTime();
         text.entry("in all", "at most about " + ForecastText.number(end / step) + " steps to " + time(end));

@@ -24,8 +24,23 @@ public final class CaseReading {
     CaseReading withFeeds(Map<String, FeedSpecification> feeds) {
         CaseSpecification s = specification;
         CaseSpecification other = new CaseSpecification(
-                s.title(), s.notes(), s.seed(), s.materials(), s.pairs(), s.lots(), feeds, s.walls(), s.motions(),
-                s.wires(), s.outlets(), s.bounds(), s.screen(), s.laws(), s.fields(), s.steps(), s.output());
+                s.title(),
+                s.notes(),
+                s.seed(),
+                s.materials(),
+                s.pairs(),
+                s.lots(),
+                feeds,
+                s.walls(),
+                s.motions(),
+                s.wires(),
+                s.outlets(),
+                s.bounds(),
+                s.screen(),
+                s.laws(),
+                s.fields(),
+                s.steps(),
+                s.output());
         return new CaseReading(other, cautions, resolvedText, places);
     }
 

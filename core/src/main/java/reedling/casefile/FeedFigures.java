@@ -34,7 +34,8 @@ final class FeedFigures {
             Rain rain = line.feed().plan();
             text.entry(
                     "feed " + rain.name(),
-                    number(rain, rain.rate().perSecond()) + " grains/s, " + mass(rain, rain.rate().perSecond()) + "/s");
+                    number(rain, rain.rate().perSecond()) + " grains/s, "
+                            + mass(rain, rain.rate().perSecond()) + "/s");
             count += count(rain, rain.rate().owed(end));
             mass += kilograms(rain, rain.rate().owed(end));
         }
@@ -65,8 +66,8 @@ final class FeedFigures {
         double end = specification.output().endTime();
         return model.grains().count()
                 + model.feeds().stream()
-                        .mapToDouble(line ->
-                                count(line.feed().plan(), line.feed().plan().rate().owed(end)))
+                        .mapToDouble(line -> count(
+                                line.feed().plan(), line.feed().plan().rate().owed(end)))
                         .sum();
     }
 

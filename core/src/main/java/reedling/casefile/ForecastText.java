@@ -63,7 +63,8 @@ final class ForecastText {
 
     static String number(double value) {
         if (Math.abs(value) >= 1000 && Math.abs(value) < 1e15) {
-            return String.format(Locale.ROOT, "%,d", new BigDecimal(value).round(DIGITS).longValue());
+            return String.format(
+                    Locale.ROOT, "%,d", new BigDecimal(value).round(DIGITS).longValue());
         }
         return figure(value, Dimension.NUMBER);
     }
@@ -71,9 +72,7 @@ final class ForecastText {
     static String duration(double seconds) {
         return seconds < 120
                 ? figure(seconds, Dimension.TIME)
-                : seconds < 7200
-                        ? number(seconds / 60) + " min"
-                        : number(seconds / 3600) + " h";
+                : seconds < 7200 ? number(seconds / 60) + " min" : number(seconds / 3600) + " h";
     }
 
     @Override

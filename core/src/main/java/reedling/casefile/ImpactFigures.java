@@ -80,7 +80,12 @@ final class ImpactFigures {
 
     private void onWire(LotSpecification lot, double radius, WireSpecification wire, ForecastText text) {
         Impact impact = impact(
-                lot, radius, new Partner(ContactKind.GRAIN_WIRE, wire.material(), 0.5 * wire.section().outerDiameter()));
+                lot,
+                radius,
+                new Partner(
+                        ContactKind.GRAIN_WIRE,
+                        wire.material(),
+                        0.5 * wire.section().outerDiameter()));
         CrossSection section = WireParts.one(wire, 0, specification.materials().get(wire.material()), -1)
                 .section();
         double bending = specification.materials().get(wire.material()).youngsModulus() * section.secondMoment2();
@@ -112,12 +117,21 @@ final class ImpactFigures {
 
     private List<Partner> partners() {
         List<Partner> partners = new ArrayList<>();
-        specification.lots().values().forEach(lot -> partners.add(
-                new Partner(ContactKind.GRAIN_GRAIN, lot.material(), 0)));
-        specification.walls().values().forEach(wall -> partners.add(
-                new Partner(ContactKind.GRAIN_WALL, wall.material(), 0)));
-        specification.wires().values().forEach(wire -> partners.add(
-                new Partner(ContactKind.GRAIN_WIRE, wire.material(), 0.5 * wire.section().outerDiameter())));
+        specification
+                .lots()
+                .values()
+                .forEach(lot -> partners.add(new Partner(ContactKind.GRAIN_GRAIN, lot.material(), 0)));
+        specification
+                .walls()
+                .values()
+                .forEach(wall -> partners.add(new Partner(ContactKind.GRAIN_WALL, wall.material(), 0)));
+        specification
+                .wires()
+                .values()
+                .forEach(wire -> partners.add(new Partner(
+                        ContactKind.GRAIN_WIRE,
+                        wire.material(),
+                        0.5 * wire.section().outerDiameter())));
         return partners.stream().distinct().toList();
     }
 

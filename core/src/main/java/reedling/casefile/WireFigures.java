@@ -50,9 +50,7 @@ final class WireFigures {
         String gap = wire.count() > 1
                 ? ", gap " + length(wire.spacing() - wire.section().outerDiameter())
                 : "";
-        text.entry(
-                wire.name(),
-                wire.count() + " of " + length(wire.length()) + gap + (wire.rigid() ? ", rigid" : ""));
+        text.entry(wire.name(), wire.count() + " of " + length(wire.length()) + gap + (wire.rigid() ? ", rigid" : ""));
         if (!wire.rigid()) {
             bending(wire, contact);
         }
@@ -75,8 +73,7 @@ final class WireFigures {
         double element = wire.elementLength();
         double flexural = Math.sqrt(contact * wave);
         text.entry(
-                "  element length",
-                length(element) + "; flexural length sqrt(T c_b) of an impact " + length(flexural));
+                "  element length", length(element) + "; flexural length sqrt(T c_b) of an impact " + length(flexural));
         if (element > COARSEST * flexural) {
             text.caution("elements of " + wire.name() + " above " + COARSEST + " of the flexural length look too heavy"
                     + " to an impact: " + (int) Math.ceil(wire.length() / (COARSEST * flexural)) + " elements would do,"
@@ -93,8 +90,8 @@ final class WireFigures {
         double layer = Math.sqrt(bendingStiffness / wire.tension());
         text.entry("  layer at the clamps", "sqrt(EI/T) = " + length(layer));
         if (wire.elementLength() > layer / 2) {
-            text.caution("elements of " + wire.name() + " are longer than half of the layer at the clamps: bending stress"
-                    + " there comes out too low.");
+            text.caution("elements of " + wire.name()
+                    + " are longer than half of the layer at the clamps: bending stress" + " there comes out too low.");
         }
     }
 
@@ -148,9 +145,11 @@ final class WireFigures {
             Vector3d normal = new Vector3d(wire.end()).sub(wire.start()).cross(wire.pitch());
             if (normal.length() > 0) {
                 normal.normalize();
-                double across = Math.abs(new Vector3d(harmonic.direction()).normalize().dot(normal));
+                double across =
+                        Math.abs(new Vector3d(harmonic.direction()).normalize().dot(normal));
                 index = ", throw index "
-                        + ForecastText.number(acceleration * across / Math.abs(fall.gravity().dot(normal)));
+                        + ForecastText.number(
+                                acceleration * across / Math.abs(fall.gravity().dot(normal)));
             }
             text.entry(
                     "  drive",
