@@ -4,6 +4,7 @@ package reedling.casefile;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import org.joml.Vector3d;
 import reedling.material.Material;
 import reedling.unit.Dimension;
@@ -73,7 +74,7 @@ final class FeedChecks {
         }
         double side = shortestSide(block.region());
         double largest = block.shares().keySet().stream()
-                .mapToDouble(lot -> draft.lots.get(lot).diameter().largest())
+                .mapToDouble(lot -> Objects.requireNonNull(draft.lots.get(lot)).diameter().largest())
                 .max()
                 .orElse(0);
         if (side < largest) {
@@ -111,7 +112,7 @@ final class FeedChecks {
         double volume = 0;
         double number = 0;
         for (Map.Entry<String, Double> share : shares.entrySet()) {
-            LotSpecification lot = draft.lots.get(share.getKey());
+            LotSpecification lot = Objects.requireNonNull(draft.lots.get(share.getKey()));
             Material material = draft.materials.get(lot.material());
             double grain = Math.PI / 6 * Math.pow(lot.diameter().typical(), 3);
             double part = share.getValue() / (material == null ? 1 : material.density());

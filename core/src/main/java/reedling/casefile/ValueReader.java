@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import org.joml.Vector3d;
 
@@ -113,7 +114,7 @@ final class ValueReader {
         }
         Key wordKey = Key.required(variants.wordKey(), choice, "Which of the variants.");
         return names.choice(word, words, inner)
-                .map(name -> section(table, variants.sections().get(name).after(List.of(wordKey)), path));
+                .map(name -> section(table, Objects.requireNonNull(variants.sections().get(name)).after(List.of(wordKey)), path));
     }
 
     private Map<String, Object> named(Node.Table table, ValueType.Named type, String path) {

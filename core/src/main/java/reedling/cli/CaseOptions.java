@@ -49,8 +49,9 @@ final class CaseOptions {
         Path file = file().toAbsolutePath().normalize();
         String name = String.valueOf(file.getFileName());
         Path folder = file.getParent();
-        if (name.equals(CASE_FILE) && folder != null && folder.getFileName() != null) {
-            return folder.getFileName().toString();
+        Path folderName = folder == null ? null : folder.getFileName();
+        if (name.equals(CASE_FILE) && folderName != null) {
+            return folderName.toString();
         }
         return name.endsWith(".toml") ? name.substring(0, name.length() - ".toml".length()) : name;
     }

@@ -2,6 +2,8 @@
 package reedling.coupling;
 
 import java.util.List;
+import jdk.incubator.vector.DoubleVector;
+import reedling.math.Lanes;
 import reedling.neighbour.Chunk;
 import reedling.neighbour.CrossLink;
 import reedling.neighbour.PairSegment;
@@ -32,9 +34,7 @@ final class GrainMotion {
             for (int r = 0; r < link.count(); r++) {
                 int from = PairSegment.PAD + 8 * rows[r];
                 int to = GrainRow.forceAt(second[rows[r]]);
-                for (int c = 0; c < GrainRow.FORCE_LENGTH; c++) {
-                    forces[to + c] += exports[from + c];
-                }
+                addRow(exports, from, forces, to);
             }
         }
     }
@@ -118,9 +118,55 @@ final class GrainMotion {
         tally.frequencySquared(Math.max(translation, rotation) * rows[at + GrainRow.INVERSE_MASS]);
     }
 
-    static void clear(double[] forces, int f) {
-        for (int c = 0; c < GrainRow.FORCE_LENGTH; c++) {
-            forces[f + c] = 0;
+    private static void addRow(double[] from, int fromAt, double[] to, int toAt) {
+        if (Lanes.VECTORISED) {
+            DoubleVector sum = DoubleVector.fromArray(Lanes.SPECIES, to, toAt);
+            sum.add(DoubleVector.fromArray(Lanes.SPECIES, from, fromAt)).intoArray(to, toAt);
+        } else {
+            for (int c = 0; c < GrainRow.FORCE_LENGTH; c++) {
+                to[toAt + c] += from[fromAt + c];
+            }
         }
+    }
+
+    static void clear(double[] forces, int f) {
+        if (Lanes.VECTORISED) {
+            DoubleVector.zero(Lanes.SPECIES).intoArray(forces, f);
+        } else {
+            for (int c = 0; c < GrainRow.FORCE_LENGTH; c++) {
+                forces[f + c] = 0;
+            }
+        }
+    }
+
+    /**
+     * Turns the orientations of a chunk's grains by their spin over a time (s), q' = exp(t w / 2) q. A sphere's orientation
+     * pushes nothing, it is only looked at; so it is advanced now and then.
+     */
+    static void turn(Chunk chunk, GrainStore grains, double time) {
+        double[] rows = grains.rows();
+        double[] q = grains.orientation();
+        for (int g = chunk.from(); g < chunk.to(); g++) {
+            int at = GrainRow.at(g) + GrainRow.W;
+            double x = 0.5 * time * rows[at], y = 0.5 * time * rows[at + 1], z = 0.5 * time * rows[at + 2];
+            double half = Math.sqrt(x * x + y * y + z * z);
+            double c = StrictMath.cos(half);
+            double s = half > 0 ? StrictMath.sin(half) / half : 1;
+            compose(q, 4 * g, c, s * x, s * y, s * z);
+        }
+    }
+
+    /** Sets q' = (w, x, y, z) q, kept at length 1. */
+    private static void compose(double[] q, int at, double w, double x, double y, double z) {
+        double a = q[at], b = q[at + 1], c = q[at + 2], d = q[at + 3];
+        double newW = w * a - x * b - y * c - z * d;
+        double newX = w * b + x * a + y * d - z * c;
+        double newY = w * c - x * d + y * a + z * b;
+        double newZ = w * d + x * c - y * b + z * a;
+        double scale = 1 / Math.sqrt(newW * newW + newX * newX + newY * newY + newZ * newZ);
+        q[at] = scale * newW;
+        q[at + 1] = scale * newX;
+        q[at + 2] = scale * newY;
+        q[at + 3] = scale * newZ;
     }
 }

@@ -51,6 +51,7 @@ public final class Interactions {
     private double nextCoarse;
     private double nextFine;
     private boolean energyDue;
+    private double turning;
 
     /**
      * @param materialOfBody material number of each body of the structure
@@ -227,11 +228,13 @@ public final class Interactions {
     /**
      * Closes the past step and opens the next; the supports must stand at the end of the first fine step.
      *
+     * @param turnTime time over which orientations are turned now, s; 0 for not now
      * @param past the step that led here
      * @param coarseNext the next coarse step, s
      * @param fineNext its fine step, s
      */
-    public void move(PastStep past, double coarseNext, double fineNext, WorkerTeam team) {
+    public void move(double turnTime, PastStep past, double coarseNext, double fineNext, WorkerTeam team) {
+        turning = turnTime;
         coarseStep.pastStep(past.coarse());
         pastFine = past.fine();
         nextCoarse = coarseNext;
@@ -248,6 +251,9 @@ public final class Interactions {
         MoveTally tally = moves.get(task);
         WireChunk near = wires.chunk(task);
         tally.clear();
+        if (turning > 0) {
+            GrainMotion.turn(chunk, grains, turning);
+        }
         GrainMotion.importForces(chunk, grains);
         GrainMotion.move(
                 chunk, grains, 0.5 * coarseStep.pastStep(), nextCoarse, energyDue, near.near(), tally);

@@ -11,7 +11,7 @@ public final class GrainRow {
     /** Doubles a grain. */
     public static final int LENGTH = 16;
 
-    /** Doubles before the first row: with 64-byte object alignment and a 16-byte array header, rows start on a line. */
+    /** Doubles before the first row: behind a 16-byte header rows start on a line where the array itself does. */
     public static final int PAD = 6;
 
     /** Centre, m. */

@@ -66,7 +66,7 @@ public record Partition(double[] diameter, long[] passed, long[] over) {
 
     private static double crossing(double[] part, double[] middle) {
         for (int k = 0; k < part.length; k++) {
-            if (part[k] == 0.5) {
+            if (Double.compare(part[k], 0.5) == 0) {
                 return middle[k];
             }
             if (k > 0 && part[k - 1] < 0.5 && part[k] > 0.5) {

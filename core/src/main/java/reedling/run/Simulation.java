@@ -50,6 +50,9 @@ public final class Simulation {
 
     private static final int MOST_FINE_STEPS = 10_000;
 
+    /** Steps between two turns of the orientations. */
+    private static final int TURN_EVERY = 32;
+
     /** Steps between two looks at the structure's own stable step, which tension changes slowly. */
     private static final int STRUCTURE_EVERY = 16;
 
@@ -66,6 +69,7 @@ public final class Simulation {
     private double pastStep;
     private double pastFine;
     private double travel;
+    private double turned;
     private double largestSpeed;
     private double moveFrequencySquared;
     private double structureStep = Double.POSITIVE_INFINITY;
@@ -135,7 +139,7 @@ public final class Simulation {
 
         // move; the supports stand at the end of the first fine step
         model.structure().poseSupports(fineSteps == 1 ? time + next : time + fine, fine);
-        interactions.move(past, next, fine, team);
+        interactions.move(turnTime(), past, next, fine, team);
         if (report) {
             ledger.report(interactions, model.structure(), strain);
         }
@@ -191,6 +195,16 @@ public final class Simulation {
         }
         StateGuard.contacts(interactions.fine(), interactions.lists().chunks(), model.grains(), step, time);
         ledger.contacts(interactions.fine());
+    }
+
+    /** Time since orientations were turned last when it is time again, s; else 0. */
+    private double turnTime() {
+        if (step % TURN_EVERY != 0) {
+            return 0;
+        }
+        double since = time - turned;
+        turned = time;
+        return since;
     }
 
     private double chooseStep() {
@@ -404,7 +418,7 @@ public final class Simulation {
 
         @Override
         public void save(SectionWriter out) throws IOException {
-            double[] clock = {time, pastStep, pastFine, travel, largestSpeed, moveFrequencySquared, structureStep};
+            double[] clock = {time, pastStep, pastFine, travel, largestSpeed, moveFrequencySquared, structureStep, turned};
             out.writeLong(step);
             out.writeLong(searches);
             out.writeLong(grainSteps);
@@ -426,6 +440,7 @@ public final class Simulation {
             largestSpeed = in.readDouble();
             moveFrequencySquared = in.readDouble();
             structureStep = in.readDouble();
+            turned = in.readDouble();
             traffic.nextRelease(in.readDouble());
             interactions.makeRoom(team.workers());
         }

@@ -5,13 +5,10 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
+import java.util.Arrays;
 import java.util.EnumSet;
-import net.jqwik.api.Arbitraries;
-import net.jqwik.api.Arbitrary;
-import net.jqwik.api.ForAll;
-import net.jqwik.api.Property;
-import net.jqwik.api.Provide;
-import net.jqwik.api.constraints.DoubleRange;
+import java.util.List;
+import java.util.SplittableRandom;
 import org.junit.jupiter.api.Test;
 import reedling.error.ReedlingException;
 
@@ -21,60 +18,41 @@ class SurfaceTest {
     private final double[] normal = new double[3];
     private final double[] second = new double[3];
 
-    @Provide
-    Arbitrary<Surface> surfaces() {
-        return Arbitraries.of(
-                new HalfSpace(),
-                new Rectangle(0.3, 0.2),
-                new BoxInside(0.3, 0.2, 0.4, EnumSet.noneOf(BoxInside.Face.class)),
-                new BoxInside(0.3, 0.2, 0.4, OPEN_TOP),
-                new BoxInside(0.3, 0.2, 0.4, EnumSet.of(BoxInside.Face.LOW_X, BoxInside.Face.HIGH_Z)),
-                new BoxOutside(0.3, 0.2, 0.4),
-                new CylinderInside(0.15, 0.4),
-                new CylinderInside(0.15, 0.4, true, false),
-                new CylinderInside(0.15, 0.4, true, true),
-                new CylinderOutside(0.15, 0.4));
+    private static final List<Surface> SURFACES = List.of(
+            new HalfSpace(),
+            new Rectangle(0.3, 0.2),
+            new BoxInside(0.3, 0.2, 0.4, EnumSet.noneOf(BoxInside.Face.class)),
+            new BoxInside(0.3, 0.2, 0.4, OPEN_TOP),
+            new BoxInside(0.3, 0.2, 0.4, EnumSet.of(BoxInside.Face.LOW_X, BoxInside.Face.HIGH_Z)),
+            new BoxOutside(0.3, 0.2, 0.4),
+            new CylinderInside(0.15, 0.4),
+            new CylinderInside(0.15, 0.4, true, false),
+            new CylinderInside(0.15, 0.4, true, true),
+            new CylinderOutside(0.15, 0.4));
+
+    /** Centres, faces, rims and the ends of the range: chance alone never meets them. */
+    private static final double[] SPECIAL = {-0.4, -0.2, -0.15, -0.1, 0, 0.1, 0.15, 0.2, 0.4};
+
+    private static final int POINTS = 2_000;
+
+    @Test
+    void normalIsUnitAndLeadsToThePointOfZeroGap() {
+        everywhere((surface, p, random) -> {
+            for (int facet = 0; facet < surface.facets(); facet++) {
+                normalLeadsToZeroGap(surface, facet, p[0], p[1], p[2]);
+            }
+        });
     }
 
-    @Property
-    void normalIsUnitAndLeadsToThePointOfZeroGap(
-            @ForAll("surfaces") Surface surface,
-            @ForAll @DoubleRange(min = -0.4, max = 0.4) double x,
-            @ForAll @DoubleRange(min = -0.4, max = 0.4) double y,
-            @ForAll @DoubleRange(min = -0.4, max = 0.4) double z) {
-        for (int facet = 0; facet < surface.facets(); facet++) {
-            double gap = surface.gap(facet, x, y, z, normal);
-            assertThat(Math.hypot(Math.hypot(normal[0], normal[1]), normal[2])).isEqualTo(1, within(1e-14));
-            if (gap == Double.POSITIVE_INFINITY) {
-                continue;
-            }
-            // at half the way the gap is halved and the normal is the same; at the end it vanishes
-            double half = step(surface, facet, x, y, z, 0.5 * gap);
-            assertThat(half).isEqualTo(0.5 * gap, within(1e-13));
-            if (Math.abs(gap) > 1e-3) {
-                assertThat(second).containsExactly(normal, within(1e-9));
-            }
-            // rounding may put the end just past an edge that another facet stands for
-            double end = step(surface, facet, x, y, z, gap);
-            boolean handedOver = end == Double.POSITIVE_INFINITY;
-            double endX = x + gap * normal[0];
-            double endY = y + gap * normal[1];
-            double endZ = z + gap * normal[2];
-            assertThat(handedOver ? nearest(surface, endX, endY, endZ) : end).isEqualTo(0, within(1e-13));
-        }
-    }
-
-    @Property
-    void nearestGapChangesNoFasterThanThePointMoves(
-            @ForAll("surfaces") Surface surface,
-            @ForAll @DoubleRange(min = -0.4, max = 0.4) double x,
-            @ForAll @DoubleRange(min = -0.4, max = 0.4) double y,
-            @ForAll @DoubleRange(min = -0.4, max = 0.4) double z,
-            @ForAll @DoubleRange(min = -0.01, max = 0.01) double move) {
+    @Test
+    void nearestGapChangesNoFasterThanThePointMoves() {
         // holds across rims and edges too: a jump there would be a jump in force
-        double before = nearest(surface, x, y, z);
-        double after = nearest(surface, x + move, y - move, z + move);
-        assertThat(Math.abs(after - before)).isLessThanOrEqualTo(Math.sqrt(3) * Math.abs(move) + 1e-14);
+        everywhere((surface, p, random) -> {
+            double move = random.nextDouble(-0.01, 0.01);
+            double before = nearest(surface, p[0], p[1], p[2]);
+            double after = nearest(surface, p[0] + move, p[1] - move, p[2] + move);
+            assertThat(Math.abs(after - before)).isLessThanOrEqualTo(Math.sqrt(3) * Math.abs(move) + 1e-14);
+        });
     }
 
     @Test
@@ -173,6 +151,49 @@ class SurfaceTest {
         assertThatThrownBy(() -> new BoxInside(1, 1, 1, all)).hasMessageContaining("open");
     }
 
+    /** One property at many points around every surface; a failure names the seed, which alone gives the same point again. */
+    private void everywhere(Property property) {
+        for (int k = 0; k < SURFACES.size(); k++) {
+            for (long seed = 1; seed <= POINTS; seed++) {
+                SplittableRandom random = new SplittableRandom(seed);
+                double[] p = {coordinate(random), coordinate(random), coordinate(random)};
+                try {
+                    property.check(SURFACES.get(k), p, random);
+                } catch (AssertionError e) {
+                    throw new AssertionError(
+                            "surface %d %s, seed %d, point %s: %s"
+                                    .formatted(k, SURFACES.get(k), seed, Arrays.toString(p), e.getMessage()),
+                            e);
+                }
+            }
+        }
+    }
+
+    private static double coordinate(SplittableRandom random) {
+        return random.nextInt(4) == 0 ? SPECIAL[random.nextInt(SPECIAL.length)] : random.nextDouble(-0.4, 0.4);
+    }
+
+    private void normalLeadsToZeroGap(Surface surface, int facet, double x, double y, double z) {
+        double gap = surface.gap(facet, x, y, z, normal);
+        assertThat(Math.hypot(Math.hypot(normal[0], normal[1]), normal[2])).isEqualTo(1, within(1e-14));
+        if (gap == Double.POSITIVE_INFINITY) {
+            return;
+        }
+        // at half the way the gap is halved and the normal is the same; at the end it vanishes
+        double half = step(surface, facet, x, y, z, 0.5 * gap);
+        assertThat(half).isEqualTo(0.5 * gap, within(1e-13));
+        if (Math.abs(gap) > 1e-3) {
+            assertThat(second).containsExactly(normal, within(1e-9));
+        }
+        // rounding may put the end just past an edge that another facet stands for
+        double end = step(surface, facet, x, y, z, gap);
+        boolean handedOver = end == Double.POSITIVE_INFINITY;
+        double endX = x + gap * normal[0];
+        double endY = y + gap * normal[1];
+        double endZ = z + gap * normal[2];
+        assertThat(handedOver ? nearest(surface, endX, endY, endZ) : end).isEqualTo(0, within(1e-13));
+    }
+
     private double step(Surface surface, int facet, double x, double y, double z, double way) {
         return surface.gap(facet, x + way * normal[0], y + way * normal[1], z + way * normal[2], second);
     }
@@ -184,5 +205,9 @@ class SurfaceTest {
             least = Math.min(least, gap);
         }
         return least;
+    }
+
+    private interface Property {
+        void check(Surface surface, double[] point, SplittableRandom random);
     }
 }
