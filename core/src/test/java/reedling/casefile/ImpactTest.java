@@ -27,7 +27,11 @@ class ImpactTest {
     void stiffnessIsTheSlopeOfHertzForce() {
         double overlap = 2e-5;
         double step = 1e-9;
-        double slope = 4.0 / 3 * 3e7 * Math.sqrt(2e-3) * (Math.pow(overlap + step, 1.5) - Math.pow(overlap - step, 1.5))
+        double slope = 4.0
+                / 3
+                * 3e7
+                * Math.sqrt(2e-3)
+                * (Math.pow(overlap + step, 1.5) - Math.pow(overlap - step, 1.5))
                 / (2 * step);
         assertThat(IMPACT.stiffness(overlap)).isCloseTo(slope, Percentage.withPercentage(1e-5));
     }
