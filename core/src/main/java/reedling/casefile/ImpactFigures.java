@@ -7,7 +7,6 @@ import reedling.contact.ContactKind;
 import reedling.material.MaterialPair;
 import reedling.material.MaterialTable;
 import reedling.run.Model;
-import reedling.structure.CrossSection;
 import reedling.unit.Dimension;
 
 /** How softly grains of each lot meet each other, walls and wires at the fastest impact. */
@@ -86,9 +85,8 @@ final class ImpactFigures {
                         ContactKind.GRAIN_WIRE,
                         wire.material(),
                         0.5 * wire.section().outerDiameter()));
-        CrossSection section = WireParts.one(wire, 0, specification.materials().get(wire.material()), -1)
-                .section();
-        double bending = specification.materials().get(wire.material()).youngsModulus() * section.secondMoment2();
+        var one = WireParts.first(specification, wire);
+        double bending = one.material().youngsModulus() * one.section().secondMoment2();
         if (!wire.rigid()) {
             double ratio = impact.stiffness(TYPICAL * radius) / WireFigures.lateralStiffness(wire, bending);
             text.entry(

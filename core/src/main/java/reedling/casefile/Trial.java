@@ -35,7 +35,7 @@ record Trial(double perStep, double step, double grains) {
             }
             double each = 1e-9 * (System.nanoTime() - started) / Math.max(1, simulation.stepCount() - steps);
             boolean warm = System.nanoTime() - begun > 1e9 * WARM_UP * seconds;
-            if (each < best && warm || best == Double.POSITIVE_INFINITY) {
+            if (each < best && warm || Double.isInfinite(best)) {
                 best = each;
                 grains = model.grains().count();
             }

@@ -5,7 +5,6 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import org.joml.Vector3d;
 import reedling.structure.CrossSection;
-import reedling.structure.WireEnds;
 import reedling.structure.WireMesh;
 import reedling.unit.Dimension;
 
@@ -58,7 +57,7 @@ final class WireFigures {
     }
 
     private void bending(WireSpecification wire, double contact) {
-        var one = WireParts.one(wire, 0, specification.materials().get(wire.material()), WireEnds.AT_REST);
+        var one = WireParts.first(specification, wire);
         CrossSection section = one.section();
         double bendingStiffness = one.material().youngsModulus() * section.secondMoment2();
         double wave = Math.sqrt(bendingStiffness / (one.material().density() * section.area()));
