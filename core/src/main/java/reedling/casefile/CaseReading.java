@@ -2,6 +2,7 @@
 package reedling.casefile;
 
 import java.util.List;
+import java.util.Map;
 import reedling.error.Finding;
 
 /** A case that was read without error. Immutable. */
@@ -17,6 +18,30 @@ public final class CaseReading {
         this.cautions = List.copyOf(cautions);
         this.resolvedText = resolvedText;
         this.places = places;
+    }
+
+    /** The same case with other feeds, for a trial. */
+    CaseReading withFeeds(Map<String, FeedSpecification> feeds) {
+        CaseSpecification s = specification;
+        CaseSpecification other = new CaseSpecification(
+                s.title(),
+                s.notes(),
+                s.seed(),
+                s.materials(),
+                s.pairs(),
+                s.lots(),
+                feeds,
+                s.walls(),
+                s.motions(),
+                s.wires(),
+                s.outlets(),
+                s.bounds(),
+                s.screen(),
+                s.laws(),
+                s.fields(),
+                s.steps(),
+                s.output());
+        return new CaseReading(other, cautions, resolvedText, places);
     }
 
     public CaseSpecification specification() {

@@ -44,14 +44,17 @@ final class PartFaults {
     /** The place of the key whose words a finding uses, or of the part if there is none. */
     private void add(String path, Finding finding) {
         String key = path + "." + finding.what().replace(' ', '_');
-        String what = finding.what().isEmpty() ? path : path + ", " + finding.what();
-        findings.add(new Finding(reading.where(key), what, finding.got(), finding.expected(), finding.remedy()));
+        boolean written = !reading.where(key).equals(reading.where(path));
+        String words = finding.what().isEmpty() ? path : path + ", " + finding.what();
+        findings.add(new Finding(
+                reading.where(key), written ? key : words, finding.got(), finding.expected(), finding.remedy()));
     }
 
     /** Throws everything collected, if there is anything. */
     void finish() {
         if (!findings.isEmpty()) {
-            throw new ReedlingException(ExitCode.CASE, findings.stream().distinct().toList());
+            throw new ReedlingException(
+                    ExitCode.CASE, findings.stream().distinct().toList());
         }
     }
 }

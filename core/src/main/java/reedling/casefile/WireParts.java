@@ -1,9 +1,11 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.casefile;
 
+import java.util.Arrays;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import java.util.Objects;
 import org.joml.Vector3d;
 import org.joml.Vector3dc;
 import reedling.material.Material;
@@ -66,7 +68,7 @@ final class WireParts {
     private Row row(WireSpecification wire, MaterialTable table, ElementType type) {
         int first = materialOfBody.length;
         int material = table.indexOf(wire.material());
-        materialOfBody = java.util.Arrays.copyOf(materialOfBody, first + wire.count());
+        materialOfBody = Arrays.copyOf(materialOfBody, first + wire.count());
         for (int k = 0; k < wire.count(); k++) {
             materialOfBody[first + k] = material;
             WireMesh.add(builder, one(wire, k, table.materials().get(material), motion(wire)), type);
@@ -84,7 +86,8 @@ final class WireParts {
     }
 
     /** One wire of a row as the structure wants it. */
-    static reedling.structure.WireSpecification one(WireSpecification wire, int number, Material material, int motion) {
+    private static reedling.structure.WireSpecification one(
+            WireSpecification wire, int number, Material material, int motion) {
         Vector3d shift = new Vector3d(wire.pitch()).mul(number);
         WireEnds ends = new WireEnds(
                 position(wire.start(), shift),
@@ -103,6 +106,12 @@ final class WireParts {
                 wire.element().name(),
                 wire.element().parameters().values(),
                 wire.rigid());
+    }
+
+    /** The first wire of a row, its supports at rest: for figures of a single wire. */
+    static reedling.structure.WireSpecification first(CaseSpecification specification, WireSpecification wire) {
+        Material material = Objects.requireNonNull(specification.materials().get(wire.material()));
+        return one(wire, 0, material, WireEnds.AT_REST);
     }
 
     private static CrossSection section(WireSection section) {

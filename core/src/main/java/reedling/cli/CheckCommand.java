@@ -8,6 +8,7 @@ import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Spec;
 import reedling.casefile.CaseAssembly;
+import reedling.casefile.CaseForecast;
 import reedling.casefile.CasePlugins;
 import reedling.casefile.CaseReading;
 import reedling.error.ExitCode;
@@ -31,10 +32,10 @@ final class CheckCommand implements Callable<Integer> {
     public Integer call() {
         PluginCatalogue plugins = caseOptions.plugins();
         CaseReading reading = caseOptions.read(plugins);
-        CaseAssembly.make(reading, new CasePlugins(plugins));
+        CasePlugins available = new CasePlugins(plugins);
+        CaseAssembly assembly = CaseAssembly.make(reading, available);
         PrintWriter out = spec.commandLine().getOut();
-        out.println(reading.specification().title());
-        reading.cautions().forEach(caution -> out.println("caution: " + caution));
+        out.print(CaseForecast.of(assembly, available, Runtime.getRuntime().availableProcessors()));
         out.flush();
         return ExitCode.OK.number();
     }

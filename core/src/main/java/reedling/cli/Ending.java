@@ -39,9 +39,8 @@ class Ending {
     private static void takeBack(Thread unused) {
         try {
             Runtime.getRuntime().removeShutdownHook(unused);
-        } catch (IllegalStateException tooLate) {
-            // a signal came just now: the hook is about to end the program with the code it was given
-            Thread.onSpinWait();
+        } catch (IllegalStateException signalCameJustNow) {
+            return; // the hook ends the program with the code it was given
         }
     }
 
