@@ -81,18 +81,22 @@ final class FeedParts {
         for (int k = 0; k < seeds.size(); k++) {
             double density = table.materials().get(seeds.material(k)).density();
             int g = grains.add(
-                    seeds.x(k), seeds.y(k), seeds.z(k), seeds.radius(k), density, seeds.material(k),
+                    seeds.x(k),
+                    seeds.y(k),
+                    seeds.z(k),
+                    seeds.radius(k),
+                    density,
+                    seeds.material(k),
                     numbers[seeds.lot(k)]);
             grains.velocity(g, seeds.velocityX(k), seeds.velocityY(k), seeds.velocityZ(k));
         }
     }
 
     private Rain rain(FeedSpecification.Stream stream, LotMix mix) {
-        reedling.feed.Region region =
-                switch (stream.region()) {
-                    case BoxRegion box -> box(box);
-                    case DiscRegion disc -> new reedling.feed.DiscRegion(disc.centre(), disc.normal(), disc.radius());
-                };
+        reedling.feed.Region region = switch (stream.region()) {
+            case BoxRegion box -> box(box);
+            case DiscRegion disc -> new reedling.feed.DiscRegion(disc.centre(), disc.normal(), disc.radius());
+        };
         return new Rain(
                 stream.name(), mix, region, rate(stream), new Launch(stream.velocity(), stream.jitter(), TRIES));
     }

@@ -30,12 +30,17 @@ record LawParts(Map<Stage, ContactLaw> byStage, List<Field> fields, Map<String, 
         parts.law(Stage.ROLLING, "laws.rolling", specification.laws().rolling(), reading, plugins, faults);
         specification.fields().forEach((name, choice) -> {
             String path = "fields." + name;
-            faults.make(path, () -> plugins.field(choice.name(), reading.where(path))
-                            .create(choice.parameters()))
+            faults.make(
+                            path,
+                            () -> plugins.field(choice.name(), reading.where(path))
+                                    .create(choice.parameters()))
                     .ifPresent(parts.fields::add);
             parts.plugins.put(choice.name(), 0);
         });
-        specification.wires().values().forEach(wire -> parts.plugins.put(wire.element().name(), 0));
+        specification
+                .wires()
+                .values()
+                .forEach(wire -> parts.plugins.put(wire.element().name(), 0));
         return parts;
     }
 
@@ -46,7 +51,9 @@ record LawParts(Map<Stage, ContactLaw> byStage, List<Field> fields, Map<String, 
             CaseReading reading,
             CasePlugins available,
             PartFaults faults) {
-        faults.make(path, () -> available.law(choice.name(), reading.where(path)).create(choice.parameters()))
+        faults.make(
+                        path,
+                        () -> available.law(choice.name(), reading.where(path)).create(choice.parameters()))
                 .ifPresent(law -> {
                     byStage.put(stage, law);
                     plugins.put(choice.name(), law.historyVersion());

@@ -19,7 +19,8 @@ final class LotParts {
         List<Lot> lots = new ArrayList<>();
         specification
                 .lots()
-                .forEach((name, lot) -> faults.make("lots." + name, () -> lot(lot, table)).ifPresent(lots::add));
+                .forEach((name, lot) ->
+                        faults.make("lots." + name, () -> lot(lot, table)).ifPresent(lots::add));
         return lots;
     }
 

@@ -30,7 +30,9 @@ final class MotionParts {
             String path = "motions." + name;
             if (motion.stop().isPresent() && motion.rampUp() != motion.rampDown()) {
                 faults.add(
-                        path + ".ramp_down", motion.rampDown() + " s", "ramp_up, " + motion.rampUp() + " s",
+                        path + ".ramp_down",
+                        motion.rampDown() + " s",
+                        "ramp_up, " + motion.rampUp() + " s",
                         "A motion that stops falls as it rose: give both the same duration.");
             }
             faults.make(path, () -> motion(motion)).ifPresent(made -> parts.byName.put(name, made));

@@ -51,7 +51,8 @@ final class PartFaults {
     /** Throws everything collected, if there is anything. */
     void finish() {
         if (!findings.isEmpty()) {
-            throw new ReedlingException(ExitCode.CASE, findings.stream().distinct().toList());
+            throw new ReedlingException(
+                    ExitCode.CASE, findings.stream().distinct().toList());
         }
     }
 }

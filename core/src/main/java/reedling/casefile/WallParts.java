@@ -27,18 +27,19 @@ final class WallParts {
     static List<Wall> walls(
             CaseSpecification specification, MaterialTable table, MotionParts motions, PartFaults faults) {
         List<Wall> walls = new ArrayList<>();
-        specification.walls().forEach((name, wall) -> faults.make("walls." + name, () -> wall(wall, table, motions))
-                .ifPresent(walls::add));
+        specification
+                .walls()
+                .forEach((name, wall) -> faults.make("walls." + name, () -> wall(wall, table, motions))
+                        .ifPresent(walls::add));
         return walls;
     }
 
     private static Wall wall(WallSpecification wall, MaterialTable table, MotionParts motions) {
-        Placed placed =
-                switch (wall.shape()) {
-                    case WallShape.Plane plane -> plane(plane);
-                    case WallShape.Box box -> box(box);
-                    case WallShape.Cylinder cylinder -> cylinder(cylinder);
-                };
+        Placed placed = switch (wall.shape()) {
+            case WallShape.Plane plane -> plane(plane);
+            case WallShape.Box box -> box(box);
+            case WallShape.Cylinder cylinder -> cylinder(cylinder);
+        };
         return new Wall(
                 wall.name(),
                 table.indexOf(wall.material()),
@@ -57,7 +58,8 @@ final class WallParts {
 
     private static Placed box(WallShape.Box box) {
         Vector3d sides = new Vector3d(box.box().maximum()).sub(box.box().minimum());
-        Vector3d centre = new Vector3d(box.box().maximum()).add(box.box().minimum()).mul(0.5);
+        Vector3d centre =
+                new Vector3d(box.box().maximum()).add(box.box().minimum()).mul(0.5);
         Surface surface = box.side() == WallShape.Side.OUTSIDE
                 ? new BoxOutside(sides.x, sides.y, sides.z)
                 : new BoxInside(sides.x, sides.y, sides.z, faces(box.openFaces()));

@@ -86,7 +86,9 @@ final class ResumeCommand implements Callable<Integer> {
             CaseReading reading = readCase(header, plugins);
             double until = runOptions.until(reading.specification().output().endTime());
             if (header.time() >= until) {
-                spec.commandLine().getOut().println(path + " has reached " + header.time() + " s; nothing is left to do.");
+                spec.commandLine()
+                        .getOut()
+                        .println(path + " has reached " + header.time() + " s; nothing is left to do.");
                 return ExitCode.OK.number();
             }
             CaseAssembly assembly = CaseAssembly.make(reading, new CasePlugins(plugins));
@@ -143,7 +145,10 @@ final class ResumeCommand implements Callable<Integer> {
         }
         if (!digest.equals(header.caseDigest())) {
             throw refused(
-                    file, "", "changed since the run began", "the case as the run wrote it",
+                    file,
+                    "",
+                    "changed since the run began",
+                    "the case as the run wrote it",
                     "Put the old text back, or start a new run with the new one.");
         }
         return CaseFile.read(file, assignments, new CasePlugins(plugins));
@@ -152,24 +157,31 @@ final class ResumeCommand implements Callable<Integer> {
     private void requireSamePlugins(CheckpointHeader header, CaseAssembly assembly) {
         if (!header.plugins().equals(assembly.plugins())) {
             throw refused(
-                    path, "plugins with the version of their history", assembly.plugins().toString(),
-                    header.plugins().toString(), "Resume with the plugins that the run began with.");
+                    path,
+                    "plugins with the version of their history",
+                    assembly.plugins().toString(),
+                    header.plugins().toString(),
+                    "Resume with the plugins that the run began with.");
         }
     }
 
     /** Batches of the measured part are fixed by its end: once it has begun, another end would mix them up. */
     private void requireSameWindow(CheckpointHeader header, RunPlan plan) {
-        boolean another = assignments.stream().anyMatch(assignment -> key(assignment).equals(END_TIME));
-        plan.screen().filter(screen -> another && header.time() > screen.measureFrom()).ifPresent(screen -> {
-            throw refused(
-                    path, END_TIME, "set anew at " + header.time() + " s",
-                    "the end it began with, as measuring began at " + screen.measureFrom() + " s",
-                    "Stop earlier with --until, or start a new run.");
-        });
+        boolean another =
+                assignments.stream().anyMatch(assignment -> key(assignment).equals(END_TIME));
+        plan.screen()
+                .filter(screen -> another && header.time() > screen.measureFrom())
+                .ifPresent(screen -> {
+                    throw refused(
+                            path,
+                            END_TIME,
+                            "set anew at " + header.time() + " s",
+                            "the end it began with, as measuring began at " + screen.measureFrom() + " s",
+                            "Stop earlier with --until, or start a new run.");
+                });
     }
 
     private static ReedlingException refused(Path where, String what, String got, String expected, String remedy) {
-        return new ReedlingException(
-                ExitCode.CHECKPOINT, new Finding(where.toString(), what, got, expected, remedy));
+        return new ReedlingException(ExitCode.CHECKPOINT, new Finding(where.toString(), what, got, expected, remedy));
     }
 }

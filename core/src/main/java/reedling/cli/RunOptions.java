@@ -28,7 +28,11 @@ final class RunOptions {
     int threads() {
         int number = threads == null ? Runtime.getRuntime().availableProcessors() : threads;
         if (number < 1 || number > MOST_THREADS) {
-            throw usage("--threads", Integer.toString(number), "1 to " + MOST_THREADS, "Leave it out to use all processors.");
+            throw usage(
+                    "--threads",
+                    Integer.toString(number),
+                    "1 to " + MOST_THREADS,
+                    "Leave it out to use all processors.");
         }
         return number;
     }
@@ -45,7 +49,8 @@ final class RunOptions {
             throw new ReedlingException(ExitCode.USAGE, fault.at("command line", "--until"));
         }
         if (!(time > 0)) {
-            throw usage("--until", '"' + until + '"', "a time above 0", "Write a number and a unit, such as \"0.5 s\".");
+            throw usage(
+                    "--until", '"' + until + '"', "a time above 0", "Write a number and a unit, such as \"0.5 s\".");
         }
         return OptionalDouble.of(time);
     }
@@ -55,7 +60,9 @@ final class RunOptions {
         double time = until().orElse(endTime);
         if (time > endTime) {
             throw usage(
-                    "--until", '"' + until + '"', "at most output.end_time, " + endTime + " s",
+                    "--until",
+                    '"' + until + '"',
+                    "at most output.end_time, " + endTime + " s",
                     "Give a longer run with --set 'output.end_time=\"" + until + "\"'.");
         }
         return time;

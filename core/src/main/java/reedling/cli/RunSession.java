@@ -43,7 +43,8 @@ record RunSession(
     /** Runs in a held folder and returns the exit code; from a checkpoint, if one is given. */
     ExitCode run(RunFolder folder, @Nullable CheckpointReader checkpoint) throws IOException {
         StopFlag stop = new StopFlag();
-        double resumeTime = checkpoint == null ? Double.NaN : checkpoint.header().time();
+        double resumeTime =
+                checkpoint == null ? Double.NaN : checkpoint.header().time();
         CheckpointFolder checkpoints = checkpoint == null
                 ? CheckpointFolder.create(folder.path())
                 : CheckpointFolder.resume(folder.path(), checkpoint.file());
