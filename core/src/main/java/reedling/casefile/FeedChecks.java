@@ -74,7 +74,8 @@ final class FeedChecks {
         }
         double side = shortestSide(block.region());
         double largest = block.shares().keySet().stream()
-                .mapToDouble(lot -> Objects.requireNonNull(draft.lots.get(lot)).diameter().largest())
+                .mapToDouble(lot ->
+                        Objects.requireNonNull(draft.lots.get(lot)).diameter().largest())
                 .max()
                 .orElse(0);
         if (side < largest) {

@@ -114,7 +114,10 @@ final class ValueReader {
         }
         Key wordKey = Key.required(variants.wordKey(), choice, "Which of the variants.");
         return names.choice(word, words, inner)
-                .map(name -> section(table, Objects.requireNonNull(variants.sections().get(name)).after(List.of(wordKey)), path));
+                .map(name -> section(
+                        table,
+                        Objects.requireNonNull(variants.sections().get(name)).after(List.of(wordKey)),
+                        path));
     }
 
     private Map<String, Object> named(Node.Table table, ValueType.Named type, String path) {

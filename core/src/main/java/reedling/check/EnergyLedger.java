@@ -165,8 +165,18 @@ public final class EnergyLedger implements Persistent {
     @Override
     public void save(SectionWriter out) throws IOException {
         double[] numbers = {
-            contactWork, wallWork, brought, taken, start, residual, throughput, dissipated,
-            holdings.kinetic, holdings.potential, holdings.contacts, holdings.strain
+            contactWork,
+            wallWork,
+            brought,
+            taken,
+            start,
+            residual,
+            throughput,
+            dissipated,
+            holdings.kinetic,
+            holdings.potential,
+            holdings.contacts,
+            holdings.strain
         };
         out.writeBoolean(started);
         out.writeDoubles(numbers, 0, numbers.length);

@@ -26,7 +26,9 @@ public final class OverlapSearch {
                     words = String.format(
                             Locale.ROOT,
                             "grains %d and %d, overlap %.3g of the effective radius",
-                            grains.id()[i], grains.id()[j], relative);
+                            grains.id()[i],
+                            grains.id()[j],
+                            relative);
                 }
             }
         }

@@ -94,7 +94,8 @@ public final class ContactBlock {
 
     /** A normal stage reports the shortest contact duration of its touching rows, s; not a number stops the run. */
     public void reportDuration(double duration) {
-        shortestDuration = duration < shortestDuration ? duration : Double.isNaN(duration) ? duration : shortestDuration;
+        shortestDuration =
+                duration < shortestDuration ? duration : Double.isNaN(duration) ? duration : shortestDuration;
     }
 
     /** Opens the block for rows of a list. */

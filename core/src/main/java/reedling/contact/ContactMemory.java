@@ -44,7 +44,9 @@ public record ContactMemory(int column, int motion) implements ContactKernel {
             DoubleVector x = DoubleVector.fromArray(Lanes.SPECIES, history, at);
             DoubleVector y = DoubleVector.fromArray(Lanes.SPECIES, history, at + Lanes.TILE);
             DoubleVector z = DoubleVector.fromArray(Lanes.SPECIES, history, at + 2 * Lanes.TILE);
-            DoubleVector nx = load(c, Column.NORMAL, r), ny = load(c, Column.NORMAL + 1, r), nz = load(c, Column.NORMAL + 2, r);
+            DoubleVector nx = load(c, Column.NORMAL, r),
+                    ny = load(c, Column.NORMAL + 1, r),
+                    nz = load(c, Column.NORMAL + 2, r);
             DoubleVector along = x.fma(nx, y.fma(ny, z.mul(nz))).neg();
             DoubleVector keep = Lanes.smaller(load(c, Column.RADIUS_RATIO, r), one);
             x = along.fma(load(c, Column.MEAN_NORMAL, r), x).mul(keep);

@@ -59,7 +59,8 @@ final class CandidateWatch {
             ApproachRule rule,
             ContactTally tally) {
         PairSegment segment = chunk.segments()[segmentNumber];
-        ContactKernel law = laws.bound(ContactKind.GRAIN_GRAIN, segmentNumber / 2).normal();
+        ContactKernel law =
+                laws.bound(ContactKind.GRAIN_GRAIN, segmentNumber / 2).normal();
         double[] rows = grains.rows();
         double smallest = Double.POSITIVE_INFINITY;
         int end = Math.min(segment.candidateCount(), (block + 1) * PairSegment.CANDIDATE_BLOCK);

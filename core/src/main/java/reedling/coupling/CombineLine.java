@@ -38,11 +38,29 @@ final class CombineLine implements RowStage {
         int column = at(second ? LINE : 0);
         for (int r = 0; r < block.rows(); r += Lanes.TILE) {
             if (Lanes.VECTORISED) {
-                Tile.combine(rows.grainRows(), base, GrainRow.LENGTH, minus, plus, rows.from() + r, weights,
-                        block.columns(), column + r, STRIDE);
+                Tile.combine(
+                        rows.grainRows(),
+                        base,
+                        GrainRow.LENGTH,
+                        minus,
+                        plus,
+                        rows.from() + r,
+                        weights,
+                        block.columns(),
+                        column + r,
+                        STRIDE);
             } else {
-                Tile.combineScalar(rows.grainRows(), base, GrainRow.LENGTH, minus, plus, rows.from() + r, weights,
-                        block.columns(), column + r, STRIDE);
+                Tile.combineScalar(
+                        rows.grainRows(),
+                        base,
+                        GrainRow.LENGTH,
+                        minus,
+                        plus,
+                        rows.from() + r,
+                        weights,
+                        block.columns(),
+                        column + r,
+                        STRIDE);
             }
         }
     }

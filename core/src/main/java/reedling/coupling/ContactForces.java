@@ -24,7 +24,8 @@ final class ContactForces implements RowStage {
     @Override
     public void run(RowRange rows) {
         ContactBlock block = rows.block();
-        double stiffest = Lanes.VECTORISED ? vector(block.columns(), block.rows()) : scalar(block.columns(), block.rows());
+        double stiffest =
+                Lanes.VECTORISED ? vector(block.columns(), block.rows()) : scalar(block.columns(), block.rows());
         rows.tally().frequencySquared(stiffest);
     }
 

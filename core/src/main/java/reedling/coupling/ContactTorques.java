@@ -32,7 +32,9 @@ final class ContactTorques implements RowStage {
 
     private static void vector(double[] c, int rows) {
         for (int r = 0; r < rows; r += Lanes.TILE) {
-            DoubleVector nx = load(c, Column.NORMAL, r), ny = load(c, Column.NORMAL + 1, r), nz = load(c, Column.NORMAL + 2, r);
+            DoubleVector nx = load(c, Column.NORMAL, r),
+                    ny = load(c, Column.NORMAL + 1, r),
+                    nz = load(c, Column.NORMAL + 2, r);
             DoubleVector fx = load(c, Column.FRICTION, r);
             DoubleVector fy = load(c, Column.FRICTION + 1, r);
             DoubleVector fz = load(c, Column.FRICTION + 2, r);
@@ -41,7 +43,9 @@ final class ContactTorques implements RowStage {
             DoubleVector mz = load(c, Column.ROLLING_MOMENT + 2, r);
             DoubleVector leverFirst = load(c, Column.LEVER_FIRST, r), leverSecond = load(c, Column.LEVER_SECOND, r);
             DoubleVector kn = load(c, Column.STIFFNESS, r);
-            DoubleVector qx = fy.mul(nz).sub(fz.mul(ny)), qy = fz.mul(nx).sub(fx.mul(nz)), qz = fx.mul(ny).sub(fy.mul(nx));
+            DoubleVector qx = fy.mul(nz).sub(fz.mul(ny)),
+                    qy = fz.mul(nx).sub(fx.mul(nz)),
+                    qz = fx.mul(ny).sub(fy.mul(nx));
             store(qx.mul(leverFirst).sub(mx), c, FIRST, r);
             store(qy.mul(leverFirst).sub(my), c, FIRST + 1, r);
             store(qz.mul(leverFirst).sub(mz), c, FIRST + 2, r);
@@ -57,7 +61,9 @@ final class ContactTorques implements RowStage {
     private static void scalar(double[] c, int rows) {
         for (int r = 0; r < rows; r++) {
             double nx = c[at(Column.NORMAL) + r], ny = c[at(Column.NORMAL + 1) + r], nz = c[at(Column.NORMAL + 2) + r];
-            double fx = c[at(Column.FRICTION) + r], fy = c[at(Column.FRICTION + 1) + r], fz = c[at(Column.FRICTION + 2) + r];
+            double fx = c[at(Column.FRICTION) + r],
+                    fy = c[at(Column.FRICTION + 1) + r],
+                    fz = c[at(Column.FRICTION + 2) + r];
             double mx = c[at(Column.ROLLING_MOMENT) + r];
             double my = c[at(Column.ROLLING_MOMENT + 1) + r];
             double mz = c[at(Column.ROLLING_MOMENT + 2) + r];

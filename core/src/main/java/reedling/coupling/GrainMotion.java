@@ -47,7 +47,13 @@ final class GrainMotion {
      * @param near for each grain of the chunk, whether it moves with a structure on the fine step
      */
     static void move(
-            Chunk chunk, GrainStore grains, double halfPast, double next, boolean energyDue, NearGrains near, MoveTally tally) {
+            Chunk chunk,
+            GrainStore grains,
+            double halfPast,
+            double next,
+            boolean energyDue,
+            NearGrains near,
+            MoveTally tally) {
         double[] rows = grains.rows();
         double[] forces = grains.forces();
         double halfNext = 0.5 * next;

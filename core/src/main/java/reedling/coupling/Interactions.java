@@ -255,8 +255,7 @@ public final class Interactions {
             GrainMotion.turn(chunk, grains, turning);
         }
         GrainMotion.importForces(chunk, grains);
-        GrainMotion.move(
-                chunk, grains, 0.5 * coarseStep.pastStep(), nextCoarse, energyDue, near.near(), tally);
+        GrainMotion.move(chunk, grains, 0.5 * coarseStep.pastStep(), nextCoarse, energyDue, near.near(), tally);
         NearMotion.first(near, grains, 0.5 * pastFine, nextCoarse, nextFine, energyDue, tally);
     }
 

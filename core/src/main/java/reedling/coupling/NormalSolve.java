@@ -66,7 +66,8 @@ final class NormalSolve implements RowStage {
             DoubleVector halfOverMass = half.mul(load(c, Column.INVERSE_MASS, r));
 
             DoubleVector speed = halfOverMass.neg().fma(elastic, closing).div(halfOverMass.fma(damping, one));
-            DoubleVector total = Lanes.larger(damping.fma(speed, elastic), Lanes.smaller(elastic, zero)).mul(touch);
+            DoubleVector total = Lanes.larger(damping.fma(speed, elastic), Lanes.smaller(elastic, zero))
+                    .mul(touch);
             DoubleVector dashpot = total.sub(elastic.mul(touch));
             store(total, c, Column.NORMAL_FORCE, r);
 
@@ -80,8 +81,7 @@ final class NormalSolve implements RowStage {
             DoubleVector radius = load(c, Column.CONTACT_RADIUS, r);
             store(DoubleVector.fromArray(Lanes.SPECIES, history, at).div(radius), c, Column.RADIUS_RATIO, r);
             radius.mul(touch).intoArray(history, at);
-            excess = Lanes.larger(
-                    load(c, Column.EFFECTIVE_RADIUS, r).fma(deepest, load(c, Column.OVERLAP, r)), excess);
+            excess = Lanes.larger(load(c, Column.EFFECTIVE_RADIUS, r).fma(deepest, load(c, Column.OVERLAP, r)), excess);
         }
         work.intoArray(tally.sums(), ContactTally.NORMAL);
         tally.excess(excess.reduceLanes(VectorOperators.MAX));

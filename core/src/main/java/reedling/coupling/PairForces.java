@@ -14,8 +14,8 @@ import reedling.particle.GrainStore;
 final class PairForces {
 
     private final LawSet laws;
-    private final StageLine gather =
-            StageLine.of(new CombineLine(false), new CombineLine(true), new FinishTurn(), new PairNormals(), new PairSliding());
+    private final StageLine gather = StageLine.of(
+            new CombineLine(false), new CombineLine(true), new FinishTurn(), new PairNormals(), new PairSliding());
     private final List<StageLine> lawLines = new ArrayList<>();
     private final StageLine scatter = StageLine.of(new BeginTurn(), new FinishTurn(), new PairScatter());
 

@@ -42,7 +42,9 @@ final class PairNormals implements RowStage {
         DoubleVector sphere = DoubleVector.broadcast(Lanes.SPECIES, SPHERE);
         for (int r = 0; r < rows; r += Lanes.TILE) {
             // 1 distance, normal, overlap
-            DoubleVector dx = load(c, Column.NORMAL, r), dy = load(c, Column.NORMAL + 1, r), dz = load(c, Column.NORMAL + 2, r);
+            DoubleVector dx = load(c, Column.NORMAL, r),
+                    dy = load(c, Column.NORMAL + 1, r),
+                    dz = load(c, Column.NORMAL + 2, r);
             DoubleVector radii = load(c, Column.OVERLAP, r);
             DoubleVector distance = dx.fma(dx, dy.fma(dy, dz.mul(dz))).sqrt();
             DoubleVector inverse = one.div(distance);
@@ -63,7 +65,11 @@ final class PairNormals implements RowStage {
             DoubleVector inverseMass = load(c, Column.INVERSE_MASS, r);
             store(first.mul(second).mul(inverseRadii), c, Column.EFFECTIVE_RADIUS, r);
             store(one.div(inverseMass), c, Column.EFFECTIVE_MASS, r);
-            store(shortening.mul(shortening).mul(sphere).fma(inverseMass, inverseMass), c, Column.INVERSE_MASS_SLIDING, r);
+            store(
+                    shortening.mul(shortening).mul(sphere).fma(inverseMass, inverseMass),
+                    c,
+                    Column.INVERSE_MASS_SLIDING,
+                    r);
             store(shortening.mul(first), c, Column.LEVER_FIRST, r);
             store(shortening.mul(second), c, Column.LEVER_SECOND, r);
             store(shortening, c, SHORTENING, r);

@@ -36,8 +36,12 @@ final class PairSliding implements RowStage {
     private static void vector(double[] c, int rows, double minusHalfStep) {
         DoubleVector back = DoubleVector.broadcast(Lanes.SPECIES, minusHalfStep);
         for (int r = 0; r < rows; r += Lanes.TILE) {
-            DoubleVector nx = load(c, Column.NORMAL, r), ny = load(c, Column.NORMAL + 1, r), nz = load(c, Column.NORMAL + 2, r);
-            DoubleVector dx = load(c, Column.SLIDING, r), dy = load(c, Column.SLIDING + 1, r), dz = load(c, Column.SLIDING + 2, r);
+            DoubleVector nx = load(c, Column.NORMAL, r),
+                    ny = load(c, Column.NORMAL + 1, r),
+                    nz = load(c, Column.NORMAL + 2, r);
+            DoubleVector dx = load(c, Column.SLIDING, r),
+                    dy = load(c, Column.SLIDING + 1, r),
+                    dz = load(c, Column.SLIDING + 2, r);
             DoubleVector closing = dx.fma(nx, dy.fma(ny, dz.mul(nz))).neg();
             DoubleVector ux = closing.fma(nx, dx), uy = closing.fma(ny, dy), uz = closing.fma(nz, dz);
             store(closing, c, Column.CLOSING, r);
@@ -58,7 +62,9 @@ final class PairSliding implements RowStage {
     private static void scalar(double[] c, int rows, double minusHalfStep) {
         for (int r = 0; r < rows; r++) {
             double nx = c[at(Column.NORMAL) + r], ny = c[at(Column.NORMAL + 1) + r], nz = c[at(Column.NORMAL + 2) + r];
-            double dx = c[at(Column.SLIDING) + r], dy = c[at(Column.SLIDING + 1) + r], dz = c[at(Column.SLIDING + 2) + r];
+            double dx = c[at(Column.SLIDING) + r],
+                    dy = c[at(Column.SLIDING + 1) + r],
+                    dz = c[at(Column.SLIDING + 2) + r];
             double closing = -Math.fma(dx, nx, Math.fma(dy, ny, dz * nz));
             double ux = Math.fma(closing, nx, dx), uy = Math.fma(closing, ny, dy), uz = Math.fma(closing, nz, dz);
             c[at(Column.CLOSING) + r] = closing;

@@ -24,7 +24,12 @@ final class RowRange {
         tally = sums;
         int rows = Math.min(ContactBlock.CAPACITY, source.paddedCount() - first);
         block.open(
-                rows, step.pastStep(), source.history(), source.historyAt(first), source.historyColumns(), step.energyDue());
+                rows,
+                step.pastStep(),
+                source.history(),
+                source.historyAt(first),
+                source.historyColumns(),
+                step.energyDue());
     }
 
     ContactBlock block() {

@@ -203,7 +203,9 @@ public final class WallContacts implements Persistent {
             int at = GrainRow.at(grain);
             double fx = c[at(FORCE_COLUMN) + r], fy = c[at(FORCE_COLUMN + 1) + r], fz = c[at(FORCE_COLUMN + 2) + r];
             // The force acts where the grain's own torque says: torque of the pair about the pivot is conserved.
-            double ax = rows[at] - pose.centreX(), ay = rows[at + 1] - pose.centreY(), az = rows[at + 2] - pose.centreZ();
+            double ax = rows[at] - pose.centreX(),
+                    ay = rows[at + 1] - pose.centreY(),
+                    az = rows[at + 2] - pose.centreZ();
             load[to] += fx;
             load[to + 1] += fy;
             load[to + 2] += fz;

@@ -108,8 +108,10 @@ final class WireElements {
             int b = 3 * secondNode[e];
             double far = reach + radiusOfBody[body[e]];
             int x0 = grid.cellX(Math.min(x[a], x[b]) - far), x1 = grid.cellX(Math.max(x[a], x[b]) + far);
-            int y0 = grid.cellY(Math.min(x[a + 1], x[b + 1]) - far), y1 = grid.cellY(Math.max(x[a + 1], x[b + 1]) + far);
-            int z0 = grid.cellZ(Math.min(x[a + 2], x[b + 2]) - far), z1 = grid.cellZ(Math.max(x[a + 2], x[b + 2]) + far);
+            int y0 = grid.cellY(Math.min(x[a + 1], x[b + 1]) - far),
+                    y1 = grid.cellY(Math.max(x[a + 1], x[b + 1]) + far);
+            int z0 = grid.cellZ(Math.min(x[a + 2], x[b + 2]) - far),
+                    z1 = grid.cellZ(Math.max(x[a + 2], x[b + 2]) + far);
             for (int cz = z0; cz <= z1; cz++) {
                 for (int cy = y0; cy <= y1; cy++) {
                     for (int cx = x0; cx <= x1; cx++) {

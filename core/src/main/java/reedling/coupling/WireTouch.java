@@ -1,8 +1,8 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.coupling;
 
-import reedling.contact.LawSet;
 import reedling.contact.ContactKind;
+import reedling.contact.LawSet;
 import reedling.material.MaterialTable;
 import reedling.particle.GrainRow;
 import reedling.particle.GrainStore;
@@ -149,8 +149,7 @@ final class WireTouch {
         return found;
     }
 
-    private void approach(
-            int element, int wire, GrainStore grains, int grain, ApproachRule rule, ContactTally tally) {
+    private void approach(int element, int wire, GrainStore grains, int grain, ApproachRule rule, ContactTally tally) {
         double[] rows = grains.rows();
         int at = GrainRow.at(grain);
         measure(element, wire, rows, at, trial);
@@ -168,9 +167,8 @@ final class WireTouch {
         if (rule.concerns(gap, closing)) {
             int pair = MaterialTable.pairIndex(grains.material()[grain], elements.material(wire));
             double effective = HertzLine.outside(grains.radius(grain), elements.radius(wire));
-            double duration = laws.bound(ContactKind.GRAIN_WIRE, pair)
-                    .normal()
-                    .duration(closing, effective, grains.mass(grain));
+            double duration =
+                    laws.bound(ContactKind.GRAIN_WIRE, pair).normal().duration(closing, effective, grains.mass(grain));
             tally.approach(rule.limit(gap, closing, duration));
         }
     }

@@ -23,7 +23,9 @@ public final class LotMix {
     private final double[] density;
 
     public LotMix(List<LotShare> lots, MaterialTable materials) {
-        new RangeCheck("mix").require(!lots.isEmpty(), "lots", "none", "at least one lot", "").finish();
+        new RangeCheck("mix")
+                .require(!lots.isEmpty(), "lots", "none", "at least one lot", "")
+                .finish();
         this.lots = List.copyOf(lots);
         int known = materials.materials().size();
         RangeCheck check = new RangeCheck("mix");

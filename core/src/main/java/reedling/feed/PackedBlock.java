@@ -53,8 +53,12 @@ public record PackedBlock(String name, LotMix mix, BoxRegion box, Amount amount,
 
         public Amount {
             new RangeCheck("block")
-                    .require(count > 0 != solidFraction > 0, "amount", count + " grains, " + solidFraction,
-                            "either a count > 0 or a solid fraction > 0", "")
+                    .require(
+                            count > 0 != solidFraction > 0,
+                            "amount",
+                            count + " grains, " + solidFraction,
+                            "either a count > 0 or a solid fraction > 0",
+                            "")
                     .require(!(solidFraction > CLOSEST), "solid fraction", solidFraction, "", "at most " + CLOSEST)
                     .finish();
         }
@@ -74,7 +78,11 @@ public record PackedBlock(String name, LotMix mix, BoxRegion box, Amount amount,
         new RangeCheck("block." + name)
                 .require(!name.isEmpty(), "name", "empty", "a name", "")
                 .positive("volume of the box", box.volume(), "m3")
-                .require(box.narrowest() >= widest, "narrowest side of the box", box.narrowest(), "m",
+                .require(
+                        box.narrowest() >= widest,
+                        "narrowest side of the box",
+                        box.narrowest(),
+                        "m",
                         "at least the widest grain, " + widest + " m")
                 .finite("velocity", velocity.length(), "m/s")
                 .finish();

@@ -15,6 +15,8 @@ import reedling.error.RangeCheck;
 public record Rain(String name, LotMix mix, Region region, FeedRate rate, Launch launch) {
 
     public Rain {
-        new RangeCheck("feed").require(!name.isEmpty(), "name", "empty", "a name", "").finish();
+        new RangeCheck("feed")
+                .require(!name.isEmpty(), "name", "empty", "a name", "")
+                .finish();
     }
 }

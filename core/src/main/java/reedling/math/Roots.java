@@ -7,7 +7,8 @@ package reedling.math;
  */
 public final class Roots {
 
-    private static final int NEWTON_STEPS = 6; // from a start within 25 % the error falls below one unit in the last place
+    private static final int NEWTON_STEPS =
+            6; // from a start within 25 % the error falls below one unit in the last place
 
     private Roots() {}
 

@@ -10,7 +10,8 @@ package reedling.neighbour;
  */
 public record ChunkLayout(int grains, int size) {
 
-    private static final int SMALLEST = 160; // grains: below, tiles that are not full cost more than a second core gives
+    private static final int SMALLEST =
+            160; // grains: below, tiles that are not full cost more than a second core gives
     private static final int LARGEST = 1000; // grains: so that every core of a large server has several chunks
     private static final int WANTED = 8; // chunks in a small case
 

@@ -155,8 +155,8 @@ final class GrainTraffic {
         for (WallPose pose : interactions.facets().walls()) {
             double vx = pose.velocityX(), vy = pose.velocityY(), vz = pose.velocityZ();
             double speed = Math.sqrt(vx * vx + vy * vy + vz * vz);
-            double spin = Math.sqrt(
-                    pose.spinX() * pose.spinX() + pose.spinY() * pose.spinY() + pose.spinZ() * pose.spinZ());
+            double spin =
+                    Math.sqrt(pose.spinX() * pose.spinX() + pose.spinY() * pose.spinY() + pose.spinZ() * pose.spinZ());
             if (spin > 0) {
                 speed += spin * farthestGrain(pose);
             }
@@ -170,7 +170,9 @@ final class GrainTraffic {
         double squared = 0;
         for (int g = 0; g < model.grains().count(); g++) {
             int at = GrainRow.at(g);
-            double dx = rows[at] - pose.centreX(), dy = rows[at + 1] - pose.centreY(), dz = rows[at + 2] - pose.centreZ();
+            double dx = rows[at] - pose.centreX(),
+                    dy = rows[at + 1] - pose.centreY(),
+                    dz = rows[at + 2] - pose.centreZ();
             squared = Math.max(squared, dx * dx + dy * dy + dz * dz);
         }
         return Math.sqrt(squared);

@@ -182,7 +182,12 @@ public final class Simulation {
     private int parts(double seconds, double limit) {
         double parts = Math.ceil(seconds / limit);
         if (!(parts <= MOST_FINE_STEPS)) {
-            throw StateGuard.stop(step, time, "structure", "fine step", limit + " s",
+            throw StateGuard.stop(
+                    step,
+                    time,
+                    "structure",
+                    "fine step",
+                    limit + " s",
                     "More than " + MOST_FINE_STEPS + " fine steps would be needed in one step: use larger elements.");
         }
         return Math.max(1, (int) parts);
@@ -236,7 +241,12 @@ public final class Simulation {
                 model.steps().maximum());
         double smallest = limits.smallest();
         if (!(smallest > 0) || !(fineLimit > 0)) {
-            throw StateGuard.stop(step, time, "step control", "step limit", smallest + " s",
+            throw StateGuard.stop(
+                    step,
+                    time,
+                    "step control",
+                    "step limit",
+                    smallest + " s",
                     "A law reported a time that is not positive.");
         }
         double next = control.choose(smallest, touching);
@@ -313,7 +323,8 @@ public final class Simulation {
         if (released) {
             largestSpeed = Math.max(largestSpeed, fastest()); // new grains may be the fastest
         }
-        boolean used = 2 * (travel + largestSpeed * control.longestNext()) > model.steps().margin();
+        boolean used = 2 * (travel + largestSpeed * control.longestNext())
+                > model.steps().margin();
         if (released || used) {
             search(traffic.leaving(time, pastStep));
         }
@@ -418,7 +429,9 @@ public final class Simulation {
 
         @Override
         public void save(SectionWriter out) throws IOException {
-            double[] clock = {time, pastStep, pastFine, travel, largestSpeed, moveFrequencySquared, structureStep, turned};
+            double[] clock = {
+                time, pastStep, pastFine, travel, largestSpeed, moveFrequencySquared, structureStep, turned
+            };
             out.writeLong(step);
             out.writeLong(searches);
             out.writeLong(grainSteps);

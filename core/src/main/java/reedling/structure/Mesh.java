@@ -14,12 +14,7 @@ import java.util.List;
  * @param slotOffset index into {@code slots} of each element end of a node, ascending element id
  */
 record Mesh(
-        NodeStore nodes,
-        List<Body> bodies,
-        List<ElementSet> sets,
-        double[] slots,
-        int[] slotStart,
-        int[] slotOffset) {
+        NodeStore nodes, List<Body> bodies, List<ElementSet> sets, double[] slots, int[] slotStart, int[] slotOffset) {
 
     /** Connects nodes to the slots of their elements by a stable counting sort. */
     static Mesh connect(NodeStore nodes, List<Body> bodies, List<ElementSet> sets, double[] slots) {

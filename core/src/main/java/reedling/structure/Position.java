@@ -20,8 +20,7 @@ public record Position(double x, double y, double z) {
 
     /** Point at a fraction of the way to another point. */
     public Position towards(Position other, double fraction) {
-        return new Position(
-                x + fraction * (other.x - x), y + fraction * (other.y - y), z + fraction * (other.z - z));
+        return new Position(x + fraction * (other.x - x), y + fraction * (other.y - y), z + fraction * (other.z - z));
     }
 
     boolean finite() {

@@ -115,7 +115,10 @@ public final class StructureBuilder {
 
     private int slotCount() {
         return ElementSet.SLOT
-                * bodies.stream().filter(body -> !body.rigid()).mapToInt(body -> body.nodes().length).sum();
+                * bodies.stream()
+                        .filter(body -> !body.rigid())
+                        .mapToInt(body -> body.nodes().length)
+                        .sum();
     }
 
     private Body describe(int index, int firstElement, int elementCount) {
@@ -124,8 +127,15 @@ public final class StructureBuilder {
         int first = firstNodes.get(index);
         int perElement = mesh.law().nodesPerElement();
         return new Body(
-                mesh.name(), first, end - first, firstElement, elementCount, perElement, mesh.nodes(),
-                mesh.law().section(), mesh.rigid());
+                mesh.name(),
+                first,
+                end - first,
+                firstElement,
+                elementCount,
+                perElement,
+                mesh.nodes(),
+                mesh.law().section(),
+                mesh.rigid());
     }
 
     private double[] constants(BodyMesh mesh) {

@@ -30,12 +30,18 @@ final class WireCheck {
     private void section() {
         if (wire.section() instanceof CrossSection.Tube tube
                 && !(tube.innerDiameter() > 0 && tube.innerDiameter() < tube.outerDiameter())) {
-            add("inner diameter", tube.innerDiameter() + " m", "0 < value < " + tube.outerDiameter() + " m",
+            add(
+                    "inner diameter",
+                    tube.innerDiameter() + " m",
+                    "0 < value < " + tube.outerDiameter() + " m",
                     "Make the tube's hole smaller than the tube, or use a solid round section.");
         }
         double smallest = wire.section().contactRadius();
         if (!(smallest > 0 && Double.isFinite(wire.section().area()))) {
-            add("section", "of smallest radius " + smallest + " m", "a radius > 0",
+            add(
+                    "section",
+                    "of smallest radius " + smallest + " m",
+                    "a radius > 0",
                     "Give every size of the section as a length above 0.");
         }
     }
@@ -46,12 +52,17 @@ final class WireCheck {
         if (!wire.ends().start().finite() || !wire.ends().end().finite()) {
             add("ends", "not finite", "finite coordinates", "Give both ends as points in metres.");
         } else if (!(span > thickness)) {
-            add("span", span + " m", "above the thickness " + thickness + " m",
+            add(
+                    "span",
+                    span + " m",
+                    "above the thickness " + thickness + " m",
                     "Move the ends apart or make the wire thinner.");
         } else if (wire.elements() < 1) {
             add("elements", Integer.toString(wire.elements()), "1 or more", "Use 8 or more per half wave.");
         } else if (span / wire.elements() < thickness && !wire.rigid()) {
-            add("elements", wire.elements() + " of length " + span / wire.elements() + " m",
+            add(
+                    "elements",
+                    wire.elements() + " of length " + span / wire.elements() + " m",
                     "at most " + (int) Math.max(1, span / thickness) + ", so that none is shorter than thick",
                     "Use fewer elements; shorter ones only shrink the step.");
         }
@@ -62,11 +73,17 @@ final class WireCheck {
         if (!(tension >= 0 && Double.isFinite(tension))) {
             add("tension", tension + " N", "0 N or more", "A wire cannot be installed under compression.");
         } else if (tension > 0 && !wire.rigid() && hasFreeEnd()) {
-            add("tension", tension + " N", "0 N where an end is free",
+            add(
+                    "tension",
+                    tension + " N",
+                    "0 N where an end is free",
                     "Hold both ends (pinned or clamped) or drop the tension.");
         } else if (wire.prestretch() > LARGEST_PRESTRETCH) {
-            add("tension", tension + " N, a stretch of " + wire.prestretch(),
-                    "a stretch of at most " + LARGEST_PRESTRETCH, "Lower the tension or check Young's modulus.");
+            add(
+                    "tension",
+                    tension + " N, a stretch of " + wire.prestretch(),
+                    "a stretch of at most " + LARGEST_PRESTRETCH,
+                    "Lower the tension or check Young's modulus.");
         }
     }
 
@@ -81,7 +98,9 @@ final class WireCheck {
             add("strain damping", "given as a time and as a ratio", "one of them", "Drop one.");
         }
         if (damping.firstModeRatio() > 0 && !wire.rigid() && !canStand()) {
-            add("damping ratio of the first mode", Double.toString(damping.firstModeRatio()),
+            add(
+                    "damping ratio of the first mode",
+                    Double.toString(damping.firstModeRatio()),
                     "0 for a wire that its supports do not hold in place",
                     "Modal damping is relative to the supports: clamp one end or hold both.");
         }

@@ -63,8 +63,8 @@ public final class WireMesh {
     }
 
     private static ElementLaw law(WireSpecification wire, ElementType type) {
-        ElementProperties undamped = new ElementProperties(
-                wire.section(), wire.material(), 0, ParameterValues.of(type, wire.parameters()));
+        ElementProperties undamped =
+                new ElementProperties(wire.section(), wire.material(), 0, ParameterValues.of(type, wire.parameters()));
         double time = wire.damping().strainDampingTime();
         if (wire.damping().highestModeRatio() > 0) {
             time = 2 * wire.damping().highestModeRatio() / highestFrequency(wire, type.law(undamped));

@@ -28,8 +28,8 @@ class CaseCheckErrorsTest {
                 "materials = [\"grain\", \"grain\"]",
                 "materials = [\"steel\", \"steel\"]",
                 "deck.toml:14:1 pairs: is without an entry for grain and grain, expected a pair for every two"
-                    + " materials that can touch. Add [[pairs]] with materials = [\"grain\", \"grain\"]: grains of lot"
-                    + " small touch each other.");
+                        + " materials that can touch. Add [[pairs]] with materials = [\"grain\", \"grain\"]: grains of lot"
+                        + " small touch each other.");
     }
 
     @Test
@@ -64,7 +64,7 @@ class CaseCheckErrorsTest {
                 "centre = [0.05, 0.05, 0.15]",
                 "centre = [0.47, 0.05, 0.15]",
                 "deck.toml:41:1 feeds.shower.region: is partly outside of the bounds, expected a region inside of"
-                    + " them. Grains put in out there would be spilled at once: move the region or widen [bounds].");
+                        + " them. Grains put in out there would be spilled at once: move the region or widen [bounds].");
     }
 
     @Test

@@ -20,7 +20,8 @@ class PackedBlockTest {
     @ParameterizedTest
     @ValueSource(doubles = {0.05, 0.3, 0.45, 0.55, 0.58})
     void equalGrainsFillToTheFractionWithoutOverlap(double fraction) {
-        GrainSeeds seeds = block(Mixes.single(), PackedBlock.Amount.fraction(fraction)).fill(new RandomStream(1));
+        GrainSeeds seeds =
+                block(Mixes.single(), PackedBlock.Amount.fraction(fraction)).fill(new RandomStream(1));
         assertThat(seeds.size() * SMALL).isEqualTo(fraction * BOX.volume(), within(0.51 * SMALL));
         assertSoundPacking(seeds);
     }
@@ -41,7 +42,8 @@ class PackedBlockTest {
 
     @Test
     void countIsMetAndVelocityIsGiven() {
-        GrainSeeds seeds = block(Mixes.vetchAndPea(), PackedBlock.Amount.grains(321)).fill(new RandomStream(3));
+        GrainSeeds seeds =
+                block(Mixes.vetchAndPea(), PackedBlock.Amount.grains(321)).fill(new RandomStream(3));
         assertThat(seeds.size()).isEqualTo(321);
         assertThat(seeds.velocityZ(320)).isEqualTo(-2);
         assertSoundPacking(seeds);
@@ -66,7 +68,8 @@ class PackedBlockTest {
 
     @Test
     void grainsFillTheBoxEvenly() {
-        GrainSeeds seeds = block(Mixes.single(), PackedBlock.Amount.fraction(0.55)).fill(new RandomStream(6));
+        GrainSeeds seeds =
+                block(Mixes.single(), PackedBlock.Amount.fraction(0.55)).fill(new RandomStream(6));
         int[] halves = new int[3];
         for (int k = 0; k < seeds.size(); k++) {
             halves[0] += seeds.x(k) < 0 ? 1 : 0;
@@ -99,8 +102,8 @@ class PackedBlockTest {
         PackedBlock tooFew = block(Mixes.single(), PackedBlock.Amount.fraction(1e-5));
         assertThatThrownBy(() -> tooFew.fill(new RandomStream(1))).hasMessageContaining("half of one grain");
         BoxRegion narrow = new BoxRegion(new Vector3d(), new Vector3d(1, 1, 0.004));
-        assertThatThrownBy(() -> new PackedBlock(
-                        "bed", Mixes.single(), narrow, PackedBlock.Amount.grains(1), new Vector3d()))
+        assertThatThrownBy(() ->
+                        new PackedBlock("bed", Mixes.single(), narrow, PackedBlock.Amount.grains(1), new Vector3d()))
                 .hasMessageContaining("narrowest");
     }
 

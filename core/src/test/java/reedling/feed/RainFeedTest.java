@@ -63,8 +63,9 @@ class RainFeedTest {
         for (int lot = 0; lot < 2; lot++) {
             // five standard errors: the cube scatters by about 3 * 0.08 of its mean
             assertThat(cubes[lot] / count[lot])
-                    .isEqualTo(mix.lot(lot).sizes().meanCube(), within(
-                            5 * 0.26 * mix.lot(lot).sizes().meanCube() / Math.sqrt(count[lot])));
+                    .isEqualTo(
+                            mix.lot(lot).sizes().meanCube(),
+                            within(5 * 0.26 * mix.lot(lot).sizes().meanCube() / Math.sqrt(count[lot])));
         }
         // number and mass agree with the mean grain of the mix, same scatter
         int all = count[0] + count[1];
@@ -209,9 +210,11 @@ class RainFeedTest {
     @Test
     void wrongPlansNameEveryMistake() {
         assertThatThrownBy(() -> new FeedRate(FeedRate.Measure.MASS, -1, 0, 2, 1))
-                .isInstanceOfSatisfying(ReedlingException.class, e -> assertThat(e.findings()).hasSize(3));
+                .isInstanceOfSatisfying(
+                        ReedlingException.class, e -> assertThat(e.findings()).hasSize(3));
         assertThatThrownBy(() -> new Launch(new Vector3d(), -1, 0))
-                .isInstanceOfSatisfying(ReedlingException.class, e -> assertThat(e.findings()).hasSize(2));
+                .isInstanceOfSatisfying(
+                        ReedlingException.class, e -> assertThat(e.findings()).hasSize(2));
     }
 
     private static RainFeed feed(LotMix mix, FeedRate rate) {

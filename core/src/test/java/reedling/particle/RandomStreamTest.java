@@ -69,7 +69,8 @@ class RandomStreamTest {
         assertThat(parent.split("feed").bits()).isEqualTo(first);
         assertThat(parent.split("feeds").bits()).isNotEqualTo(first);
         assertThat(new RandomStream(8).split("feed").bits()).isNotEqualTo(first);
-        assertThat(parent.split("a").split("b").bits()).isNotEqualTo(parent.split("b").split("a").bits());
+        assertThat(parent.split("a").split("b").bits())
+                .isNotEqualTo(parent.split("b").split("a").bits());
     }
 
     @Test

@@ -66,9 +66,11 @@ class SizeDistributionTest {
     @Test
     void allWrongNumbersAreReported() {
         assertThatThrownBy(() -> new UniformSize(-1, -2))
-                .isInstanceOfSatisfying(ReedlingException.class, e -> assertThat(e.findings()).hasSize(3));
+                .isInstanceOfSatisfying(
+                        ReedlingException.class, e -> assertThat(e.findings()).hasSize(3));
         assertThatThrownBy(() -> new SingleSize(Double.NaN)).hasMessageContaining("diameter");
         assertThatThrownBy(() -> new Lot("", -1, new SingleSize(1)))
-                .isInstanceOfSatisfying(ReedlingException.class, e -> assertThat(e.findings()).hasSize(2));
+                .isInstanceOfSatisfying(
+                        ReedlingException.class, e -> assertThat(e.findings()).hasSize(2));
     }
 }

@@ -67,7 +67,8 @@ class MotionTest {
 
     @Test
     void glidingAlwaysIsSpeedTimesTime() {
-        assertThat(at(new Gliding(new Vector3d(2, 0, 0), Timing.always()), -3).shiftX).isEqualTo(-6);
+        assertThat(at(new Gliding(new Vector3d(2, 0, 0), Timing.always()), -3).shiftX)
+                .isEqualTo(-6);
     }
 
     @Test
@@ -126,7 +127,8 @@ class MotionTest {
     @Test
     void oscillationRefusesASwitchAndSkewDirections() {
         Stroke stroke = new Stroke(X, 0.1, 1);
-        assertThatThrownBy(() -> Oscillating.harmonic(stroke, 5, Timing.from(0, 0))).hasMessageContaining("ramp");
+        assertThatThrownBy(() -> Oscillating.harmonic(stroke, 5, Timing.from(0, 0)))
+                .hasMessageContaining("ramp");
         Stroke skew = new Stroke(new Vector3d(1, 1, 0), 0.1, 1);
         assertThatThrownBy(() -> new Oscillating(stroke, skew, 5, RAMPED)).hasMessageContaining("cosine");
     }

@@ -138,7 +138,8 @@ class SurfaceTest {
     @Test
     void effectiveRadiusIsTheGrainOnPlanesAndTheHertzLineOnCylinders() {
         assertThat(new HalfSpace().effectiveRadius(0, 0.003)).isEqualTo(0.003);
-        assertThat(new CylinderInside(0.1, 1, true, true).effectiveRadius(1, 0.003)).isEqualTo(0.003);
+        assertThat(new CylinderInside(0.1, 1, true, true).effectiveRadius(1, 0.003))
+                .isEqualTo(0.003);
         assertThat(new CylinderInside(0.1, 1).effectiveRadius(0, 0.003)).isEqualTo(HertzLine.inBore(0.003, 0.1));
         assertThat(new CylinderOutside(0.1, 1).effectiveRadius(0, 0.003)).isEqualTo(HertzLine.outside(0.003, 0.1));
     }
@@ -146,7 +147,8 @@ class SurfaceTest {
     @Test
     void wrongMeasuresAreAllReported() {
         assertThatThrownBy(() -> new BoxOutside(-1, 0, Double.NaN))
-                .isInstanceOfSatisfying(ReedlingException.class, e -> assertThat(e.findings()).hasSize(3));
+                .isInstanceOfSatisfying(
+                        ReedlingException.class, e -> assertThat(e.findings()).hasSize(3));
         EnumSet<BoxInside.Face> all = EnumSet.allOf(BoxInside.Face.class);
         assertThatThrownBy(() -> new BoxInside(1, 1, 1, all)).hasMessageContaining("open");
     }

@@ -60,8 +60,12 @@ public final class BenchCommand implements SubCommand, Callable<Integer> {
         DenseBed made = bed == null ? JammedBed.make(grains) : DenseBed.read(bed);
         int all = Runtime.getRuntime().availableProcessors();
         int[] counts = threads.length > 0 ? threads : all > 1 ? new int[] {1, all} : new int[] {1};
-        out.printf(Locale.ROOT, "%d grains, %d lanes, median of %d samples%n", made.count(),
-                Lanes.VECTORISED ? Lanes.TILE : 1, SAMPLES);
+        out.printf(
+                Locale.ROOT,
+                "%d grains, %d lanes, median of %d samples%n",
+                made.count(),
+                Lanes.VECTORISED ? Lanes.TILE : 1,
+                SAMPLES);
         for (int count : counts) {
             time(made, count, out);
             out.flush();
@@ -109,13 +113,24 @@ public final class BenchCommand implements SubCommand, Callable<Integer> {
                 Locale.ROOT,
                 "%2d threads  %8.3f million grain-steps/s (%.3f by processor time)  %d chunks  %d searches  step %.3g s  "
                         + "limited by %s  residual %.2g%n",
-                workers, rate.wall() * 1e-6, rate.processor() * 1e-6, chunks, searches, run.pastStep(), run.limits().binding(),
+                workers,
+                rate.wall() * 1e-6,
+                rate.processor() * 1e-6,
+                chunks,
+                searches,
+                run.pastStep(),
+                run.limits().binding(),
                 run.ledger().relativeResidual());
         if (json) {
             out.printf(
                     Locale.ROOT,
                     "{\"grain_steps_per_s\": %.6e, \"grains\": %d, \"chunks\": %d, \"threads\": %d, \"steps\": %d, \"searches\": %d}%n",
-                    rate.wall(), made.count(), chunks, workers, steps, searches);
+                    rate.wall(),
+                    made.count(),
+                    chunks,
+                    workers,
+                    steps,
+                    searches);
         }
     }
 }

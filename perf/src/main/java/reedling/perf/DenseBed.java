@@ -39,7 +39,11 @@ record DenseBed(double[] edges, double[] rows) {
             if (count < 1 || bytes.remaining() != HEADER - Long.BYTES + count * ROW * Double.BYTES) {
                 throw new ReedlingException(
                         ExitCode.NO_INPUT,
-                        new Finding(file.toString(), "", "not a bed file of its length", "",
+                        new Finding(
+                                file.toString(),
+                                "",
+                                "not a bed file of its length",
+                                "",
                                 "Write the number of grains, three box edges and ten numbers a grain."));
             }
             double[] edges = {bytes.getDouble(), bytes.getDouble(), bytes.getDouble()};

@@ -12,9 +12,9 @@ import reedling.contact.ContactBlock;
 import reedling.contact.ContactKernel;
 import reedling.contact.ContactKind;
 import reedling.contact.ContactLaw;
+import reedling.material.MaterialPair;
 import reedling.math.Lanes;
 import reedling.math.Roots;
-import reedling.material.MaterialPair;
 
 /**
  * Normal force between elastic bodies of round contact, small overlap, any speed below that of sound.
@@ -99,7 +99,10 @@ final class HertzLaw implements ContactLaw {
                 DoubleVector speedTimesMass = closing.mul(closing).mul(mass); // m* v_eq^2
                 speedTimesMass = force.mul(overlap).mul(share).add(speedTimesMass);
                 // (m^2/R)^2 / v_eq^2 = m^5 / (R^2 m v_eq^2)
-                DoubleVector slow = massSquared.mul(massSquared).mul(mass).div(speedTimesMass.mul(radius).mul(radius));
+                DoubleVector slow = massSquared
+                        .mul(massSquared)
+                        .mul(mass)
+                        .div(speedTimesMass.mul(radius).mul(radius));
                 least = Lanes.smaller(infinite.blend(slow, zero.lt(signed)), least);
             }
             return least.reduceLanes(VectorOperators.MIN);

@@ -14,8 +14,8 @@ import reedling.contact.ContactKind;
 import reedling.contact.ContactLaw;
 import reedling.contact.ContactMemory;
 import reedling.contact.HistoryColumn;
-import reedling.math.Lanes;
 import reedling.material.MaterialPair;
+import reedling.math.Lanes;
 
 /**
  * Friction between bodies in round contact: a spring of Mindlin's stiffness that remembers its stretch, a dashpot taken
@@ -107,7 +107,8 @@ final class MindlinLaw implements ContactLaw {
                 DoubleVector den = halfStep.mul(dashpot).fma(load(c, Column.INVERSE_MASS_SLIDING, r), one);
 
                 // 3 Coulomb's limit; one division serves both quotients
-                DoubleVector size = Lanes.larger(gx.fma(gx, gy.fma(gy, gz.mul(gz))).sqrt(), tiny);
+                DoubleVector size =
+                        Lanes.larger(gx.fma(gx, gy.fma(gy, gz.mul(gz))).sqrt(), tiny);
                 DoubleVector limit = load(c, Column.NORMAL_FORCE, r).mul(mu).mul(den);
                 DoubleVector share = Lanes.smaller(size, limit).mul(touch).div(size.mul(den));
                 DoubleVector keepStretch = share.mul(den);

@@ -14,8 +14,8 @@ import reedling.contact.ContactKind;
 import reedling.contact.ContactLaw;
 import reedling.contact.ContactMemory;
 import reedling.contact.HistoryColumn;
-import reedling.math.Lanes;
 import reedling.material.MaterialPair;
+import reedling.math.Lanes;
 
 /**
  * Rolling resistance between bodies in round contact: a rotational spring that remembers its angle, a dashpot taken at
@@ -73,8 +73,12 @@ final class RollingLaw implements ContactLaw {
     private static void dropTwistVector(ContactBlock block) {
         double[] c = block.columns();
         for (int r = 0; r < block.rows(); r += Lanes.TILE) {
-            DoubleVector nx = load(c, Column.NORMAL, r), ny = load(c, Column.NORMAL + 1, r), nz = load(c, Column.NORMAL + 2, r);
-            DoubleVector wx = load(c, Column.SPIN, r), wy = load(c, Column.SPIN + 1, r), wz = load(c, Column.SPIN + 2, r);
+            DoubleVector nx = load(c, Column.NORMAL, r),
+                    ny = load(c, Column.NORMAL + 1, r),
+                    nz = load(c, Column.NORMAL + 2, r);
+            DoubleVector wx = load(c, Column.SPIN, r),
+                    wy = load(c, Column.SPIN + 1, r),
+                    wz = load(c, Column.SPIN + 2, r);
             DoubleVector twist = wx.fma(nx, wy.fma(ny, wz.mul(nz))).neg();
             store(twist.fma(nx, wx), c, Column.SPIN, r);
             store(twist.fma(ny, wy), c, Column.SPIN + 1, r);
@@ -126,7 +130,9 @@ final class RollingLaw implements ContactLaw {
             for (int r = 0; r < block.rows(); r += Lanes.TILE) {
                 int at = block.historyAt(r, column);
                 DoubleVector touch = load(c, Column.TOUCH, r);
-                DoubleVector wx = load(c, Column.SPIN, r), wy = load(c, Column.SPIN + 1, r), wz = load(c, Column.SPIN + 2, r);
+                DoubleVector wx = load(c, Column.SPIN, r),
+                        wy = load(c, Column.SPIN + 1, r),
+                        wz = load(c, Column.SPIN + 2, r);
 
                 // 1 angle, already advanced
                 DoubleVector x = DoubleVector.fromArray(Lanes.SPECIES, history, at);
@@ -136,7 +142,8 @@ final class RollingLaw implements ContactLaw {
                 // 2 spring and dashpot
                 DoubleVector radius = load(c, Column.EFFECTIVE_RADIUS, r);
                 DoubleVector inverseInertia = load(c, Column.INVERSE_INERTIA, r);
-                DoubleVector k = load(c, Column.STIFFNESS, r).mul(radius).mul(radius).mul(shape);
+                DoubleVector k =
+                        load(c, Column.STIFFNESS, r).mul(radius).mul(radius).mul(shape);
                 DoubleVector dashpot = k.div(inverseInertia).sqrt().mul(twiceEta);
                 DoubleVector gx = k.fma(x, dashpot.mul(wx));
                 DoubleVector gy = k.fma(y, dashpot.mul(wy));
@@ -144,8 +151,10 @@ final class RollingLaw implements ContactLaw {
                 DoubleVector den = halfStep.mul(dashpot).fma(inverseInertia, one);
 
                 // 3 the limit moment; one division serves both quotients
-                DoubleVector size = Lanes.larger(gx.fma(gx, gy.fma(gy, gz.mul(gz))).sqrt(), tiny);
-                DoubleVector limit = load(c, Column.NORMAL_FORCE, r).mul(radius).mul(mu).mul(den);
+                DoubleVector size =
+                        Lanes.larger(gx.fma(gx, gy.fma(gy, gz.mul(gz))).sqrt(), tiny);
+                DoubleVector limit =
+                        load(c, Column.NORMAL_FORCE, r).mul(radius).mul(mu).mul(den);
                 DoubleVector share = Lanes.smaller(size, limit).mul(touch).div(size.mul(den));
                 DoubleVector keepAngle = share.mul(den);
                 store(gx.mul(share), c, Column.ROLLING_MOMENT, r);

@@ -202,8 +202,17 @@ final class BeamKernel {
 
     /** Stores the new dashpot forces C beta ds/h and returns sum of 1/2 (old + new) ds, J/m. */
     private static double dashpot(
-            double[] stiffness, int c, double[] history, int h, double rate,
-            double d0, double d1, double d2, double d3, double d4, double d5) {
+            double[] stiffness,
+            int c,
+            double[] history,
+            int h,
+            double rate,
+            double d0,
+            double d1,
+            double d2,
+            double d3,
+            double d4,
+            double d5) {
         double n0 = rate * stiffness[c] * d0;
         double n1 = rate * stiffness[c + 1] * d1;
         double n2 = rate * stiffness[c + 2] * d2;
@@ -260,8 +269,8 @@ final class BeamKernel {
         double shear = Math.max(constants[k + STIFFNESS + 1], constants[k + STIFFNESS + 2]);
         double bending = Math.max(constants[k + STIFFNESS + 4], constants[k + STIFFNESS + 5]);
         double stretch = 2 * axial / (mass * length);
-        double lateral = shear * length * (2 / (length * length * mass) + 1 / (2 * inertia))
-                + 2 * tension / (mass * length);
+        double lateral =
+                shear * length * (2 / (length * length * mass) + 1 / (2 * inertia)) + 2 * tension / (mass * length);
         double rotary = 2 * Math.max(bending, constants[k + STIFFNESS + 3]) / (length * inertia);
         return Math.max(stretch, Math.max(lateral, rotary));
     }

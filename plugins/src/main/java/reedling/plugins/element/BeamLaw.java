@@ -10,7 +10,6 @@ import reedling.structure.ElementSet;
 import reedling.structure.NodeStore;
 import reedling.structure.Position;
 import reedling.structure.ResultColumn;
-import reedling.structure.Section;
 import reedling.unit.Dimension;
 
 /**
@@ -49,8 +48,18 @@ record BeamLaw(CrossSection section, Material material, double dampingTime, doub
         implements ElementLaw {
 
     private static final List<String> HISTORY = List.of(
-            "stretch", "shear_2", "shear_3", "twist", "curvature_2", "curvature_3", "dashpot_stretch",
-            "dashpot_shear_2", "dashpot_shear_3", "dashpot_twist", "dashpot_curvature_2", "dashpot_curvature_3");
+            "stretch",
+            "shear_2",
+            "shear_3",
+            "twist",
+            "curvature_2",
+            "curvature_3",
+            "dashpot_stretch",
+            "dashpot_shear_2",
+            "dashpot_shear_3",
+            "dashpot_twist",
+            "dashpot_curvature_2",
+            "dashpot_curvature_3");
 
     private static final List<ResultColumn> RESULTS = List.of(
             new ResultColumn("axial_force", Dimension.FORCE),

@@ -23,10 +23,7 @@ final class ElementFrame {
     /** From a rotation matrix given by its columns; divides by the largest component, so never by a small number. */
     private static void quaternion(double[] e1, double[] e2, double[] e3, double[] out, int at) {
         double[] q = {
-            1 + e1[0] + e2[1] + e3[2],
-            1 + e1[0] - e2[1] - e3[2],
-            1 - e1[0] + e2[1] - e3[2],
-            1 - e1[0] - e2[1] + e3[2]
+            1 + e1[0] + e2[1] + e3[2], 1 + e1[0] - e2[1] - e3[2], 1 - e1[0] + e2[1] - e3[2], 1 - e1[0] - e2[1] + e3[2]
         };
         double wx = e2[2] - e3[1];
         double wy = e3[0] - e1[2];

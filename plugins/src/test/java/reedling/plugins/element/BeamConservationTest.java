@@ -24,7 +24,10 @@ class BeamConservationTest {
     private static Structure rod(double dampingTime) {
         return BeamBench.straight(
                 BeamBench.law(new CrossSection.SolidCircle(0.002), BeamBench.STEEL, dampingTime),
-                0.1, ELEMENTS, FREE, FREE);
+                0.1,
+                ELEMENTS,
+                FREE,
+                FREE);
     }
 
     /**
@@ -115,8 +118,12 @@ class BeamConservationTest {
         double dampingTime = 2e-6;
         Structure structure = BeamBench.straight(
                 BeamBench.law(new CrossSection.SolidCircle(0.002), BeamBench.STEEL, dampingTime),
-                0.1, ELEMENTS, CLAMPED, FREE);
-        double omega = 2 * Math.PI
+                0.1,
+                ELEMENTS,
+                CLAMPED,
+                FREE);
+        double omega = 2
+                * Math.PI
                 * new StaticSolver(new StaticSolver(structure, 1e-6), d -> d == 2 || d == 4).frequencies()[0];
         StaticSolver pull = new StaticSolver(structure, 1e-6);
         pull.loads[6 * ELEMENTS + 2] = 0.1;

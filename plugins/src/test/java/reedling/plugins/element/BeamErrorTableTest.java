@@ -71,13 +71,17 @@ class BeamErrorTableTest {
         for (int level = 0; level < 4; level++) {
             Structure structure = BeamBench.straight(
                     BeamBench.law(new CrossSection.SolidCircle(0.001), BeamBench.STEEL, 0),
-                    0.05, 4 << level, CLAMPED, FREE);
+                    0.05,
+                    4 << level,
+                    CLAMPED,
+                    FREE);
             // differences of 1e-6 m would stretch these short elements enough to act like a small tension
             double[] got = new StaticSolver(new StaticSolver(structure, 1e-7), d -> d == 2 || d == 4).frequencies();
             for (int mode = 0; mode < 3; mode++) {
                 double exact = roots[mode] * roots[mode] / 0.0025 * speed / (2 * Math.PI);
                 double error = 100 * (got[mode] / exact - 1);
-                assertThat(error).as("%d elements, mode %d", 4 << level, mode + 1)
+                assertThat(error)
+                        .as("%d elements, mode %d", 4 << level, mode + 1)
                         .isCloseTo(known[level][mode], within(0.1 * Math.abs(known[level][mode]) + 0.03));
             }
         }

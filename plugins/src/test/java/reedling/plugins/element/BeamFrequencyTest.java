@@ -85,8 +85,7 @@ class BeamFrequencyTest {
     @Test
     void defaultInertiaDoublesTheRotaryInertiaOfBending() {
         CrossSection square = new CrossSection.Rectangle(0.1, 0.1);
-        double[] got = lateral(
-                BeamBench.straight(BeamBench.law(square, BeamBench.STEEL, 0), 1, 60, PINNED, PINNED));
+        double[] got = lateral(BeamBench.straight(BeamBench.law(square, BeamBench.STEEL, 0), 1, 60, PINNED, PINNED));
         double shear = square.shearFactor(0.3) * BeamBench.STEEL.shearModulus() * square.area();
         double bending = BeamBench.STEEL.youngsModulus() * square.secondMoment2();
         double mass = BeamBench.STEEL.density() * square.area();
@@ -106,8 +105,8 @@ class BeamFrequencyTest {
     void roundBarTwistsAtItsFrequency() {
         double diameter = Math.sqrt(Math.sqrt(32 * 1.5708e-8 / Math.PI));
         Material bar = new Material("bar", 7850, 2 * 8e10 * 1.3, 0.3);
-        Structure structure = BeamBench.straight(
-                BeamBench.law(new CrossSection.SolidCircle(diameter), bar, 0), 1, 20, CLAMPED, FREE);
+        Structure structure =
+                BeamBench.straight(BeamBench.law(new CrossSection.SolidCircle(diameter), bar, 0), 1, 20, CLAMPED, FREE);
         double[] got = new StaticSolver(new StaticSolver(structure, 1e-6), d -> d == 3).frequencies();
         assertThat(got[0]).isCloseTo(798.087, within(0.005 * 798.087));
     }

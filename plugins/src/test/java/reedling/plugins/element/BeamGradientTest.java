@@ -21,7 +21,10 @@ class BeamGradientTest {
     private static Structure one() {
         return BeamBench.straight(
                 BeamBench.law(new CrossSection.Rectangle(0.004, 0.002), BeamBench.STEEL, 0),
-                LENGTH, 1, EndCondition.FREE, EndCondition.FREE);
+                LENGTH,
+                1,
+                EndCondition.FREE,
+                EndCondition.FREE);
     }
 
     private static Structure bent(long seed, double angle, double stretch) {
@@ -30,8 +33,11 @@ class BeamGradientTest {
         NodeStore nodes = structure.nodes();
         for (int n = 0; n < 2; n++) {
             SpatialRotation.turn(
-                    nodes.orientation, 4 * n, angle * (2 * random.nextDouble() - 1),
-                    angle * (2 * random.nextDouble() - 1), angle * (2 * random.nextDouble() - 1));
+                    nodes.orientation,
+                    4 * n,
+                    angle * (2 * random.nextDouble() - 1),
+                    angle * (2 * random.nextDouble() - 1),
+                    angle * (2 * random.nextDouble() - 1));
             for (int i = 0; i < 3; i++) {
                 nodes.position[3 * n + i] += stretch * LENGTH * (2 * random.nextDouble() - 1);
             }
@@ -71,7 +77,8 @@ class BeamGradientTest {
                 System.arraycopy(q, 0, nodes.orientation, 0, 8);
                 double expected = -(above - below) / (2 * step);
                 double got = d % 6 < 3 ? force[3 * (d / 6) + d % 6] : moment[3 * (d / 6) + d % 6 - 3];
-                assertThat(got).as("seed %d direction %d", seed, d)
+                assertThat(got)
+                        .as("seed %d direction %d", seed, d)
                         .isCloseTo(expected, within(1e-6 * (d % 6 < 3 ? forceScale : momentScale)));
             }
         }
@@ -137,7 +144,8 @@ class BeamGradientTest {
         for (int trial = 0; trial < 60; trial++) {
             Position a = new Position(random.nextGaussian(), random.nextGaussian(), random.nextGaussian());
             Position b = trial < 6
-                    ? new Position(a.x() + (trial % 3 == 0 ? 1 : 0) * (trial < 3 ? 1 : -1),
+                    ? new Position(
+                            a.x() + (trial % 3 == 0 ? 1 : 0) * (trial < 3 ? 1 : -1),
                             a.y() + (trial % 3 == 1 ? 1 : 0) * (trial < 3 ? 1 : -1),
                             a.z() + (trial % 3 == 2 ? 1 : 0) * (trial < 3 ? 1 : -1))
                     : new Position(random.nextGaussian(), random.nextGaussian(), random.nextGaussian());
@@ -145,8 +153,9 @@ class BeamGradientTest {
             ElementFrame.write(a, b, BeamBench.UP, q, 0);
             double length = a.distance(b);
             double[] chord = {(b.x() - a.x()) / length, (b.y() - a.y()) / length, (b.z() - a.z()) / length};
-            double[] e1 = {1 - 2 * (q[2] * q[2] + q[3] * q[3]), 2 * (q[1] * q[2] + q[0] * q[3]),
-                2 * (q[1] * q[3] - q[0] * q[2])};
+            double[] e1 = {
+                1 - 2 * (q[2] * q[2] + q[3] * q[3]), 2 * (q[1] * q[2] + q[0] * q[3]), 2 * (q[1] * q[3] - q[0] * q[2])
+            };
             for (int i = 0; i < 3; i++) {
                 assertThat(e1[i]).isCloseTo(chord[i], within(1e-14));
             }

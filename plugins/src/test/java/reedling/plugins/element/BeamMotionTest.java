@@ -81,8 +81,13 @@ class BeamMotionTest {
         int elements = 20;
         Material stiff = new Material("stiff", 7850, 2.1e11, 0.3);
         StructureBuilder builder = new StructureBuilder().gravity(new Position(0, 0, -9.81));
-        BeamBench.line(builder, BeamBench.law(new CrossSection.SolidCircle(0.03), stiff, 0),
-                BeamBench.ORIGIN, new Position(1, 0, 0), elements, 0);
+        BeamBench.line(
+                builder,
+                BeamBench.law(new CrossSection.SolidCircle(0.03), stiff, 0),
+                BeamBench.ORIGIN,
+                new Position(1, 0, 0),
+                elements,
+                0);
         builder.support(0, PINNED, -1);
         Structure structure = builder.build();
         structure.evaluateForces();
@@ -182,7 +187,10 @@ class BeamMotionTest {
         int elements = 32;
         Structure structure = BeamBench.straight(
                 BeamBench.law(new CrossSection.SolidCircle(diameter), BeamBench.STEEL, 0),
-                0.1, elements, PINNED, PINNED);
+                0.1,
+                elements,
+                PINNED,
+                PINNED);
         NodeStore nodes = structure.nodes();
         for (int n = 0; n <= elements; n++) {
             double phi = Math.PI * n / elements;

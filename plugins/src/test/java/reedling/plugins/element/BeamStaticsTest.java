@@ -26,7 +26,10 @@ class BeamStaticsTest {
     private static Structure slender(int elements) {
         return BeamBench.straight(
                 BeamBench.law(new CrossSection.SolidCircle(DIAMETER), BeamBench.STEEL, 0),
-                1, elements, EndCondition.CLAMPED, EndCondition.FREE);
+                1,
+                elements,
+                EndCondition.CLAMPED,
+                EndCondition.FREE);
     }
 
     private static double angle(NodeStore nodes, int node, int axis) {
@@ -40,7 +43,10 @@ class BeamStaticsTest {
     void smallTipForceBendsAsTimoshenkoSays() {
         Structure structure = BeamBench.straight(
                 BeamBench.law(new CrossSection.Rectangle(0.02, 0.01), BeamBench.STEEL, 0),
-                1, 1, EndCondition.CLAMPED, EndCondition.FREE);
+                1,
+                1,
+                EndCondition.CLAMPED,
+                EndCondition.FREE);
         StaticSolver solver = new StaticSolver(structure, 1e-6);
         solver.loads[6 + 2] = 10;
         solver.solve(1);
@@ -61,7 +67,10 @@ class BeamStaticsTest {
     void smallTipMomentBendsAsBernoulliSays() {
         Structure structure = BeamBench.straight(
                 BeamBench.law(new CrossSection.Rectangle(0.02, 0.01), BeamBench.STEEL, 0),
-                1, 20, EndCondition.CLAMPED, EndCondition.FREE);
+                1,
+                20,
+                EndCondition.CLAMPED,
+                EndCondition.FREE);
         StaticSolver solver = new StaticSolver(structure, 1e-6);
         solver.loads[6 * 20 + 4] = -20;
         solver.solve(1);
@@ -118,8 +127,7 @@ class BeamStaticsTest {
                 double turn = total / elements;
                 double radius = 0.5 * side / Math.sin(0.5 * turn);
                 assertThat(nodes.position[3 * elements]).isCloseTo(radius * Math.sin(total), within(1e-7));
-                assertThat(nodes.position[3 * elements + 2])
-                        .isCloseTo(radius * (1 - Math.cos(total)), within(1e-7));
+                assertThat(nodes.position[3 * elements + 2]).isCloseTo(radius * (1 - Math.cos(total)), within(1e-7));
                 // the arc of the continuous beam, 0.5 % of L
                 assertThat(nodes.position[3 * elements])
                         .isCloseTo(Math.sin(total) / total, within(elements == 20 ? 0.005 : 0.03));
@@ -141,8 +149,11 @@ class BeamStaticsTest {
     @Test
     void bucklingColumnFollowsTheElastica() {
         double[][] table = {
-            {1.015, 19.743, 0.97050, 0.21667}, {1.063, 39.800, 0.88236, 0.42035}, {1.152, 60.050, 0.74061, 0.59358},
-            {1.293, 79.899, 0.56039, 0.71899}, {1.518, 99.972, 0.34929, 0.79148}
+            {1.015, 19.743, 0.97050, 0.21667},
+            {1.063, 39.800, 0.88236, 0.42035},
+            {1.152, 60.050, 0.74061, 0.59358},
+            {1.293, 79.899, 0.56039, 0.71899},
+            {1.518, 99.972, 0.34929, 0.79148}
         };
         // the critical load of the mesh is 0.26/n^2 high, which the first row magnifies by 70
         int elements = 90;
@@ -174,7 +185,10 @@ class BeamStaticsTest {
         Material bar = new Material("bar", 7850, 2 * 8e10 * 1.3, 0.3);
         Structure structure = BeamBench.straight(
                 BeamBench.law(new CrossSection.SolidCircle(diameter), bar, 0),
-                1, 20, EndCondition.CLAMPED, EndCondition.FREE);
+                1,
+                20,
+                EndCondition.CLAMPED,
+                EndCondition.FREE);
         StaticSolver solver = new StaticSolver(structure, 1e-6);
         solver.loads[6 * 20 + 3] = 10;
         solver.solve(1);

@@ -100,7 +100,8 @@ class BeamStepLimitTest {
         double plain = free(new CrossSection.SolidCircle(0.001), 0.005, 12, 0).stableStep();
         double frequency = 2 * MARGIN / plain;
         double ratio = 0.3;
-        double damped = free(new CrossSection.SolidCircle(0.001), 0.005, 12, 2 * ratio / frequency).stableStep();
+        double damped = free(new CrossSection.SolidCircle(0.001), 0.005, 12, 2 * ratio / frequency)
+                .stableStep();
         assertThat(damped / plain).isCloseTo(Math.sqrt(1 + ratio * ratio) - ratio, within(1e-12));
     }
 }

@@ -48,8 +48,7 @@ class CurvedCantileverTest {
      */
     @Test
     void tipFollowsTheExactRod() {
-        double[][] table = {
-            {300, 22.113, 58.536, 40.480}, {450, 18.369, 51.970, 48.705}, {600, 15.558, 46.892, 53.607}
+        double[][] table = {{300, 22.113, 58.536, 40.480}, {450, 18.369, 51.970, 48.705}, {600, 15.558, 46.892, 53.607}
         };
         int elements = 16;
         Structure structure = arc(elements);

@@ -36,11 +36,22 @@ final class Deck {
     static WireSpecification wire(int index, int motion, WireDamping damping, boolean rigid) {
         double y = 0.0074 * index;
         WireEnds ends = new WireEnds(
-                new Position(0, y, 0), new Position(0.3, y, -0.026),
-                EndCondition.CLAMPED, EndCondition.CLAMPED, motion);
+                new Position(0, y, 0),
+                new Position(0.3, y, -0.026),
+                EndCondition.CLAMPED,
+                EndCondition.CLAMPED,
+                motion);
         return new WireSpecification(
-                "wire " + index, POLYURETHANE, new CrossSection.SolidCircle(0.002), ends, 60, 8, damping, "beam",
-                Map.of(), rigid);
+                "wire " + index,
+                POLYURETHANE,
+                new CrossSection.SolidCircle(0.002),
+                ends,
+                60,
+                8,
+                damping,
+                "beam",
+                Map.of(),
+                rigid);
     }
 
     static Structure shaken(int wires, WireDamping damping) {

@@ -88,8 +88,8 @@ class SphereOnBeamTest {
 
     private static Structure beam(double length, double bending, double massPerLength, double side, int elements) {
         CrossSection section = new CrossSection.Rectangle(side, side);
-        Material material = new Material(
-                "slender", massPerLength / section.area(), bending / section.secondMoment2(), 0.3);
+        Material material =
+                new Material("slender", massPerLength / section.area(), bending / section.secondMoment2(), 0.3);
         return BeamBench.straight(
                 BeamBench.law(section, material, 0), length, elements, EndCondition.FREE, EndCondition.FREE);
     }
@@ -98,8 +98,8 @@ class SphereOnBeamTest {
     @Test
     void lightSphereBouncesOnceWithTheKnownForce() {
         double stiffness = 4.0 / 3 * 1.18132e11 * Math.sqrt(0.01);
-        Blow blow = strike(
-                beam(0.1535, 179.167, 0.78, 0.002, 40), new Striker(0.0326726, stiffness, 0.01), 1e10, 0.0015);
+        Blow blow =
+                strike(beam(0.1535, 179.167, 0.78, 0.002, 40), new Striker(0.0326726, stiffness, 0.01), 1e10, 0.0015);
         assertThat(blow.contacts).hasSize(1);
         assertThat(blow.peak).isCloseTo(4.912, within(0.03 * 4.912));
         assertThat(blow.peakTime).isCloseTo(7.209e-5, within(0.03 * 7.209e-5));

@@ -38,7 +38,9 @@ final class StaticSolver {
         this.nodes = other.nodes;
         this.step = other.step;
         this.loads = other.loads;
-        this.unknown = java.util.Arrays.stream(other.unknown).filter(d -> direction.test(d % 6)).toArray();
+        this.unknown = java.util.Arrays.stream(other.unknown)
+                .filter(d -> direction.test(d % 6))
+                .toArray();
     }
 
     /** Solves for equilibrium in equal load increments; fails the test where Newton's method does not converge. */

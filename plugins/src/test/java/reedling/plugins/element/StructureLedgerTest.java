@@ -221,9 +221,13 @@ class StructureLedgerTest {
         };
         StructureBuilder builder = new StructureBuilder().gravity(new Position(0, 0, -9.81));
         int motion = builder.motion(tilting);
-        BeamBench.line(builder,
+        BeamBench.line(
+                builder,
                 BeamBench.law(new reedling.structure.CrossSection.SolidCircle(0.004), Deck.POLYURETHANE, 0),
-                BeamBench.ORIGIN, new Position(0.1, 0, 0), 20, 0);
+                BeamBench.ORIGIN,
+                new Position(0.1, 0, 0),
+                20,
+                0);
         builder.support(0, EndCondition.CLAMPED, motion);
         Structure structure = builder.build();
         structure.evaluateForces();

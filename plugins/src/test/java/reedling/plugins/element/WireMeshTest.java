@@ -26,7 +26,9 @@ class WireMeshTest {
 
     @Test
     void beamIsFoundAsAService() {
-        assertThat(ServiceLoader.load(ElementType.class)).extracting(ElementType::name).contains("beam");
+        assertThat(ServiceLoader.load(ElementType.class))
+                .extracting(ElementType::name)
+                .contains("beam");
     }
 
     @Test
@@ -79,8 +81,16 @@ class WireMeshTest {
     private static WireSpecification with(int elements, double tension) {
         WireSpecification wire = Deck.wire(0, -1, WireDamping.NONE, false);
         return new WireSpecification(
-                wire.name(), wire.material(), wire.section(), wire.ends(), elements, tension, wire.damping(), "beam",
-                Map.of(), false);
+                wire.name(),
+                wire.material(),
+                wire.section(),
+                wire.ends(),
+                elements,
+                tension,
+                wire.damping(),
+                "beam",
+                Map.of(),
+                false);
     }
 
     @Test
@@ -88,13 +98,23 @@ class WireMeshTest {
         WireEnds ends = new WireEnds(
                 new Position(0, 0, 0), new Position(0.001, 0, 0), EndCondition.CLAMPED, EndCondition.FREE, -1);
         WireSpecification wire = new WireSpecification(
-                "wire 9", Deck.POLYURETHANE, new CrossSection.SolidCircle(0.002), ends, 0, 5,
-                new WireDamping(-1, 0, 1.5), "beam", Map.of(), false);
+                "wire 9",
+                Deck.POLYURETHANE,
+                new CrossSection.SolidCircle(0.002),
+                ends,
+                0,
+                5,
+                new WireDamping(-1, 0, 1.5),
+                "beam",
+                Map.of(),
+                false);
         assertThatThrownBy(() -> WireMesh.add(new StructureBuilder(), wire, new BeamElement()))
-                .isInstanceOfSatisfying(ReedlingException.class, failure -> assertThat(failure.findings())
-                        .extracting(finding -> finding.what())
-                        .containsExactly(
-                                "span", "tension", "strain damping time", "damping ratio of the first mode"))
+                .isInstanceOfSatisfying(
+                        ReedlingException.class,
+                        failure -> assertThat(failure.findings())
+                                .extracting(finding -> finding.what())
+                                .containsExactly(
+                                        "span", "tension", "strain damping time", "damping ratio of the first mode"))
                 .hasMessageContaining("0.001 m")
                 .hasMessageContaining("wire 9");
     }
@@ -109,11 +129,19 @@ class WireMeshTest {
 
     @Test
     void fullyFreeWireCannotHaveModalDamping() {
-        WireEnds ends = new WireEnds(
-                new Position(0, 0, 0), new Position(0.3, 0, 0), EndCondition.FREE, EndCondition.FREE, -1);
+        WireEnds ends =
+                new WireEnds(new Position(0, 0, 0), new Position(0.3, 0, 0), EndCondition.FREE, EndCondition.FREE, -1);
         WireSpecification wire = new WireSpecification(
-                "rod", Deck.POLYURETHANE, new CrossSection.SolidCircle(0.002), ends, 20, 0,
-                new WireDamping(0, 0, 0.05), "beam", Map.of(), false);
+                "rod",
+                Deck.POLYURETHANE,
+                new CrossSection.SolidCircle(0.002),
+                ends,
+                20,
+                0,
+                new WireDamping(0, 0, 0.05),
+                "beam",
+                Map.of(),
+                false);
         assertThatThrownBy(() -> WireMesh.add(new StructureBuilder(), wire, new BeamElement()))
                 .isInstanceOf(ReedlingException.class)
                 .hasMessageContaining("relative to the supports");
