@@ -2,10 +2,13 @@
 package reedling.coupling;
 
 import static reedling.contact.ContactBlock.at;
+import static reedling.contact.ContactBlock.load;
 
+import jdk.incubator.vector.VectorOperators;
 import reedling.contact.Column;
 import reedling.contact.ContactBlock;
 import reedling.contact.ContactKernel;
+import reedling.math.Lanes;
 
 /** Limits the step for rows that do not touch now but are about to; runs before later stages write over the gather. */
 final class ApproachScan {
@@ -14,10 +17,26 @@ final class ApproachScan {
 
     static void scan(ContactBlock block, ContactKernel normal, ApproachRule rule, ContactTally tally) {
         double[] c = block.columns();
-        int overlap = at(Column.OVERLAP);
-        for (int r = 0; r < block.rows(); r++) {
-            double gap = -c[overlap + r];
-            if (gap >= 0) {
+        for (int r = 0; r < block.rows(); r += Lanes.TILE) {
+            if (anyApart(c, r)) {
+                scanTile(c, r, normal, rule, tally);
+            }
+        }
+    }
+
+    private static boolean anyApart(double[] c, int row) {
+        if (Lanes.VECTORISED) {
+            return load(c, Column.OVERLAP, row)
+                    .test(VectorOperators.IS_NEGATIVE)
+                    .anyTrue();
+        }
+        return true;
+    }
+
+    private static void scanTile(double[] c, int from, ContactKernel normal, ApproachRule rule, ContactTally tally) {
+        for (int r = from; r < from + Lanes.TILE; r++) {
+            double gap = -c[at(Column.OVERLAP) + r];
+            if (gap > 0) {
                 double closing = c[at(Column.CLOSING) + r];
                 if (rule.concerns(gap, closing)) {
                     double radius = c[at(Column.EFFECTIVE_RADIUS) + r];

@@ -21,7 +21,7 @@ final class BeginTurn implements RowStage {
 
     @Override
     public void run(RowRange rows) {
-        if (Lanes.VECTORISED) { // the plain versions turn whole tiles at once
+        if (Lanes.VECTORISED) { // the plain version does all rounds at once in FinishTurn
             double[] columns = rows.block().columns();
             int tiles = rows.block().rows() / Lanes.TILE;
             for (int t = 0; t < 2 * tiles; t++) {

@@ -4,6 +4,7 @@ package reedling.coupling;
 import java.util.List;
 import jdk.incubator.vector.DoubleVector;
 import reedling.math.Lanes;
+import reedling.math.Tile;
 import reedling.neighbour.Chunk;
 import reedling.neighbour.CrossLink;
 import reedling.neighbour.PairSegment;
@@ -34,7 +35,7 @@ final class GrainMotion {
             for (int r = 0; r < link.count(); r++) {
                 int from = PairSegment.PAD + 8 * rows[r];
                 int to = GrainRow.forceAt(second[rows[r]]);
-                addRow(exports, from, forces, to);
+                Tile.addRow(exports, from, forces, to);
             }
         }
     }
@@ -122,17 +123,6 @@ final class GrainMotion {
         double translation = 2.0 / 3 * (normal + 2 * sliding);
         double rotation = 10.0 / 3 * sliding;
         tally.frequencySquared(Math.max(translation, rotation) * rows[at + GrainRow.INVERSE_MASS]);
-    }
-
-    private static void addRow(double[] from, int fromAt, double[] to, int toAt) {
-        if (Lanes.VECTORISED) {
-            DoubleVector sum = DoubleVector.fromArray(Lanes.SPECIES, to, toAt);
-            sum.add(DoubleVector.fromArray(Lanes.SPECIES, from, fromAt)).intoArray(to, toAt);
-        } else {
-            for (int c = 0; c < GrainRow.FORCE_LENGTH; c++) {
-                to[toAt + c] += from[fromAt + c];
-            }
-        }
     }
 
     static void clear(double[] forces, int f) {

@@ -3,7 +3,6 @@ package reedling.coupling;
 
 import static reedling.contact.ContactBlock.at;
 
-import reedling.contact.ContactBlock;
 import reedling.math.Lanes;
 import reedling.math.Tile;
 import reedling.neighbour.PairSegment;
@@ -12,6 +11,9 @@ import reedling.particle.GrainRow;
 /**
  * Last stage of grain-grain rows: adds the force rows, turned back, to both grains; a second grain of another chunk gets
  * its row in the segment's exports, for its own chunk to add.
+ *
+ * <p>Rows are added lane by lane, first row 0 of every tile, then row 1: pairs of one grain follow one another in a segment,
+ * and adding to one force row twice in a row waits for the first store.
  */
 final class PairScatter implements RowStage {
 
@@ -19,34 +21,32 @@ final class PairScatter implements RowStage {
 
     @Override
     public void run(RowRange rows) {
-        ContactBlock block = rows.block();
-        PairSegment segment = rows.segment();
-        double[] c = block.columns();
-        double[] forces = rows.forces();
-        for (int r = 0; r < block.rows(); r += Lanes.TILE) {
-            int row = rows.from() + r;
-            int first = at(0) + r;
-            int second = at(SECOND) + r;
-            if (Lanes.VECTORISED) {
-                Tile.addRows(c, first, BeginTurn.STRIDE, forces, GrainRow.PAD, segment.first(), row);
-            } else {
-                Tile.addToRowsScalar(c, first, BeginTurn.STRIDE, forces, GrainRow.PAD, segment.first(), row);
-            }
-            if (segment.cross()) {
-                store(c, second, segment.exports(), PairSegment.PAD + 8 * row);
-            } else if (Lanes.VECTORISED) {
-                Tile.addRows(c, second, BeginTurn.STRIDE, forces, GrainRow.PAD, segment.second(), row);
-            } else {
-                Tile.addToRowsScalar(c, second, BeginTurn.STRIDE, forces, GrainRow.PAD, segment.second(), row);
+        double[] c = rows.block().columns();
+        int count = rows.block().rows();
+        if (rows.segment().cross()) {
+            addTo(rows.segment().first(), rows.from(), c, 0, count, rows.forces());
+            export(rows.segment(), rows.from(), c, count);
+        } else {
+            addTo(rows.segment().first(), rows.from(), c, 0, count, rows.forces());
+            addTo(rows.segment().second(), rows.from(), c, SECOND, count, rows.forces());
+        }
+    }
+
+    private static void addTo(int[] grains, int from, double[] c, int column, int count, double[] forces) {
+        for (int lane = 0; lane < Lanes.TILE; lane++) {
+            int rowAt = at(column + lane);
+            for (int r = 0; r < count; r += Lanes.TILE) {
+                Tile.addRow(c, rowAt + r, forces, GrainRow.forceAt(grains[from + r + lane]));
             }
         }
     }
 
-    private static void store(double[] c, int at, double[] exports, int to) {
-        if (Lanes.VECTORISED) {
-            Tile.storeRows(c, at, BeginTurn.STRIDE, exports, to);
-        } else {
-            Tile.storeRowsScalar(c, at, BeginTurn.STRIDE, exports, to);
+    private static void export(PairSegment segment, int from, double[] c, int count) {
+        for (int lane = 0; lane < Lanes.TILE; lane++) {
+            int rowAt = at(SECOND + lane);
+            for (int r = 0; r < count; r += Lanes.TILE) {
+                Tile.copyRow(c, rowAt + r, segment.exports(), PairSegment.PAD + 8 * (from + r + lane));
+            }
         }
     }
 }

@@ -13,8 +13,6 @@ import reedling.contact.ContactBlock;
 import reedling.contact.ContactKind;
 import reedling.contact.LawSet;
 import reedling.material.MaterialTable;
-import reedling.math.Lanes;
-import reedling.math.Tile;
 import reedling.neighbour.Chunk;
 import reedling.neighbour.ChunkLayout;
 import reedling.neighbour.HistoryCarry;
@@ -36,7 +34,6 @@ import reedling.structure.Structure;
  */
 public final class WireContacts implements NodalLoads, Persistent {
 
-    private static final int STRIDE = at(1) - at(0);
     private static final int SECOND = 8;
 
     private final GrainStore grains;
@@ -230,14 +227,12 @@ public final class WireContacts implements NodalLoads, Persistent {
         double[] c = block.columns();
         double[] forces = chunk.near().forces();
         double[] exports = rows.segment().exports();
-        for (int r = 0; r < block.rows(); r += Lanes.TILE) {
-            Tile.storeRowsScalar(c, at(SECOND) + r, STRIDE, exports, PairSegment.PAD + 8 * (from + r));
-        }
         int count = Math.min(block.rows(), rows.segment().activeCount() - from);
         for (int r = 0; r < count; r++) {
             int f = NearGrains.forceAt(rows.near()[from + r]);
             for (int k = 0; k < GrainRow.FORCE_LENGTH; k++) {
                 forces[f + k] += c[at(k) + r];
+                exports[PairSegment.PAD + 8 * (from + r) + k] = c[at(SECOND + k) + r];
             }
         }
     }

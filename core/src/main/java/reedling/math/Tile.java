@@ -57,14 +57,16 @@ public final class Tile {
         DoubleVector g = combined(rows, base + length * first[pair + 6], base + length * second[pair + 6], w);
         DoubleVector h = combined(rows, base + length * first[pair + 7], base + length * second[pair + 7], w);
 
-        store(low4(a, e), columns, at);
-        store(low4(b, f), columns, at + stride);
-        store(low4(c, g), columns, at + 2 * stride);
-        store(low4(d, h), columns, at + 3 * stride);
-        store(high4(a, e), columns, at + 4 * stride);
-        store(high4(b, f), columns, at + 5 * stride);
-        store(high4(c, g), columns, at + 6 * stride);
-        store(high4(d, h), columns, at + 7 * stride);
+        DoubleVector ae = crossed(a, e, SWAP_4, UPPER_4), bf = crossed(b, f, SWAP_4, UPPER_4);
+        DoubleVector cg = crossed(c, g, SWAP_4, UPPER_4), dh = crossed(d, h, SWAP_4, UPPER_4);
+        store(a.blend(ae, UPPER_4), columns, at);
+        store(b.blend(bf, UPPER_4), columns, at + stride);
+        store(c.blend(cg, UPPER_4), columns, at + 2 * stride);
+        store(d.blend(dh, UPPER_4), columns, at + 3 * stride);
+        store(ae.blend(e, UPPER_4), columns, at + 4 * stride);
+        store(bf.blend(f, UPPER_4), columns, at + 5 * stride);
+        store(cg.blend(g, UPPER_4), columns, at + 6 * stride);
+        store(dh.blend(h, UPPER_4), columns, at + 7 * stride);
     }
 
     /** Second and third round of a turn, in place. */
@@ -74,17 +76,27 @@ public final class Tile {
         DoubleVector e = load(columns, at + 4 * stride), f = load(columns, at + 5 * stride);
         DoubleVector g = load(columns, at + 6 * stride), h = load(columns, at + 7 * stride);
 
-        DoubleVector a2 = low2(a, c), b2 = low2(b, d), c2 = high2(a, c), d2 = high2(b, d);
-        DoubleVector e2 = low2(e, g), f2 = low2(f, h), g2 = high2(e, g), h2 = high2(f, h);
+        DoubleVector ac = crossed(a, c, SWAP_2, UPPER_2), bd = crossed(b, d, SWAP_2, UPPER_2);
+        DoubleVector eg = crossed(e, g, SWAP_2, UPPER_2), fh = crossed(f, h, SWAP_2, UPPER_2);
+        DoubleVector a2 = a.blend(ac, UPPER_2),
+                b2 = b.blend(bd, UPPER_2),
+                c2 = ac.blend(c, UPPER_2),
+                d2 = bd.blend(d, UPPER_2);
+        DoubleVector e2 = e.blend(eg, UPPER_2),
+                f2 = f.blend(fh, UPPER_2),
+                g2 = eg.blend(g, UPPER_2),
+                h2 = fh.blend(h, UPPER_2);
 
-        store(low1(a2, b2), columns, at);
-        store(high1(a2, b2), columns, at + stride);
-        store(low1(c2, d2), columns, at + 2 * stride);
-        store(high1(c2, d2), columns, at + 3 * stride);
-        store(low1(e2, f2), columns, at + 4 * stride);
-        store(high1(e2, f2), columns, at + 5 * stride);
-        store(low1(g2, h2), columns, at + 6 * stride);
-        store(high1(g2, h2), columns, at + 7 * stride);
+        DoubleVector ab = crossed(a2, b2, SWAP_1, UPPER_1), cd = crossed(c2, d2, SWAP_1, UPPER_1);
+        DoubleVector ef = crossed(e2, f2, SWAP_1, UPPER_1), gh = crossed(g2, h2, SWAP_1, UPPER_1);
+        store(a2.blend(ab, UPPER_1), columns, at);
+        store(ab.blend(b2, UPPER_1), columns, at + stride);
+        store(c2.blend(cd, UPPER_1), columns, at + 2 * stride);
+        store(cd.blend(d2, UPPER_1), columns, at + 3 * stride);
+        store(e2.blend(ef, UPPER_1), columns, at + 4 * stride);
+        store(ef.blend(f2, UPPER_1), columns, at + 5 * stride);
+        store(g2.blend(gh, UPPER_1), columns, at + 6 * stride);
+        store(gh.blend(h2, UPPER_1), columns, at + 7 * stride);
     }
 
     /** First round of a turn, in place. */
@@ -93,14 +105,16 @@ public final class Tile {
         DoubleVector c = load(columns, at + 2 * stride), d = load(columns, at + 3 * stride);
         DoubleVector e = load(columns, at + 4 * stride), f = load(columns, at + 5 * stride);
         DoubleVector g = load(columns, at + 6 * stride), h = load(columns, at + 7 * stride);
-        store(low4(a, e), columns, at);
-        store(low4(b, f), columns, at + stride);
-        store(low4(c, g), columns, at + 2 * stride);
-        store(low4(d, h), columns, at + 3 * stride);
-        store(high4(a, e), columns, at + 4 * stride);
-        store(high4(b, f), columns, at + 5 * stride);
-        store(high4(c, g), columns, at + 6 * stride);
-        store(high4(d, h), columns, at + 7 * stride);
+        DoubleVector ae = crossed(a, e, SWAP_4, UPPER_4), bf = crossed(b, f, SWAP_4, UPPER_4);
+        DoubleVector cg = crossed(c, g, SWAP_4, UPPER_4), dh = crossed(d, h, SWAP_4, UPPER_4);
+        store(a.blend(ae, UPPER_4), columns, at);
+        store(b.blend(bf, UPPER_4), columns, at + stride);
+        store(c.blend(cg, UPPER_4), columns, at + 2 * stride);
+        store(d.blend(dh, UPPER_4), columns, at + 3 * stride);
+        store(ae.blend(e, UPPER_4), columns, at + 4 * stride);
+        store(bf.blend(f, UPPER_4), columns, at + 5 * stride);
+        store(cg.blend(g, UPPER_4), columns, at + 6 * stride);
+        store(dh.blend(h, UPPER_4), columns, at + 7 * stride);
     }
 
     private static DoubleVector combined(double[] rows, int first, int second, DoubleVector weight) {
@@ -108,7 +122,7 @@ public final class Tile {
                 .fma(weight, DoubleVector.fromArray(Lanes.SPECIES, rows, second));
     }
 
-    /** {@link #combine} and the whole turn, one number at a time. */
+    /** The combined rows of eight pairs, one number at a time and not turned yet: {@link #turnScalar} turns them. */
     public static void combineScalar(
             double[] rows,
             int base,
@@ -124,50 +138,36 @@ public final class Tile {
             int i = base + length * first[pair + k];
             int j = base + length * second[pair + k];
             for (int c = 0; c < Lanes.TILE; c++) {
-                columns[at + c * stride + k] = Math.fma(rows[i + c], weight[c], rows[j + c]);
+                columns[at + k * stride + c] = Math.fma(rows[i + c], weight[c], rows[j + c]);
             }
         }
     }
 
-    /**
-     * Adds eight turned rows, row k at {@code at + k * stride}, each to the row its pair names.
-     *
-     * @param target rows of eight doubles
-     * @param base index of row 0 in the target
-     * @param index row numbers; eight are read from {@code pair}
-     */
-    public static void addRows(double[] columns, int at, int stride, double[] target, int base, int[] index, int pair) {
-        for (int k = 0; k < Lanes.TILE; k++) {
-            int row = base + 8 * index[pair + k];
-            load(target, row).add(load(columns, at + k * stride)).intoArray(target, row);
-        }
-    }
-
-    /** Turns eight columns back into rows and adds them, one number at a time. */
-    public static void addToRowsScalar(
-            double[] columns, int at, int stride, double[] target, int base, int[] index, int pair) {
-        for (int k = 0; k < Lanes.TILE; k++) {
-            int row = base + 8 * index[pair + k];
+    /** Adds eight doubles of one array to eight of another. */
+    public static void addRow(double[] from, int fromAt, double[] to, int toAt) {
+        if (Lanes.VECTORISED) {
+            load(to, toAt).add(load(from, fromAt)).intoArray(to, toAt);
+        } else {
             for (int c = 0; c < Lanes.TILE; c++) {
-                target[row + c] += columns[at + c * stride + k];
+                to[toAt + c] += from[fromAt + c];
             }
         }
     }
 
-    /** Stores eight turned rows, row k at {@code at + k * stride}, one after the other from {@code to}. */
-    public static void storeRows(double[] columns, int at, int stride, double[] target, int to) {
-        for (int k = 0; k < Lanes.TILE; k++) {
-            load(columns, at + k * stride).intoArray(target, to + 8 * k);
+    /** Turns eight columns back into rows, in place: {@link #beginTurn} and {@link #finishTurn} one number at a time. */
+    public static void turnScalar(double[] columns, int at, int stride) {
+        for (int row = 0; row < Lanes.TILE; row++) {
+            for (int c = 0; c < row; c++) {
+                double kept = columns[at + c * stride + row];
+                columns[at + c * stride + row] = columns[at + row * stride + c];
+                columns[at + row * stride + c] = kept;
+            }
         }
     }
 
-    /** Turns eight columns back into rows and stores them, one number at a time. */
-    public static void storeRowsScalar(double[] columns, int at, int stride, double[] target, int to) {
-        for (int k = 0; k < Lanes.TILE; k++) {
-            for (int c = 0; c < Lanes.TILE; c++) {
-                target[to + 8 * k + c] = columns[at + c * stride + k];
-            }
-        }
+    /** Copies eight doubles of one array to eight of another. */
+    public static void copyRow(double[] from, int fromAt, double[] to, int toAt) {
+        System.arraycopy(from, fromAt, to, toAt, Lanes.TILE);
     }
 
     private static DoubleVector load(double[] from, int at) {
@@ -178,27 +178,12 @@ public final class Tile {
         value.intoArray(to, at);
     }
 
-    private static DoubleVector low4(DoubleVector a, DoubleVector b) {
-        return a.blend(b.rearrange(SWAP_4), UPPER_4);
-    }
-
-    private static DoubleVector high4(DoubleVector a, DoubleVector b) {
-        return a.rearrange(SWAP_4).blend(b, UPPER_4);
-    }
-
-    private static DoubleVector low2(DoubleVector a, DoubleVector b) {
-        return a.blend(b.rearrange(SWAP_2), UPPER_2);
-    }
-
-    private static DoubleVector high2(DoubleVector a, DoubleVector b) {
-        return a.rearrange(SWAP_2).blend(b, UPPER_2);
-    }
-
-    private static DoubleVector low1(DoubleVector a, DoubleVector b) {
-        return a.blend(b.rearrange(SWAP_1), UPPER_1);
-    }
-
-    private static DoubleVector high1(DoubleVector a, DoubleVector b) {
-        return a.rearrange(SWAP_1).blend(b, UPPER_1);
+    /**
+     * The halves that two vectors must exchange, each already in the other's place: the upper halves of the first in the
+     * lower places, the lower halves of the second in the upper places.
+     */
+    private static DoubleVector crossed(
+            DoubleVector first, DoubleVector second, VectorShuffle<Double> swap, VectorMask<Double> upper) {
+        return second.blend(first, upper).rearrange(swap);
     }
 }

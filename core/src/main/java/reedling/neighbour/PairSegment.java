@@ -20,7 +20,7 @@ import reedling.math.Lanes;
 public final class PairSegment {
 
     /** Candidates in a block, the unit in which they are looked at. */
-    public static final int CANDIDATE_BLOCK = 64;
+    public static final int CANDIDATE_BLOCK = 16;
 
     /** Float columns kept for the ledger: normal dashpot, friction 3, rolling moment 3, one spare. */
     public static final int LEDGER_COLUMNS = 8;
