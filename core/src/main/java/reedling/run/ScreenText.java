@@ -52,7 +52,7 @@ record ScreenText(RunResult result, ScreenFigures figures) {
         if (rigid()) {
             text.line("The wires are rigid, so no gap can open: a grain close to a gap's width wedges there and stays "
                     + "until something lifts it. Let them bend to see how many of these the wires would let go.");
-        } else {
+        } else if (!Double.isNaN(changes.percentile(0.5))) {
             text.line(format(
                     "The wires bend, so gaps breathe: of all places and moments one in two is off its width by %.2g mm "
                             + "or more, one in ten by %.2g mm. Near-size grains then work through or are lifted out "
