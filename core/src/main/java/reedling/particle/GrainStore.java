@@ -25,10 +25,10 @@ public final class GrainStore implements Persistent {
     private int count;
     private double[] rows = new double[GrainRow.at(GHOSTS)];
     private double[] forces = new double[GrainRow.forceAt(GHOSTS)];
-    private int[] material = new int[0];
-    private int[] lot = new int[0];
-    private long[] id = new long[0];
-    private double[] orientation = new double[0];
+    private int[] material = new int[GHOSTS];
+    private int[] lot = new int[GHOSTS];
+    private long[] id = new long[GHOSTS];
+    private double[] orientation = new double[4 * GHOSTS];
     private long nextId;
 
     /** Number of grains. */
@@ -100,14 +100,15 @@ public final class GrainStore implements Persistent {
     }
 
     private void ensureCapacity(int grains) {
-        if (grains > material.length) {
-            int capacity = Math.max(grains, material.length + material.length / 4);
+        int held = material.length - GHOSTS;
+        if (grains > held) {
+            int capacity = Math.max(grains, held + held / 4);
             rows = Arrays.copyOf(rows, GrainRow.at(capacity + GHOSTS));
             forces = Arrays.copyOf(forces, GrainRow.forceAt(capacity + GHOSTS));
-            material = Arrays.copyOf(material, capacity);
-            lot = Arrays.copyOf(lot, capacity);
-            id = Arrays.copyOf(id, capacity);
-            orientation = Arrays.copyOf(orientation, 4 * capacity);
+            material = Arrays.copyOf(material, capacity + GHOSTS);
+            lot = Arrays.copyOf(lot, capacity + GHOSTS);
+            id = Arrays.copyOf(id, capacity + GHOSTS);
+            orientation = Arrays.copyOf(orientation, 4 * (capacity + GHOSTS));
         }
     }
 
@@ -181,23 +182,18 @@ public final class GrainStore implements Persistent {
 
     /**
      * Puts grains into a new memory order and drops those named last; in place, one cycle of the permutation after the
-     * other.
+     * other, with a ghost's row as the spare place.
      *
      * @param order old row of each new row, a permutation of 0 .. count - 1; overwritten
      * @param kept number of grains kept, those of the first entries
      */
     public void reorder(int[] order, int kept) {
-        double[] row = new double[GrainRow.LENGTH];
-        double[] turn = new double[4];
+        int spare = count; // a ghost's row: written anew below
         for (int start = 0; start < count; start++) {
             if (order[start] < 0 || order[start] == start) {
                 continue;
             }
-            System.arraycopy(rows, GrainRow.at(start), row, 0, GrainRow.LENGTH);
-            System.arraycopy(orientation, 4 * start, turn, 0, 4);
-            int firstMaterial = material[start];
-            int firstLot = lot[start];
-            long firstId = id[start];
+            copy(start, spare);
             int to = start;
             for (int from = order[to]; from != start; from = order[to]) {
                 copy(from, to);
@@ -205,11 +201,7 @@ public final class GrainStore implements Persistent {
                 to = from;
             }
             order[to] = -1;
-            System.arraycopy(row, 0, rows, GrainRow.at(to), GrainRow.LENGTH);
-            System.arraycopy(turn, 0, orientation, 4 * to, 4);
-            material[to] = firstMaterial;
-            lot[to] = firstLot;
-            id[to] = firstId;
+            copy(spare, to);
         }
         resize(kept);
     }

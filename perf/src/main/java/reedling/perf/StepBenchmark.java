@@ -26,7 +26,7 @@ import reedling.run.Simulation;
 @Measurement(iterations = 5, time = 2)
 @Fork(
         value = 1,
-        jvmArgsAppend = {"--add-modules", "jdk.incubator.vector", "-XX:+UseParallelGC"})
+        jvmArgsAppend = {"--add-modules", "jdk.incubator.vector", "-XX:-DoEscapeAnalysis", "-XX:+UseSerialGC"})
 public class StepBenchmark {
 
     @Param({"2000", "10000"})
