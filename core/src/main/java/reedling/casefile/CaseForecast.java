@@ -21,11 +21,11 @@ public final class CaseForecast {
     /** Solid fraction at which the loaded trial fills the regions that feeds rain from. */
     private static final double LOADED = 0.25;
 
-    /** Java machine and program, bytes (measured with small cases). */
+    /** Java machine and program, bytes: 195 MB resident without grains in {@code bench}, and some room for tables. */
     private static final double BASE_MEMORY = 250e6;
 
-    /** Rows, pairs with history and copies for writing, bytes a grain (about 8 pairs of 15 columns, twice). */
-    private static final double GRAIN_MEMORY = 4e3;
+    /** Bytes a grain: 1.13 kB resident on the dense bed of {@code bench}, and as much again for copies that are written. */
+    private static final double GRAIN_MEMORY = 2.5e3;
 
     private final CaseAssembly assembly;
     private final CasePlugins plugins;

@@ -9,7 +9,6 @@ import reedling.check.StateGuard;
 import reedling.checkpoint.Persistent;
 import reedling.checkpoint.SectionReader;
 import reedling.checkpoint.SectionWriter;
-import reedling.coupling.ContactTally;
 import reedling.coupling.Interactions;
 import reedling.coupling.MoveTally;
 import reedling.coupling.PastStep;
@@ -27,24 +26,6 @@ import reedling.wall.WallPose;
  */
 public final class Simulation {
 
-    /** A fine step may take so much of the stability limit of contacts with structure nodes. */
-    private static final double FINE_STABLE = 0.4;
-
-    /** A coarse step may take so much of the stability limit of lasting contacts. */
-    private static final double COARSE_STABLE = 0.8;
-
-    /**
-     * A contact with a wire takes so many times fewer coarse steps than a contact between grains: its own force is found
-     * on the fine step, but what else pushes the grain reaches it once a coarse step.
-     */
-    private static final double COARSE_SHARE = 4;
-
-    /** Steps in the fastest prescribed period. */
-    private static final double PER_PERIOD = 100;
-
-    /** Share of the search margin that one step may use up. */
-    private static final double MARGIN_SHARE = 0.2;
-
     /** Time over which walls and supports show their velocity before the first step, s. */
     private static final double GLIMPSE = 1e-6;
 
@@ -59,6 +40,7 @@ public final class Simulation {
     private final Model model;
     private final WorkerTeam team;
     private final Interactions interactions;
+    private final StepSurvey survey;
     private final StepControl control;
     private final EnergyLedger ledger;
     private final Passage passage;
@@ -91,6 +73,7 @@ public final class Simulation {
                 model.materials(),
                 model.steps().stepsPerContact(),
                 0);
+        survey = new StepSurvey(model, interactions);
         control = new StepControl(model.steps().stepsPerContact(), model.steps().maximum());
         ledger = new EnergyLedger(model.walls().size());
         passage = new Passage(model.lots().size(), model.exits().outlets().size() + 1);
@@ -161,7 +144,7 @@ public final class Simulation {
         while (left > 0) {
             interactions.fineForce(fine, team);
             bookContacts(false);
-            double limit = fineLimit();
+            double limit = survey.fine(structureStep);
             double coming = fine;
             if (limit < fine) {
                 int parts = parts(next - done, limit);
@@ -213,32 +196,11 @@ public final class Simulation {
     }
 
     private double chooseStep() {
-        double duration = Double.POSITIVE_INFINITY;
-        double wireDuration = Double.POSITIVE_INFINITY;
-        double approach = Double.POSITIVE_INFINITY;
-        double frequencySquared = moveFrequencySquared;
-        boolean touching = false;
-        for (ContactTally tally : interactions.coarse()) {
-            duration = Math.min(duration, tally.shortestDuration());
-            approach = Math.min(approach, tally.approachLimit());
-            frequencySquared = Math.max(frequencySquared, tally.largestFrequencySquared());
-            touching |= tally.touching();
-        }
         if (step % STRUCTURE_EVERY == 0) {
             structureStep = model.structure().stableStep();
         }
-        double fineLimit = fineLimit();
-        for (ContactTally tally : interactions.fine()) {
-            touching |= tally.touching();
-            wireDuration = Math.min(wireDuration, tally.shortestDuration());
-        }
-        limits = new StepLimits(
-                Math.min(duration, COARSE_SHARE * wireDuration) / model.steps().stepsPerContact(),
-                approach,
-                persistentLimit(frequencySquared),
-                MARGIN_SHARE * model.steps().margin() / largestSpeed,
-                drivenLimit(),
-                model.steps().maximum());
+        double fineLimit = survey.fine(structureStep);
+        limits = survey.coarse(time, moveFrequencySquared, largestSpeed);
         double smallest = limits.smallest();
         if (!(smallest > 0) || !(fineLimit > 0)) {
             throw StateGuard.stop(
@@ -249,34 +211,9 @@ public final class Simulation {
                     smallest + " s",
                     "A law reported a time that is not positive.");
         }
-        double next = control.choose(smallest, touching);
+        double next = control.choose(smallest, survey.touching());
         fineSteps = parts(next, fineLimit);
         return next;
-    }
-
-    private double drivenLimit() {
-        double limit = model.steps().drivenPeriod() / PER_PERIOD;
-        for (WallPose pose : interactions.facets().walls()) {
-            limit = Math.min(limit, pose.wall().motion().longestStep(time));
-        }
-        return limit;
-    }
-
-    /** Longest fine step that the structure and its contacts allow, as the last fine pass found them, s. */
-    private double fineLimit() {
-        double limit = structureStep;
-        double frequencySquared = 0;
-        for (ContactTally tally : interactions.fine()) {
-            limit = Math.min(limit, tally.shortestDuration() / model.steps().stepsPerContact());
-            limit = Math.min(limit, tally.approachLimit());
-            frequencySquared = Math.max(frequencySquared, tally.largestFrequencySquared());
-        }
-        return Math.min(limit, FINE_STABLE * 2 / Math.sqrt(frequencySquared));
-    }
-
-    private double persistentLimit(double frequencySquared) {
-        double xi = 2 * model.laws().largestDampingRatio(); // densest packing: its mode has twice a pair's frequency
-        return COARSE_STABLE * 2 / Math.sqrt(frequencySquared) * (Math.sqrt(1 + xi * xi) - xi);
     }
 
     private void closeStep(double next, double fine) {
