@@ -7,6 +7,7 @@ import java.util.Optional;
 import reedling.error.ExitCode;
 import reedling.error.Finding;
 import reedling.error.ReedlingException;
+import reedling.unit.Spelling;
 
 /** All plugins of a run, by service and name; immutable. */
 public final class PluginCatalogue {
@@ -40,7 +41,7 @@ public final class PluginCatalogue {
     /** The finding for a name that no plugin of the service has; for callers that collect findings. */
     public Finding missing(PluginService<?> service, String name, String where) {
         List<String> known = names(service);
-        String suggestion = NearestName.of(name, known)
+        String suggestion = Spelling.nearest(name, known)
                 .map(nearest -> "Did you mean " + nearest + "?")
                 .orElse("Choose one of these, or name the folder of the jar that has it.");
         return new Finding(
