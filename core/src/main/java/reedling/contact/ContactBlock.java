@@ -87,7 +87,7 @@ public final class ContactBlock {
         return energyDue;
     }
 
-    /** Shortest contact duration of the touching rows, s, as the normal stage reported it. */
+    /** Shortest contact duration that normal stages reported so far in the step, s; a longer one need not be reported. */
     public double shortestDuration() {
         return shortestDuration;
     }

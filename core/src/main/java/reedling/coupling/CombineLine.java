@@ -9,7 +9,8 @@ import reedling.math.Tile;
 import reedling.particle.GrainRow;
 
 /**
- * First stage of the gather: combines one line of the two grains of each pair and begins to turn it into columns.
+ * First stage of the gather: combines one line of the two grains of each pair and begins to turn it into columns; the
+ * stages after it end the turn, four columns each. Without vectors the columns are complete at once.
  *
  * <p>First line (columns 0-7): centre difference 3 (second less first), sum of radii, velocity difference 3 (second less
  * first), sum of inverse masses. Second line (columns 8-15): spin difference 3 (first less second), sum of inverse
@@ -36,32 +37,34 @@ final class CombineLine implements RowStage {
         double[] weights = second ? SECOND_WEIGHTS : FIRST_WEIGHTS;
         int base = GrainRow.PAD + (second ? LINE : 0);
         int column = at(second ? LINE : 0);
-        for (int r = 0; r < block.rows(); r += Lanes.TILE) {
-            if (Lanes.VECTORISED) {
-                Tile.combine(
-                        rows.grainRows(),
-                        base,
-                        GrainRow.LENGTH,
-                        minus,
-                        plus,
-                        rows.from() + r,
-                        weights,
-                        block.columns(),
-                        column + r,
-                        STRIDE);
-            } else {
-                Tile.combineScalar(
-                        rows.grainRows(),
-                        base,
-                        GrainRow.LENGTH,
-                        minus,
-                        plus,
-                        rows.from() + r,
-                        weights,
-                        block.columns(),
-                        column + r,
-                        STRIDE);
-            }
+        double[] c = block.columns();
+        int count = block.rows();
+        if (Lanes.VECTORISED) {
+            Tile.combine(
+                    rows.grainRows(),
+                    base,
+                    GrainRow.LENGTH,
+                    minus,
+                    plus,
+                    rows.from(),
+                    count,
+                    weights,
+                    c,
+                    column,
+                    STRIDE);
+        } else {
+            Tile.combineScalar(
+                    rows.grainRows(),
+                    base,
+                    GrainRow.LENGTH,
+                    minus,
+                    plus,
+                    rows.from(),
+                    count,
+                    weights,
+                    c,
+                    column,
+                    STRIDE);
         }
     }
 }

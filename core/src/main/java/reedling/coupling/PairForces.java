@@ -15,9 +15,14 @@ final class PairForces {
 
     private final LawSet laws;
     private final StageLine gather = StageLine.of(
-            new CombineLine(false), new CombineLine(true), new FinishTurn(), new PairNormals(), new PairSliding());
+            new CombineLine(false),
+            new CombineLine(true),
+            new PairDistance(),
+            new PairApproach(),
+            new PairSliding(),
+            new PairLevers());
     private final List<StageLine> lawLines = new ArrayList<>();
-    private final StageLine scatter = StageLine.of(new BeginTurn(), new FinishTurn(), new PairScatter());
+    private final StageLine scatter = StageLine.of(new PairScatter());
 
     PairForces(LawSet laws, int materialPairs) {
         this.laws = laws;

@@ -32,8 +32,10 @@ final class StageLine {
         ContactKernel rolling = laws.rolling();
         stages.add(rolling == null ? rows -> rows.block().clear(Column.ROLLING_MOMENT, 3) : new LawStage(rolling));
         stages.add(new ContactWork());
-        stages.add(new ContactForces());
-        stages.add(new ContactTorques());
+        stages.add(new ContactForce());
+        stages.add(new FirstForces());
+        stages.add(new SecondForces());
+        stages.add(new ForceRows());
         return new StageLine(stages);
     }
 

@@ -1,8 +1,6 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.coupling;
 
-import static reedling.contact.ContactBlock.at;
-
 import java.io.IOException;
 import java.util.ArrayList;
 import java.util.Arrays;
@@ -14,6 +12,7 @@ import reedling.contact.ContactBlock;
 import reedling.contact.ContactKind;
 import reedling.contact.LawSet;
 import reedling.material.MaterialTable;
+import reedling.math.Tile;
 import reedling.neighbour.Chunk;
 import reedling.neighbour.HistoryCarry;
 import reedling.neighbour.NeighbourLists;
@@ -35,7 +34,6 @@ public final class WallContacts implements Persistent {
     static final int LOAD = 6;
 
     private static final int FACET_LIMIT = 1 << 20; // facets a grain can name
-    private static final int FORCE_COLUMN = 12; // force on the second body after the finish stage
 
     private final GrainStore grains;
     private final LawSet laws;
@@ -193,15 +191,14 @@ public final class WallContacts implements Persistent {
         int rowCount = Math.min(block.rows(), segment.activeCount() - from);
         for (int r = 0; r < rowCount; r++) {
             int grain = segment.first()[from + r];
-            int f = GrainRow.forceAt(grain);
-            for (int k = 0; k < GrainRow.FORCE_LENGTH; k++) {
-                forces[f + k] += c[at(k) + r];
-            }
+            int onGrain = ForceRows.first(r);
+            int onWall = ForceRows.second(r) + GrainRow.FORCE;
+            Tile.addRow(c, onGrain, forces, GrainRow.forceAt(grain));
             int facet = segment.second()[from + r];
             WallPose pose = facets.pose(facet);
             int to = LOAD * facets.wallOf(facet);
             int at = GrainRow.at(grain);
-            double fx = c[at(FORCE_COLUMN) + r], fy = c[at(FORCE_COLUMN + 1) + r], fz = c[at(FORCE_COLUMN + 2) + r];
+            double fx = c[onWall], fy = c[onWall + 1], fz = c[onWall + 2];
             // The force acts where the grain's own torque says: torque of the pair about the pivot is conserved.
             double ax = rows[at] - pose.centreX(),
                     ay = rows[at + 1] - pose.centreY(),
@@ -209,9 +206,9 @@ public final class WallContacts implements Persistent {
             load[to] += fx;
             load[to + 1] += fy;
             load[to + 2] += fz;
-            load[to + 3] += ay * fz - az * fy - c[at(0) + r];
-            load[to + 4] += az * fx - ax * fz - c[at(1) + r];
-            load[to + 5] += ax * fy - ay * fx - c[at(2) + r];
+            load[to + 3] += ay * fz - az * fy - c[onGrain + GrainRow.TORQUE];
+            load[to + 4] += az * fx - ax * fz - c[onGrain + GrainRow.TORQUE + 1];
+            load[to + 5] += ax * fy - ay * fx - c[onGrain + GrainRow.TORQUE + 2];
         }
     }
 

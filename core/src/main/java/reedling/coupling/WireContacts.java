@@ -1,8 +1,6 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.coupling;
 
-import static reedling.contact.ContactBlock.at;
-
 import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
@@ -13,6 +11,7 @@ import reedling.contact.ContactBlock;
 import reedling.contact.ContactKind;
 import reedling.contact.LawSet;
 import reedling.material.MaterialTable;
+import reedling.math.Tile;
 import reedling.neighbour.Chunk;
 import reedling.neighbour.ChunkLayout;
 import reedling.neighbour.HistoryCarry;
@@ -33,8 +32,6 @@ import reedling.structure.Structure;
  * <p>Threads: each chunk's rows belong to its task; nodes add loads of all chunks in chunk order after a barrier.
  */
 public final class WireContacts implements NodalLoads, Persistent {
-
-    private static final int SECOND = 8;
 
     private final GrainStore grains;
     private final LawSet laws;
@@ -229,11 +226,8 @@ public final class WireContacts implements NodalLoads, Persistent {
         double[] exports = rows.segment().exports();
         int count = Math.min(block.rows(), rows.segment().activeCount() - from);
         for (int r = 0; r < count; r++) {
-            int f = NearGrains.forceAt(rows.near()[from + r]);
-            for (int k = 0; k < GrainRow.FORCE_LENGTH; k++) {
-                forces[f + k] += c[at(k) + r];
-                exports[PairSegment.PAD + 8 * (from + r) + k] = c[at(SECOND + k) + r];
-            }
+            Tile.addRow(c, ForceRows.first(r), forces, NearGrains.forceAt(rows.near()[from + r]));
+            Tile.copyRow(c, ForceRows.second(r), exports, PairSegment.PAD + 8 * (from + r));
         }
     }
 

@@ -10,8 +10,11 @@ import jdk.incubator.vector.VectorShuffle;
  * four, two and one places apart. The same rounds turn columns back into rows. Plain versions with the same bits run
  * where there are no 512-bit vectors.
  *
- * <p>The first round and the other two are methods of their own, with the tile in memory between them: one method for all
- * passes the compiler's limit on inlined code, and every vector becomes an object.
+ * <p>The first round and the other two stand in methods of their own, with the tile in memory between them: one method
+ * for all passes the compiler's limit on inlined code, and every vector becomes an object. After the first round the
+ * tile falls into two quads, vectors 0-3 and 4-7, which the later rounds keep apart; so a stage that wants four columns
+ * turns one quad and goes on with them in registers ({@link #swap2}, {@link #swap1} and the blends beside them). Loops
+ * over tiles stand inside the methods, so that masks and shuffles stay in registers from tile to tile.
  */
 public final class Tile {
 
@@ -25,16 +28,18 @@ public final class Tile {
     private Tile() {}
 
     /**
-     * Combines the rows of eight pairs and does the first round of turning the result into columns; after
-     * {@link #finishTurn}, lane c of {@code weight * row(first) + row(second)} of pair k stands at
-     * {@code columns[at + c * stride + k]}.
+     * Combines the rows of pairs, {@code weight * row(first) + row(second)}, and does the first round of turning each
+     * eight of them into columns.
      *
      * @param rows the array of rows
      * @param base index of the wanted eight doubles of row 0
      * @param length doubles from one row to the next
-     * @param first row numbers of the first bodies; eight are read from {@code pair}
+     * @param first row numbers of the first bodies, read from {@code pair}
      * @param second row numbers of the second bodies
+     * @param count pairs, a multiple of eight
      * @param weight eight factors of the first row: -1 for a difference, +1 for a sum
+     * @param at index of column 0 of the first tile; the next tile follows eight doubles on
+     * @param stride doubles from one column to the next
      */
     public static void combine(
             double[] rows,
@@ -43,86 +48,77 @@ public final class Tile {
             int[] first,
             int[] second,
             int pair,
+            int count,
             double[] weight,
             double[] columns,
             int at,
             int stride) {
         DoubleVector w = DoubleVector.fromArray(Lanes.SPECIES, weight, 0);
-        DoubleVector a = combined(rows, base + length * first[pair], base + length * second[pair], w);
-        DoubleVector b = combined(rows, base + length * first[pair + 1], base + length * second[pair + 1], w);
-        DoubleVector c = combined(rows, base + length * first[pair + 2], base + length * second[pair + 2], w);
-        DoubleVector d = combined(rows, base + length * first[pair + 3], base + length * second[pair + 3], w);
-        DoubleVector e = combined(rows, base + length * first[pair + 4], base + length * second[pair + 4], w);
-        DoubleVector f = combined(rows, base + length * first[pair + 5], base + length * second[pair + 5], w);
-        DoubleVector g = combined(rows, base + length * first[pair + 6], base + length * second[pair + 6], w);
-        DoubleVector h = combined(rows, base + length * first[pair + 7], base + length * second[pair + 7], w);
-
-        DoubleVector ae = crossed(a, e, SWAP_4, UPPER_4), bf = crossed(b, f, SWAP_4, UPPER_4);
-        DoubleVector cg = crossed(c, g, SWAP_4, UPPER_4), dh = crossed(d, h, SWAP_4, UPPER_4);
-        store(a.blend(ae, UPPER_4), columns, at);
-        store(b.blend(bf, UPPER_4), columns, at + stride);
-        store(c.blend(cg, UPPER_4), columns, at + 2 * stride);
-        store(d.blend(dh, UPPER_4), columns, at + 3 * stride);
-        store(ae.blend(e, UPPER_4), columns, at + 4 * stride);
-        store(bf.blend(f, UPPER_4), columns, at + 5 * stride);
-        store(cg.blend(g, UPPER_4), columns, at + 6 * stride);
-        store(dh.blend(h, UPPER_4), columns, at + 7 * stride);
+        for (int t = 0; t < count; t += Lanes.TILE) {
+            int p = pair + t;
+            DoubleVector a = combined(rows, base + length * first[p], base + length * second[p], w);
+            DoubleVector b = combined(rows, base + length * first[p + 1], base + length * second[p + 1], w);
+            DoubleVector c = combined(rows, base + length * first[p + 2], base + length * second[p + 2], w);
+            DoubleVector d = combined(rows, base + length * first[p + 3], base + length * second[p + 3], w);
+            DoubleVector e = combined(rows, base + length * first[p + 4], base + length * second[p + 4], w);
+            DoubleVector f = combined(rows, base + length * first[p + 5], base + length * second[p + 5], w);
+            DoubleVector g = combined(rows, base + length * first[p + 6], base + length * second[p + 6], w);
+            DoubleVector h = combined(rows, base + length * first[p + 7], base + length * second[p + 7], w);
+            store4(a, e, columns, at + t, stride);
+            store4(b, f, columns, at + t + stride, stride);
+            store4(c, g, columns, at + t + 2 * stride, stride);
+            store4(d, h, columns, at + t + 3 * stride, stride);
+        }
     }
 
-    /** Second and third round of a turn, in place. */
-    public static void finishTurn(double[] columns, int at, int stride) {
-        DoubleVector a = load(columns, at), b = load(columns, at + stride);
-        DoubleVector c = load(columns, at + 2 * stride), d = load(columns, at + 3 * stride);
-        DoubleVector e = load(columns, at + 4 * stride), f = load(columns, at + 5 * stride);
-        DoubleVector g = load(columns, at + 6 * stride), h = load(columns, at + 7 * stride);
-
-        DoubleVector ac = crossed(a, c, SWAP_2, UPPER_2), bd = crossed(b, d, SWAP_2, UPPER_2);
-        DoubleVector eg = crossed(e, g, SWAP_2, UPPER_2), fh = crossed(f, h, SWAP_2, UPPER_2);
-        DoubleVector a2 = a.blend(ac, UPPER_2),
-                b2 = b.blend(bd, UPPER_2),
-                c2 = ac.blend(c, UPPER_2),
-                d2 = bd.blend(d, UPPER_2);
-        DoubleVector e2 = e.blend(eg, UPPER_2),
-                f2 = f.blend(fh, UPPER_2),
-                g2 = eg.blend(g, UPPER_2),
-                h2 = fh.blend(h, UPPER_2);
-
-        DoubleVector ab = crossed(a2, b2, SWAP_1, UPPER_1), cd = crossed(c2, d2, SWAP_1, UPPER_1);
-        DoubleVector ef = crossed(e2, f2, SWAP_1, UPPER_1), gh = crossed(g2, h2, SWAP_1, UPPER_1);
-        store(a2.blend(ab, UPPER_1), columns, at);
-        store(ab.blend(b2, UPPER_1), columns, at + stride);
-        store(c2.blend(cd, UPPER_1), columns, at + 2 * stride);
-        store(cd.blend(d2, UPPER_1), columns, at + 3 * stride);
-        store(e2.blend(ef, UPPER_1), columns, at + 4 * stride);
-        store(ef.blend(f2, UPPER_1), columns, at + 5 * stride);
-        store(g2.blend(gh, UPPER_1), columns, at + 6 * stride);
-        store(gh.blend(h2, UPPER_1), columns, at + 7 * stride);
+    /** Stores two vectors that stand four apart in a tile, their upper and lower halves exchanged: part of the first round. */
+    public static void store4(DoubleVector lower, DoubleVector upper, double[] columns, int at, int stride) {
+        DoubleVector swapped = crossed(lower, upper, SWAP_4, UPPER_4);
+        lower.blend(swapped, UPPER_4).intoArray(columns, at);
+        swapped.blend(upper, UPPER_4).intoArray(columns, at + 4 * stride);
     }
 
-    /** First round of a turn, in place. */
-    public static void beginTurn(double[] columns, int at, int stride) {
-        DoubleVector a = load(columns, at), b = load(columns, at + stride);
-        DoubleVector c = load(columns, at + 2 * stride), d = load(columns, at + 3 * stride);
-        DoubleVector e = load(columns, at + 4 * stride), f = load(columns, at + 5 * stride);
-        DoubleVector g = load(columns, at + 6 * stride), h = load(columns, at + 7 * stride);
-        DoubleVector ae = crossed(a, e, SWAP_4, UPPER_4), bf = crossed(b, f, SWAP_4, UPPER_4);
-        DoubleVector cg = crossed(c, g, SWAP_4, UPPER_4), dh = crossed(d, h, SWAP_4, UPPER_4);
-        store(a.blend(ae, UPPER_4), columns, at);
-        store(b.blend(bf, UPPER_4), columns, at + stride);
-        store(c.blend(cg, UPPER_4), columns, at + 2 * stride);
-        store(d.blend(dh, UPPER_4), columns, at + 3 * stride);
-        store(ae.blend(e, UPPER_4), columns, at + 4 * stride);
-        store(bf.blend(f, UPPER_4), columns, at + 5 * stride);
-        store(cg.blend(g, UPPER_4), columns, at + 6 * stride);
-        store(dh.blend(h, UPPER_4), columns, at + 7 * stride);
+    /** The quarters that two vectors two apart must exchange, each already in the other's place. */
+    public static DoubleVector swap2(DoubleVector lower, DoubleVector upper) {
+        return crossed(lower, upper, SWAP_2, UPPER_2);
+    }
+
+    /** The earlier of two vectors two apart after the exchange; the later is {@code take2(swapped, upper)}. */
+    public static DoubleVector take2(DoubleVector base, DoubleVector upperPlaces) {
+        return base.blend(upperPlaces, UPPER_2);
+    }
+
+    /** The numbers that two neighbouring vectors must exchange, each already in the other's place. */
+    public static DoubleVector swap1(DoubleVector lower, DoubleVector upper) {
+        return crossed(lower, upper, SWAP_1, UPPER_1);
+    }
+
+    /** The earlier of two neighbouring vectors after the exchange; the later is {@code take1(swapped, upper)}. */
+    public static DoubleVector take1(DoubleVector base, DoubleVector upperPlaces) {
+        return base.blend(upperPlaces, UPPER_1);
+    }
+
+    /** Second and third round of a turn of one quad (four columns) of so many tiles, in place. */
+    public static void finishQuad(double[] columns, int at, int stride, int tiles) {
+        for (int t = 0; t < tiles; t++) {
+            int k = at + Lanes.TILE * t;
+            DoubleVector a = load(columns, k), b = load(columns, k + stride);
+            DoubleVector c = load(columns, k + 2 * stride), d = load(columns, k + 3 * stride);
+            DoubleVector ac = swap2(a, c), bd = swap2(b, d);
+            DoubleVector a2 = take2(a, ac), b2 = take2(b, bd), c2 = take2(ac, c), d2 = take2(bd, d);
+            DoubleVector ab = swap1(a2, b2), cd = swap1(c2, d2);
+            take1(a2, ab).intoArray(columns, k);
+            take1(ab, b2).intoArray(columns, k + stride);
+            take1(c2, cd).intoArray(columns, k + 2 * stride);
+            take1(cd, d2).intoArray(columns, k + 3 * stride);
+        }
     }
 
     private static DoubleVector combined(double[] rows, int first, int second, DoubleVector weight) {
-        return DoubleVector.fromArray(Lanes.SPECIES, rows, first)
-                .fma(weight, DoubleVector.fromArray(Lanes.SPECIES, rows, second));
+        return load(rows, first).fma(weight, load(rows, second));
     }
 
-    /** The combined rows of eight pairs, one number at a time and not turned yet: {@link #turnScalar} turns them. */
+    /** The combined rows of pairs as columns, one number at a time. */
     public static void combineScalar(
             double[] rows,
             int base,
@@ -130,15 +126,16 @@ public final class Tile {
             int[] first,
             int[] second,
             int pair,
+            int count,
             double[] weight,
             double[] columns,
             int at,
             int stride) {
-        for (int k = 0; k < Lanes.TILE; k++) {
+        for (int k = 0; k < count; k++) {
             int i = base + length * first[pair + k];
             int j = base + length * second[pair + k];
             for (int c = 0; c < Lanes.TILE; c++) {
-                columns[at + k * stride + c] = Math.fma(rows[i + c], weight[c], rows[j + c]);
+                columns[at + c * stride + k] = Math.fma(rows[i + c], weight[c], rows[j + c]);
             }
         }
     }
@@ -154,7 +151,7 @@ public final class Tile {
         }
     }
 
-    /** Turns eight columns back into rows, in place: {@link #beginTurn} and {@link #finishTurn} one number at a time. */
+    /** Turns eight columns back into rows, in place: all three rounds, one number at a time. */
     public static void turnScalar(double[] columns, int at, int stride) {
         for (int row = 0; row < Lanes.TILE; row++) {
             for (int c = 0; c < row; c++) {
@@ -172,10 +169,6 @@ public final class Tile {
 
     private static DoubleVector load(double[] from, int at) {
         return DoubleVector.fromArray(Lanes.SPECIES, from, at);
-    }
-
-    private static void store(DoubleVector value, double[] to, int at) {
-        value.intoArray(to, at);
     }
 
     /**

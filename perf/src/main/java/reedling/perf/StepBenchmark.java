@@ -26,7 +26,13 @@ import reedling.run.Simulation;
 @Measurement(iterations = 5, time = 2)
 @Fork(
         value = 1,
-        jvmArgsAppend = {"--add-modules", "jdk.incubator.vector", "-XX:-DoEscapeAnalysis", "-XX:+UseSerialGC"})
+        jvmArgsAppend = {
+            "--add-modules",
+            "jdk.incubator.vector",
+            "-XX:-DoEscapeAnalysis",
+            "-XX:ObjectAlignmentInBytes=64",
+            "-XX:+UseSerialGC"
+        })
 public class StepBenchmark {
 
     @Param({"2000", "10000"})
