@@ -123,6 +123,51 @@ class CaseCheckErrorsTest {
                         + "Exchange the two.");
     }
 
+    private static void expectOfSizes(String table, String... findings) {
+        expect("\"4 mm\"", table, findings);
+    }
+
+    @Test
+    void sieveTablesAreCompleteAndOrdered() {
+        String table = "{distribution = \"sieve-table\", basis = \"mass\", sieves = [%s]%s}";
+        String two = "{opening = \"3 mm\", retained = 20}, {opening = \"2 mm\", retained = 80}";
+        expectOfSizes(
+                table.formatted(two, ""),
+                "deck.toml:27:1 lots.small.diameter.max: is missing, though something lies on the coarsest sieve, expected"
+                        + " a size more than the coarsest opening, 3 mm. Say how far these grains reach.");
+        expectOfSizes(
+                table.formatted(two, ", pan = 5, min = \"2 mm\", max = \"4 mm\""),
+                "deck.toml:27:149 lots.small.diameter.min: is 2 mm, expected less than the finest opening, 2 mm. "
+                        + "Say how far these grains reach.");
+        expectOfSizes(
+                table.formatted("{opening = \"3 mm\", passing = 0.4}, {opening = \"2 mm\", passing = 0.6}", ""),
+                "deck.toml:27:88 lots.small.diameter.sieves[1].passing: is 0.4, expected at least what passes the finer "
+                        + "lots.small.diameter.sieves[2], 0.6. Exchange the two, or give what is retained.");
+        expectOfSizes(
+                table.formatted("{opening = \"3 mm\", passing = 1}, {opening = \"2 mm\", retained = 6}", ""),
+                "deck.toml:27:88 lots.small.diameter.sieves[1].passing: is given where other sieves have retained, "
+                        + "expected the same for all sieves. Convert one kind.");
+        expectOfSizes(
+                table.formatted("{opening = \"3 mm\", retained = 1}, {opening = \"3 mm\", retained = 6}", ""),
+                "deck.toml:27:104 lots.small.diameter.sieves[2].opening: is 3 mm as in lots.small.diameter.sieves[1], "
+                        + "expected each opening once. Remove one of the rows.");
+    }
+
+    @Test
+    void cutsOfLaboratoryDistributionsKeepSomething() {
+        expectOfSizes(
+                "{distribution = \"rosin-rammler\", basis = \"mass\", characteristic_size = \"1 mm\", uniformity = 3, "
+                        + "min = \"3 mm\", max = \"4 mm\"}",
+                "deck.toml:27:61 lots.small.diameter.characteristic_size: is 1 mm, which leaves 1.87953e-12 of the "
+                        + "distribution between min and max, expected at least 0.01. Move the cuts or the characteristic"
+                        + " size.");
+        expectOfSizes(
+                "{distribution = \"gates-gaudin-schuhmann\", basis = \"mass\", size_modulus = \"3 mm\", "
+                        + "distribution_modulus = 0.8, min = \"2 mm\", max = \"4 mm\"}",
+                "deck.toml:27:135 lots.small.diameter.max: is 4 mm, expected at most size_modulus, 3 mm. "
+                        + "No grain is larger: lower the cut.");
+    }
+
     @Test
     void sizesAreOrdered() {
         expect(
