@@ -64,6 +64,7 @@ final class RecordWriter {
         result.figures()
                 .ifPresent(one -> record.set("screen", screen(one))
                         .set("uncertainty", result.trust().contributors()));
+        record.set("results", Results.of(result));
         List<String> cautions = new ArrayList<>(identity.cautions());
         cautions.addAll(result.trust().overlaps());
         return record.set("cautions", cautions);
