@@ -168,6 +168,37 @@ class CaseCheckErrorsTest {
                         + "No grain is larger: lower the cut.");
     }
 
+    private static String probe(String keys) {
+        return Cases.small() + "\n[probes.pile]\n" + keys;
+    }
+
+    private static final long NEXT = Cases.small().lines().count() + 2;
+
+    @Test
+    void probesAreSound() {
+        assertThat(Cases.findings(probe("kind = \"heap\"\ncentre = [0, 0, 0]\nflank_from = 0.9\nflank_to = 0.5")))
+                .containsExactly("deck.toml:" + (NEXT + 4)
+                        + ":1 probes.pile.flank_to: is 0.5, expected more than flank_from, 0.9. Exchange the two.");
+        String waves = "kind = \"layer-waves\"\nmin = [0, 0, 0]\nmax = [1, 1, 1]\ncell = \"5 mm\"\n";
+        assertThat(Cases.findings(probe(waves + "motion = \"shake\"\nperiods = 12")))
+                .containsExactly("deck.toml:" + (NEXT + 6) + ":1 probes.pile.periods: is 12, expected a multiple of 8. "
+                        + "Only then do waves and background stay apart.");
+        assertThat(Cases.findings(probe(waves + "motion = \"shak\"")))
+                .singleElement()
+                .asString()
+                .contains("probes.pile.motion", "shake");
+    }
+
+    @Test
+    void aConeHasARim() {
+        String cone = "\n[walls.funnel]\nshape = \"cone\"\nmaterial = \"steel\"\ncentre = [0, 0, 0]\n"
+                + "direction = [0, 0, 1]\nlength = 1\nlow_radius = 0\nhigh_radius = 0\n";
+        assertThat(Cases.findings(Cases.small() + cone))
+                .singleElement()
+                .asString()
+                .contains("walls.funnel.high_radius: is 0, as low_radius, expected one radius above 0");
+    }
+
     @Test
     void sizesAreOrdered() {
         expect(
