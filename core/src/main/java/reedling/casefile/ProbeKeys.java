@@ -34,7 +34,7 @@ final class ProbeKeys {
             Key.preset(
                     "onset_ratio",
                     Key.quantity(Dimension.NUMBER, Range.above(1, 1000)),
-                    4.0,
+                    5.0,
                     "Waves stand out when they exceed the background by this factor in two windows in a row."));
 
     static final ValueType.Variants TYPE = new ValueType.Variants("kind", kinds());
