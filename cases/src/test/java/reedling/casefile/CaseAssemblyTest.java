@@ -2,11 +2,14 @@
 package reedling.casefile;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.Arrays;
 import org.assertj.core.data.Percentage;
 import org.junit.jupiter.api.Test;
+import reedling.probe.HeapPlan;
+import reedling.probe.WavePlan;
 import reedling.run.Model;
 import reedling.run.RunPlan;
 import reedling.structure.Body;
@@ -104,6 +107,27 @@ class CaseAssemblyTest {
         assertThat(first.structure().bodies()).hasSize(7);
         assertThat(first.structure().nodes().count).isEqualTo(7 * 25);
         assertThat(first.exits().outlets()).hasSize(2);
+    }
+
+    @Test
+    void laboratoryCasesAreAssembledWithTheirProbes() {
+        CaseAssembly heap = Shipped.assemble("heap");
+        assertThat(heap.model().grains().count()).isEqualTo(5000);
+        assertThat(heap.plan("1", "2").probes()).singleElement().isInstanceOf(HeapPlan.class);
+        CaseAssembly bed = Shipped.assemble("shaken-bed");
+        assertThat(bed.plan("1", "2").probes()).singleElement().isInstanceOfSatisfying(WavePlan.class, plan -> {
+            assertThat(plan.frequency()).isEqualTo(18);
+            assertThat(plan.area().columns()).isEqualTo(30);
+            assertThat(plan.area().rows()).isEqualTo(4);
+        });
+    }
+
+    @Test
+    void wavesNeedAVibration() {
+        assertThatThrownBy(() -> Shipped.assemble(
+                        "shaken-bed", "motions.shake={kind=\"constant-velocity\", velocity=[0, 0, 1]}"))
+                .hasMessageContaining("probes.waves.motion")
+                .hasMessageContaining("a vibration");
     }
 
     @Test

@@ -39,6 +39,14 @@ class CheckCommandTest {
         assertThat(program.out()).isASCII();
     }
 
+    /** Sieved mass: 11 % below 4 mm, 48 % below 4.5 mm; the d10 and d50 lie between their sieves. */
+    @Test
+    void sizesOfASieveTableAreForetold() {
+        assertThat(program.run("check", "heap")).isZero();
+        assertThat(program.out().replaceAll("\\s+", " "))
+                .contains("lot vetch d10 3.94 mm, d50 4.52 mm, d90 5.05 mm; about 5,000 grains");
+    }
+
     @Test
     void otherTensionIsClearOfTheHarmonics() {
         assertThat(program.run("check", "wire-deck", "--set", "wires.deck.tension=\"6 N\""))

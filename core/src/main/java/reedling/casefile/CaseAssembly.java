@@ -7,6 +7,7 @@ import java.util.Optional;
 import reedling.error.Finding;
 import reedling.material.MaterialTable;
 import reedling.particle.Lot;
+import reedling.probe.ProbePlan;
 import reedling.run.Model;
 import reedling.run.RunIdentity;
 import reedling.run.RunPlan;
@@ -19,11 +20,16 @@ import reedling.wall.Wall;
  *
  * @param model what the run starts from
  * @param screen the deck to report on, if there is one
+ * @param probes what else to measure
  * @param plugins name of each plugin in use and the version of the history it keeps
  * @param reading the case
  */
 public record CaseAssembly(
-        Model model, Optional<ScreenPlan> screen, Map<String, Integer> plugins, CaseReading reading) {
+        Model model,
+        Optional<ScreenPlan> screen,
+        List<ProbePlan> probes,
+        Map<String, Integer> plugins,
+        CaseReading reading) {
 
     /** Longest step where the case names none, s: bounds what a run does before anything moves. */
     static final double LONGEST_STEP = 1e-3;
@@ -49,6 +55,7 @@ public record CaseAssembly(
             faults.finish(); // feeds and screen need every lot
         }
         Optional<ScreenPlan> screen = ExitParts.screen(specification, wires, lots, faults);
+        List<ProbePlan> probes = ProbeParts.plans(specification, motions, faults);
         FeedParts feeds = FeedParts.make(specification, table, lots, faults);
         faults.finish();
         Model model = new Model(
@@ -63,7 +70,7 @@ public record CaseAssembly(
                 feeds.lines(),
                 ExitParts.exits(specification),
                 steps(specification, motions));
-        return new CaseAssembly(model, screen, laws.plugins(), reading);
+        return new CaseAssembly(model, screen, probes, laws.plugins(), reading);
     }
 
     private static StepSettings steps(CaseSpecification specification, MotionParts motions) {
@@ -102,6 +109,6 @@ public record CaseAssembly(
                 plugins,
                 specification.seed(),
                 reading.cautions().stream().map(Finding::toString).toList());
-        return new RunPlan(output.endTime(), intervals, screen, identity);
+        return new RunPlan(output.endTime(), intervals, screen, probes, identity);
     }
 }

@@ -29,6 +29,8 @@ final class CaseKeys {
             Key.required(
                     "bounds", new ValueType.Part(ControlKeys.BOX), "Grains whose centre leaves this box are spilled."),
             Key.optional("screen", new ValueType.Part(ControlKeys.SCREEN), "Report of a screen deck."),
+            Key.optional(
+                    "probes", new ValueType.Named(ProbeKeys.TYPE, "NAME"), "Figures taken from all grains together."),
             Key.optional("laws", new ValueType.Part(ControlKeys.LAWS), "Stages of the contact law."),
             Key.optional(
                     "fields",

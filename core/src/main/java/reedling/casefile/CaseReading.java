@@ -37,6 +37,7 @@ public final class CaseReading {
                 s.outlets(),
                 s.bounds(),
                 s.screen(),
+                s.probes(),
                 s.laws(),
                 s.fields(),
                 s.steps(),

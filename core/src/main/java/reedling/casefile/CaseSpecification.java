@@ -23,6 +23,7 @@ import reedling.material.MaterialPair;
  * @param outlets by name
  * @param bounds a grain whose centre leaves it is counted as spilled and removed
  * @param screen present if the report is about a screen deck
+ * @param probes what else is measured, by name
  * @param laws stages of the contact law
  * @param fields forces on single grains, by name
  * @param steps limits of the time step
@@ -42,6 +43,7 @@ public record CaseSpecification(
         Map<String, OutletSpecification> outlets,
         BoxRegion bounds,
         Optional<ScreenSpecification> screen,
+        Map<String, ProbeSpecification> probes,
         LawsSpecification laws,
         Map<String, PluginChoice> fields,
         StepSpecification steps,

@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.casefile;
 
+import reedling.particle.SizeDistribution;
+
 /** Sizes of the grains of a lot; all lengths in m. */
 public sealed interface DiameterSpecification {
 
@@ -48,6 +50,25 @@ public sealed interface DiameterSpecification {
         @Override
         public double typical() {
             return 0.5 * (smallest + largest);
+        }
+    }
+
+    /** A distribution made when it was read; its typical size is that of the grain of mean volume. */
+    record Graded(SizeDistribution sizes) implements DiameterSpecification {
+
+        @Override
+        public double smallest() {
+            return sizes.smallest();
+        }
+
+        @Override
+        public double largest() {
+            return sizes.largest();
+        }
+
+        @Override
+        public double typical() {
+            return StrictMath.cbrt(sizes.meanCube());
         }
     }
 }

@@ -26,6 +26,7 @@ final class Draft {
     final Map<String, WireSpecification> wires;
     final Map<String, OutletSpecification> outlets;
     final Map<String, PluginChoice> fields;
+    final Map<String, ProbeSpecification> probes;
     final Optional<BoxRegion> bounds;
     final Optional<ScreenSpecification> screen;
     final Optional<LawsSpecification> laws;
@@ -48,6 +49,7 @@ final class Draft {
                 "outlets",
                 (name, values) -> BoxKeys.read(values, rules).map(box -> new OutletSpecification(name, box)));
         fields = Collections.unmodifiableMap(new LinkedHashMap<>(root.<PluginChoice>named("fields")));
+        probes = each("probes", (name, values) -> ProbeKeys.read(name, values, rules));
         bounds = part("bounds").flatMap(values -> BoxKeys.read(values, rules));
         screen = part("screen").map(ControlKeys::screen);
         laws = part("laws").map(ControlKeys::laws);
@@ -59,7 +61,7 @@ final class Draft {
         return root.has(key) ? Optional.of(root.part(key)).filter(Values::sound) : Optional.empty();
     }
 
-    private <T> Map<String, T> each(String key, BiFunction<String, Values, Optional<T>> reader) {
+    private <T> Map<String, T> each(String key, BiFunction<String, Values, ? extends Optional<? extends T>> reader) {
         Map<String, T> sound = new LinkedHashMap<>();
         root.<Values>named(key).forEach((name, values) -> {
             if (values.sound()) {
@@ -101,6 +103,7 @@ final class Draft {
                 outlets,
                 bounds.orElseThrow(),
                 screen,
+                probes,
                 laws.orElseThrow(),
                 fields,
                 steps.orElseThrow(),

@@ -3,6 +3,7 @@ package reedling.casefile;
 
 import reedling.feed.FeedRate;
 import reedling.feed.Rain;
+import reedling.particle.SizeDistribution;
 import reedling.run.Model;
 import reedling.unit.Dimension;
 
@@ -18,6 +19,10 @@ final class FeedFigures {
     }
 
     void writeTo(ForecastText text) {
+        text.heading("Sizes (by mass; grains by number)");
+        for (int lot = 0; lot < model.lots().size(); lot++) {
+            lot(lot, text);
+        }
         text.heading("Grains");
         int present = model.grains().count();
         double presentMass = 0;
@@ -41,6 +46,37 @@ final class FeedFigures {
         }
         text.entry("in all", "about " + amount(count, mass) + " in " + ForecastText.figure(end, Dimension.TIME));
         text.entry("present at once", present());
+    }
+
+    private void lot(int lot, ForecastText text) {
+        SizeDistribution sizes = model.lots().get(lot).sizes();
+        text.entry(
+                "lot " + model.lots().get(lot).name(),
+                "d10 " + length(sizes.diameterPassing(0.1)) + ", d50 " + length(sizes.diameterPassing(0.5)) + ", d90 "
+                        + length(sizes.diameterPassing(0.9)) + "; about " + ForecastText.number(grainsOf(lot))
+                        + " grains");
+    }
+
+    /** Grains of a lot in the whole run: those there at the start, and the mean number fed. */
+    private double grainsOf(int lot) {
+        double count = 0;
+        for (int g = 0; g < model.grains().count(); g++) {
+            count += model.grains().lot()[g] == lot ? 1 : 0;
+        }
+        double end = specification.output().endTime();
+        for (Model.FeedLine line : model.feeds()) {
+            Rain rain = line.feed().plan();
+            for (int k = 0; k < line.lotNumbers().length; k++) {
+                count += line.lotNumbers()[k] == lot
+                        ? rain.mix().numberShare(k) * count(rain, rain.rate().owed(end))
+                        : 0;
+            }
+        }
+        return count;
+    }
+
+    private static String length(double metres) {
+        return ForecastText.figure(metres, Dimension.LENGTH);
     }
 
     private String present() {

@@ -10,7 +10,7 @@ import reedling.unit.QuantityText;
 /** Keys of lots of grain. */
 final class LotKeys {
 
-    private static final ValueType SIZE = Key.quantity(Dimension.LENGTH, Range.closed(1e-6, 1));
+    private static final ValueType SIZE = SizeKeys.SIZE;
 
     private static final ValueType.Variants DISTRIBUTION = new ValueType.Variants("distribution", distributions());
 
@@ -20,7 +20,7 @@ final class LotKeys {
             Key.required(
                     "diameter",
                     new ValueType.QuantityOr((ValueType.Quantity) SIZE, DISTRIBUTION),
-                    "One diameter for all grains, or a distribution by number."));
+                    "One diameter for all grains, or a distribution."));
 
     private LotKeys() {}
 
@@ -31,41 +31,57 @@ final class LotKeys {
         sections.put(
                 "truncated-normal",
                 Section.of(
-                        "Normal distribution cut at both ends.",
+                        "Normal distribution by number, cut at both ends.",
                         Key.required("mean", SIZE, "Mean before cutting."),
                         Key.required("deviation", SIZE, "Standard deviation before cutting."),
                         min,
                         max));
         sections.put("uniform", Section.of("All diameters between two limits equally likely, by number.", min, max));
+        sections.putAll(SizeKeys.sections());
         return sections;
     }
 
     static Optional<LotSpecification> read(String name, Values values, Rules rules) {
-        DiameterSpecification diameter = values.get("diameter") instanceof Values table
-                ? distribution(table)
-                : new DiameterSpecification.Single(values.number("diameter"));
-        boolean sound = !(values.get("diameter") instanceof Values table) || ordered(table, rules);
-        return sound ? Optional.of(new LotSpecification(name, values.text("material"), diameter)) : Optional.empty();
+        Optional<DiameterSpecification> diameter = values.get("diameter") instanceof Values table
+                ? distribution(table, rules)
+                : Optional.of(new DiameterSpecification.Single(values.number("diameter")));
+        return diameter.map(sizes -> new LotSpecification(name, values.text("material"), sizes));
     }
 
-    private static DiameterSpecification distribution(Values table) {
-        double smallest = table.number("min");
-        double largest = table.number("max");
-        return table.text("distribution").equals("uniform")
-                ? new DiameterSpecification.Uniform(smallest, largest)
-                : new DiameterSpecification.TruncatedNormal(
-                        table.number("mean"), table.number("deviation"), smallest, largest);
+    private static Optional<DiameterSpecification> distribution(Values table, Rules rules) {
+        return switch (table.text("distribution")) {
+            case "uniform" ->
+                ordered(table, rules)
+                        ? Optional.of(new DiameterSpecification.Uniform(table.number("min"), table.number("max")))
+                        : Optional.empty();
+            case "truncated-normal" ->
+                ordered(table, rules)
+                        ? Optional.of(new DiameterSpecification.TruncatedNormal(
+                                table.number("mean"),
+                                table.number("deviation"),
+                                table.number("min"),
+                                table.number("max")))
+                        : Optional.empty();
+            default -> SizeKeys.read(table, rules);
+        };
     }
 
-    private static boolean ordered(Values table, Rules rules) {
-        double smallest = table.number("min");
-        double largest = table.number("max");
+    /** Whether the largest size of a table is above the smallest; reports it otherwise. */
+    static boolean rising(Values table, double smallest, double largest, Rules rules) {
         if (smallest >= largest) {
             rules.error(
                     table.path() + ".max",
                     length(largest),
                     "more than min, " + length(smallest),
                     "Exchange the two, or give one diameter for all grains.");
+        }
+        return smallest < largest;
+    }
+
+    private static boolean ordered(Values table, Rules rules) {
+        double smallest = table.number("min");
+        double largest = table.number("max");
+        if (!rising(table, smallest, largest, rules)) {
             return false;
         }
         double mean = table.has("mean") ? table.number("mean") : 0.5 * (smallest + largest);

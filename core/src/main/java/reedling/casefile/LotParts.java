@@ -34,6 +34,7 @@ final class LotParts {
             case DiameterSpecification.Uniform uniform -> new UniformSize(uniform.smallest(), uniform.largest());
             case DiameterSpecification.TruncatedNormal normal ->
                 new NormalSize(normal.mean(), normal.deviation(), normal.smallest(), normal.largest());
+            case DiameterSpecification.Graded graded -> graded.sizes();
         };
     }
 

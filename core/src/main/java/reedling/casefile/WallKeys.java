@@ -63,6 +63,17 @@ final class WallKeys {
                             "Ends with a flat disc; low is where the direction comes from. Only for grains inside."))
             .after(COMMON);
 
+    private static final ValueType RIM = Key.quantity(Dimension.LENGTH, Range.closed(0, 1000));
+
+    private static final Section CONE = Section.of(
+                    "Conical sheet of no thickness about an axis, open at both ends: a funnel. Grains may be on both sides.",
+                    Key.required("centre", Key.vector(Dimension.LENGTH), "Middle of the axis."),
+                    Key.required("direction", Key.direction(), "Direction of the axis; its length does not matter."),
+                    Key.required("low_radius", RIM, "Radius at the end the direction comes from."),
+                    Key.required("high_radius", RIM, "Radius at the other end."),
+                    Key.required("length", EXTENT, "Length along the axis."))
+            .after(COMMON);
+
     static final ValueType.Variants TYPE = new ValueType.Variants("shape", shapes());
 
     private WallKeys() {}
@@ -72,6 +83,7 @@ final class WallKeys {
         shapes.put("plane", PLANE);
         shapes.put("box", BOX);
         shapes.put("cylinder", CYLINDER);
+        shapes.put("cone", CONE);
         return shapes;
     }
 
@@ -79,6 +91,7 @@ final class WallKeys {
         Optional<? extends WallShape> shape = switch (values.text("shape")) {
             case "plane" -> plane(values, rules);
             case "box" -> box(values, rules);
+            case "cone" -> cone(values, rules);
             default -> Optional.of(cylinder(values));
         };
         return shape.map(surface ->
@@ -142,6 +155,17 @@ final class WallKeys {
                 values.number("length"),
                 side(values),
                 enums(WallShape.End.class, values.words("closed_ends")));
+    }
+
+    private static Optional<WallShape.Cone> cone(Values values, Rules rules) {
+        double low = values.number("low_radius");
+        double high = values.number("high_radius");
+        if (low == 0 && high == 0) {
+            rules.error(values.path() + ".high_radius", "0, as low_radius", "one radius above 0", "Widen one end.");
+            return Optional.empty();
+        }
+        return Optional.of(new WallShape.Cone(
+                values.vector("centre"), values.vector("direction"), low, high, values.number("length")));
     }
 
     private static WallShape.Side side(Values values) {

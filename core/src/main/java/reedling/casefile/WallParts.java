@@ -9,6 +9,7 @@ import org.joml.Vector3d;
 import reedling.material.MaterialTable;
 import reedling.wall.BoxInside;
 import reedling.wall.BoxOutside;
+import reedling.wall.ConeSheet;
 import reedling.wall.CylinderInside;
 import reedling.wall.CylinderOutside;
 import reedling.wall.HalfSpace;
@@ -39,6 +40,10 @@ final class WallParts {
             case WallShape.Plane plane -> plane(plane);
             case WallShape.Box box -> box(box);
             case WallShape.Cylinder cylinder -> cylinder(cylinder);
+            case WallShape.Cone cone ->
+                new Placed(
+                        new ConeSheet(cone.lowRadius(), cone.highRadius(), cone.length()),
+                        Placement.facing(cone.centre(), cone.direction()));
         };
         return new Wall(
                 wall.name(),

@@ -63,4 +63,16 @@ public sealed interface WallShape {
      */
     record Cylinder(Vector3dc centre, Vector3dc direction, double radius, double length, Side side, Set<End> closedEnds)
             implements WallShape {}
+
+    /**
+     * Conical sheet about an axis, open at both ends.
+     *
+     * @param centre middle of the axis
+     * @param direction of the axis, not zero
+     * @param lowRadius at the end its direction comes from, m
+     * @param highRadius at the other end, m
+     * @param length along the axis, m
+     */
+    record Cone(Vector3dc centre, Vector3dc direction, double lowRadius, double highRadius, double length)
+            implements WallShape {}
 }

@@ -44,6 +44,13 @@ final class CaseOptions {
         return CaseFile.read(file(), assignments, new CasePlugins(plugins));
     }
 
+    /** The case with another seed, whatever the command line sets. */
+    CaseReading readWithSeed(PluginCatalogue plugins, long seed) {
+        List<String> all = new ArrayList<>(assignments);
+        all.add("case.seed=" + seed);
+        return CaseFile.read(file(), all, new CasePlugins(plugins));
+    }
+
     /** Name for the results: that of the folder of a file case.toml, otherwise that of the file without its ending. */
     String name() {
         Path file = file().toAbsolutePath().normalize();

@@ -21,11 +21,19 @@ class Ending {
 
     private final CompletableFuture<Integer> code = new CompletableFuture<>();
     private @Nullable Thread hook;
+    private volatile @Nullable StopFlag flag;
+    private volatile boolean signalled;
 
-    /** From now on a signal raises the flag; to be called once. */
+    /** From now on a signal raises this flag, and no longer that of a run before. */
     void stopOnSignal(StopFlag stop) {
-        hook = new Thread(() -> endWell(stop), "reedling-signal");
-        Runtime.getRuntime().addShutdownHook(hook);
+        flag = stop;
+        if (signalled) {
+            stop.raise(); // the signal came between two runs
+        }
+        if (hook == null) {
+            hook = new Thread(this::endWell, "reedling-signal");
+            Runtime.getRuntime().addShutdownHook(hook);
+        }
     }
 
     /** Says that the command has returned and everything is written. */
@@ -44,8 +52,12 @@ class Ending {
         }
     }
 
-    private void endWell(StopFlag stop) {
-        stop.raise();
+    private void endWell() {
+        signalled = true;
+        StopFlag now = flag;
+        if (now != null) {
+            now.raise();
+        }
         // A hook cannot return an exit code; the command's is the one a script asks for.
         Runtime.getRuntime().halt(code.join());
     }

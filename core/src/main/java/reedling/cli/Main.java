@@ -38,6 +38,7 @@ public final class Main {
         CommandLine commandLine = new CommandLine(new Main());
         commandLine.addSubcommand(new RunCommand(ending));
         commandLine.addSubcommand(new ResumeCommand(ending));
+        commandLine.addSubcommand(new RepeatCommand(ending));
         commandLine.addSubcommand(new CheckCommand());
         ServiceLoader.load(SubCommand.class).forEach(commandLine::addSubcommand);
         commandLine.setCaseInsensitiveEnumValuesAllowed(true);

@@ -102,7 +102,7 @@ final class ResumeCommand implements Callable<Integer> {
                     plugins,
                     ending,
                     spec.commandLine().getOut());
-            return session.run(folder, checkpoint).number();
+            return session.run(folder, checkpoint).code().number();
         } catch (IOException cause) {
             throw RunSession.unusable(path, cause);
         }

@@ -6,6 +6,7 @@ import java.io.PrintWriter;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import reedling.checkpoint.CheckpointFolder;
 import reedling.checkpoint.CheckpointReader;
@@ -40,8 +41,16 @@ record RunSession(
     private static final int WAITING_JOBS = 3;
     private static final int COLUMNS = 80;
 
-    /** Runs in a held folder and returns the exit code; from a checkpoint, if one is given. */
-    ExitCode run(RunFolder folder, @Nullable CheckpointReader checkpoint) throws IOException {
+    /**
+     * How a run went.
+     *
+     * @param code exit code
+     * @param results figures by name
+     */
+    record Ended(ExitCode code, Map<String, Double> results) {}
+
+    /** Runs in a held folder; from a checkpoint, if one is given. */
+    Ended run(RunFolder folder, @Nullable CheckpointReader checkpoint) throws IOException {
         StopFlag stop = new StopFlag();
         double resumeTime =
                 checkpoint == null ? Double.NaN : checkpoint.header().time();
@@ -57,7 +66,7 @@ record RunSession(
                 }
                 ending.stopOnSignal(stop);
                 RunLoop.Outcome outcome = loop.run(until);
-                return report(folder.path(), outcome, loop.summary());
+                return new Ended(report(folder.path(), outcome, loop.summary()), loop.results());
             }
         }
     }

@@ -67,9 +67,19 @@ public final class LotMix {
     public double meanGrainMass() {
         double grainsPerMass = 0;
         for (int k = 0; k < share.length; k++) {
-            grainsPerMass += share[k] / (density[k] * SPHERE * lot(k).sizes().meanCube());
+            grainsPerMass += share[k] / meanGrainMass(k);
         }
         return 1 / grainsPerMass;
+    }
+
+    /** Mean part of the grains of the mix that come from a lot, by number, 0 to 1. */
+    public double numberShare(int number) {
+        return share[number] * meanGrainMass() / meanGrainMass(number);
+    }
+
+    /** Mean mass of the grains of a lot, by number, kg. */
+    public double meanGrainMass(int number) {
+        return density[number] * SPHERE * lot(number).sizes().meanCube();
     }
 
     /** Largest radius that may be drawn, m. */

@@ -4,7 +4,7 @@ package reedling.particle;
 import reedling.error.RangeCheck;
 
 /**
- * Normal distribution of diameters cut at two bounds: draws outside the bounds are rejected and repeated.
+ * Normal distribution of diameters by number, cut at two bounds: draws outside the bounds are rejected and repeated.
  *
  * <p>Formula: density proportional to exp(-z^2/2), z = (d - mean)/deviation, for smallest <= d <= largest.
  * <p>Errors: a value not positive, bounds in the wrong order, less than 1 % of the normal distribution between the
@@ -49,6 +49,12 @@ public record NormalSize(double mean, double deviation, double smallest, double 
     @Override
     public double meanCube() {
         return integral(3, mean, deviation, smallest, largest) / integral(0, mean, deviation, smallest, largest);
+    }
+
+    @Override
+    public double massPassing(double diameter) {
+        double to = Math.clamp(diameter, smallest, largest);
+        return integral(3, mean, deviation, smallest, to) / integral(3, mean, deviation, smallest, largest);
     }
 
     /** Integral of d^power exp(-z^2/2) dz between the bounds by Simpson's rule. */

@@ -33,4 +33,9 @@ public record SingleSize(double diameter) implements SizeDistribution {
     public double largest() {
         return diameter;
     }
+
+    @Override
+    public double massPassing(double size) {
+        return size < diameter ? 0 : 1;
+    }
 }

@@ -2,11 +2,13 @@
 package reedling.particle;
 
 /**
- * Distribution of grain diameters by number (not by mass), m.
+ * Distribution of grain diameters, m. Whatever it was given by, diameters are drawn by number: each grain drawn is one
+ * grain, so that the mass of many draws is distributed as {@link #massPassing} says.
  *
  * <p>Threads: immutable; the random stream belongs to the caller.
  */
-public sealed interface SizeDistribution permits SingleSize, UniformSize, NormalSize {
+public sealed interface SizeDistribution
+        permits SingleSize, UniformSize, NormalSize, SieveSize, RosinRammlerSize, SchuhmannSize {
 
     /** Draws a diameter, m. */
     double diameter(RandomStream random);
@@ -19,4 +21,22 @@ public sealed interface SizeDistribution permits SingleSize, UniformSize, Normal
 
     /** Upper bound of every diameter drawn, m. */
     double largest();
+
+    /** Part of the mass in grains smaller than a diameter (m), 0 to 1. */
+    double massPassing(double diameter);
+
+    /** Diameter (m) that a part of the mass is smaller than, by bisection: 0.5 gives the d50. */
+    default double diameterPassing(double part) {
+        double low = smallest();
+        double high = largest();
+        while (high - low > 1e-13 * high) {
+            double middle = 0.5 * (low + high);
+            if (massPassing(middle) < part) {
+                low = middle;
+            } else {
+                high = middle;
+            }
+        }
+        return 0.5 * (low + high);
+    }
 }

@@ -64,6 +64,7 @@ final class RecordWriter {
         result.figures()
                 .ifPresent(one -> record.set("screen", screen(one))
                         .set("uncertainty", result.trust().contributors()));
+        record.set("results", Results.of(result));
         List<String> cautions = new ArrayList<>(identity.cautions());
         cautions.addAll(result.trust().overlaps());
         return record.set("cautions", cautions);
@@ -141,7 +142,12 @@ final class RecordWriter {
         map.put("throughput_kg_per_s_m", estimate(figures.throughput()));
         map.put("undersize_recovery", estimate(figures.recovery()));
         map.put("product_lost", estimate(figures.loss()));
+        map.put("undersize_in_over", figures.separation().undersizeInOver());
+        map.put("product_in_passed", figures.separation().productInPassed());
         map.put("d50_m", estimate(figures.cutSize()));
+        map.put("d25_m", figures.partition().sizeAt(0.25));
+        map.put("d75_m", figures.partition().sizeAt(0.75));
+        map.put("probable_error_m", figures.partition().probableError());
         map.put("open_area_pegged_percent", estimate(figures.pegged()));
         map.put("worst_stress_range_at_most_Pa", estimate(figures.stressRange()));
         map.put("worst_stress_range_at_least_Pa", figures.stressRangeLower());

@@ -4,6 +4,7 @@ package reedling.run;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.util.Locale;
+import java.util.Map;
 import reedling.checkpoint.CheckpointHeader;
 import reedling.checkpoint.CheckpointReader;
 import reedling.checkpoint.CheckpointWriter;
@@ -13,6 +14,7 @@ import reedling.output.RunRecord;
 import reedling.output.SnapshotFrame;
 import reedling.output.SnapshotWriter;
 import reedling.output.WriteQueue;
+import reedling.probe.BulkProbe;
 
 /**
  * The outer loop of a run: steps, looks, and writes what is due at the first step at or after its time; it never changes
@@ -219,6 +221,13 @@ public final class RunLoop implements AutoCloseable {
         plan.screen()
                 .ifPresent(screen -> output.queue()
                         .submit("partition.csv", PartitionTable.saving(probes.sizes(), screen, output.folder())));
+        for (BulkProbe probe : probes.bulk()) {
+            String table =
+                    String.join("\n", probe.closingTable(simulation.model().grains())) + "\n";
+            String name = "probe-" + probe.name() + "-end.csv";
+            output.queue()
+                    .submit(name, () -> WholeFile.writeText(output.folder().resolve(name), table));
+        }
         summary = summaryText(word);
         String text = summary;
         output.queue()
@@ -302,6 +311,11 @@ public final class RunLoop implements AutoCloseable {
     /** The closing summary, also in {@code summary.txt}; empty before the run ended. */
     public String summary() {
         return summary;
+    }
+
+    /** The figures of the run by name, as they stand; {@code run.json} holds the same. */
+    public Map<String, Double> results() {
+        return Results.of(RunResult.of(simulation, probes, plan));
     }
 
     /** What was measured. */

@@ -1,8 +1,10 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.run;
 
+import java.util.List;
 import java.util.Optional;
 import reedling.probe.MeasuredWindow;
+import reedling.probe.ProbePlan;
 
 /**
  * What a run writes, when, and what it is measured for; SI.
@@ -10,9 +12,24 @@ import reedling.probe.MeasuredWindow;
  * @param endTime simulated end, s
  * @param intervals when what is written
  * @param screen the deck to report on, if there is one
+ * @param probes what else is measured
  * @param identity what goes into the run record besides results
  */
-public record RunPlan(double endTime, Intervals intervals, Optional<ScreenPlan> screen, RunIdentity identity) {
+public record RunPlan(
+        double endTime,
+        Intervals intervals,
+        Optional<ScreenPlan> screen,
+        List<ProbePlan> probes,
+        RunIdentity identity) {
+
+    public RunPlan {
+        probes = List.copyOf(probes);
+    }
+
+    /** Without probes. */
+    public RunPlan(double endTime, Intervals intervals, Optional<ScreenPlan> screen, RunIdentity identity) {
+        this(endTime, intervals, screen, List.of(), identity);
+    }
 
     /** Batches of the measured window. */
     public static final int BATCHES = 10;

@@ -6,11 +6,14 @@ import java.util.List;
 import java.util.Optional;
 import reedling.checkpoint.Persistent;
 import reedling.probe.BatchMean;
+import reedling.probe.BulkProbe;
 import reedling.probe.DeckFrame;
 import reedling.probe.DeckOpening;
 import reedling.probe.MeasuredWindow;
 import reedling.probe.OverlapSample;
 import reedling.probe.PeggingWatch;
+import reedling.probe.ProbePlan;
+import reedling.probe.Reading;
 import reedling.probe.SizePassage;
 import reedling.probe.WallLoads;
 import reedling.probe.WireLoads;
@@ -30,6 +33,10 @@ public final class RunProbes {
     private final StepTally steps = new StepTally();
     private final Optional<Deck> deck;
     private final Due sampleDue;
+    private final List<Bulk> bulk = new ArrayList<>();
+
+    /** A probe and when it looks. */
+    private record Bulk(BulkProbe probe, Due due) {}
 
     /**
      * What is measured on a screen deck.
@@ -65,6 +72,10 @@ public final class RunProbes {
         deck = plan.screen().map(screen -> Deck.of(screen, window, model));
         sampleDue = new Due(Math.min(SAMPLE_EVERY, plan.intervals().table()), done);
         simulation.watch(sizes);
+        for (ProbePlan each : plan.probes()) {
+            BulkProbe probe = each.open();
+            bulk.add(new Bulk(probe, new Due(probe.every(), done)));
+        }
     }
 
     /** Looks at what the last step left. */
@@ -78,11 +89,18 @@ public final class RunProbes {
         if (sampleDue.take(time)) {
             sample(time);
         }
+        for (Bulk each : bulk) {
+            if (each.due.take(time)) {
+                each.probe.sample(time, simulation.model().grains());
+            }
+        }
     }
 
     /** Looks at what stands before the first step. */
     void sample() {
         sample(simulation.time());
+        bulk.forEach(
+                each -> each.probe.sample(simulation.time(), simulation.model().grains()));
     }
 
     private void sample(double time) {
@@ -108,6 +126,7 @@ public final class RunProbes {
     List<Persistent> persistents() {
         List<Persistent> all = new ArrayList<>(List.of(wireLoads, wallLoads, sizes, overlaps, steps));
         deck.ifPresent(one -> all.addAll(List.of(one.pegging, one.opening, one.openAreaLost)));
+        bulk.forEach(each -> all.add(each.probe));
         return all;
     }
 
@@ -133,6 +152,16 @@ public final class RunProbes {
 
     public StepTally steps() {
         return steps;
+    }
+
+    /** The probes of the case. */
+    public List<BulkProbe> bulk() {
+        return bulk.stream().map(Bulk::probe).toList();
+    }
+
+    /** Figures of a probe as they stand. */
+    public List<Reading> readings(BulkProbe probe) {
+        return probe.readings(simulation.model().grains());
     }
 
     /** What is measured on the deck; empty without a screen. */

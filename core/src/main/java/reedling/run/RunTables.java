@@ -11,13 +11,15 @@ import reedling.output.RunFolder;
 import reedling.output.Table;
 import reedling.output.Table.Column;
 import reedling.output.WriteQueue;
+import reedling.probe.BulkProbe;
+import reedling.probe.Reading;
 import reedling.probe.WallLoads;
 import reedling.probe.WireLoads;
 import reedling.probe.WirePeaks;
 
 /**
- * The tables of a run: passage.csv by lot, wires.csv with one row a wire and time, walls.csv, ledger.csv, steps.csv.
- * Loads are extremes since the row before. Threads: rows are added by the thread of the step loop.
+ * The tables of a run: passage.csv by lot, wires.csv with one row a wire and time, walls.csv, ledger.csv, steps.csv,
+ * and probe-NAME.csv for each probe of the case. Loads are extremes since the row before. Threads: rows are added by the thread of the step loop.
  */
 final class RunTables implements AutoCloseable {
 
@@ -66,6 +68,9 @@ final class RunTables implements AutoCloseable {
         open(folder, "walls.csv", wallColumns(), resumeTime);
         open(folder, "ledger.csv", LEDGER, resumeTime);
         open(folder, "steps.csv", STEPS, resumeTime);
+        for (BulkProbe probe : probes.bulk()) {
+            open(folder, fileOf(probe), bulkColumns(probe), resumeTime);
+        }
     }
 
     private void open(RunFolder folder, String name, List<Column> columns, double resumeTime) throws IOException {
@@ -75,6 +80,16 @@ final class RunTables implements AutoCloseable {
                 fresh
                         ? Table.create(folder.resolve(name), columns)
                         : Table.resume(folder.resolve(name), columns, resumeTime));
+    }
+
+    private static String fileOf(BulkProbe probe) {
+        return "probe-" + probe.name() + ".csv";
+    }
+
+    private List<Column> bulkColumns(BulkProbe probe) {
+        return probes.readings(probe).stream()
+                .map(reading -> new Column(reading.name(), reading.unit()))
+                .toList();
     }
 
     private List<Column> passageColumns() {
@@ -123,6 +138,14 @@ final class RunTables implements AutoCloseable {
                         simulation.fineSteps(),
                         simulation.searches(),
                         simulation.model().grains().count());
+        for (BulkProbe probe : probes.bulk()) {
+            table(fileOf(probe))
+                    .append(
+                            time,
+                            probes.readings(probe).stream()
+                                    .mapToDouble(Reading::value)
+                                    .toArray());
+        }
         probes.wireLoads().beginInterval();
         probes.wallLoads().beginInterval();
     }

@@ -5,6 +5,7 @@ import java.util.function.IntToDoubleFunction;
 import java.util.stream.IntStream;
 import reedling.probe.Estimate;
 import reedling.probe.Partition;
+import reedling.probe.Separation;
 import reedling.probe.SizePassage;
 import reedling.probe.WireLoads;
 
@@ -15,6 +16,8 @@ import reedling.probe.WireLoads;
  * @param throughput mass fed a second and metre of deck width, kg/(s m)
  * @param recovery part of the decided undersize that passed, by mass
  * @param loss part of the decided product that passed, by mass
+ * @param separation masses of the whole window
+ * @param partition partition curve of the whole window
  * @param cutSize diameter of which half passes, m
  * @param pegged part of the open area pegged, per cent
  * @param stressRange upper bound of the stress range of the worst wire, Pa
@@ -27,6 +30,8 @@ record ScreenFigures(
         Estimate throughput,
         Estimate recovery,
         Estimate loss,
+        Separation separation,
+        Partition partition,
         Estimate cutSize,
         Estimate pegged,
         Estimate stressRange,
@@ -47,14 +52,23 @@ record ScreenFigures(
                         .distinct()
                         .mapToDouble(lot -> sizes.fedMass(batch, lot) * perWidth)
                         .sum());
-        double[] cuts = each(batches, batch -> cut(sizes, plan, batch, batch + 1));
+        double[] cuts =
+                each(batches, batch -> partition(sizes, plan, batch, batch + 1).cutSize());
+        Separation whole = separation(sizes, plan, 0, batches);
+        Partition partition = partition(sizes, plan, 0, batches);
         double[] ranges = java.util.Arrays.copyOf(loads.batchRanges(worst), batches);
         return new ScreenFigures(
                 batches,
                 Estimate.of(fed),
-                passed(sizes, plan, plan.undersizeLot(), batches),
-                passed(sizes, plan, plan.productLot(), batches),
-                Estimate.around(cut(sizes, plan, 0, batches), cuts),
+                Estimate.around(
+                        whole.undersizeRecovery(),
+                        each(batches, b -> separation(sizes, plan, b, b + 1).undersizeRecovery())),
+                Estimate.around(
+                        whole.productLoss(),
+                        each(batches, b -> separation(sizes, plan, b, b + 1).productLoss())),
+                whole,
+                partition,
+                Estimate.around(partition.cutSize(), cuts),
                 Estimate.of(deck.openAreaLost().means(batches)),
                 Estimate.around(loads.rangeUpper(worst), ranges),
                 loads.rangeLower(worst),
@@ -74,23 +88,24 @@ record ScreenFigures(
         return IntStream.range(0, batches).mapToDouble(value).toArray();
     }
 
-    private static double cut(SizePassage sizes, ScreenPlan plan, int from, int to) {
-        return Partition.of(sizes, plan.passedOutlet(), plan.overOutlet(), from, to)
-                .cutSize();
+    private static Partition partition(SizePassage sizes, ScreenPlan plan, int from, int to) {
+        return Partition.of(sizes, plan.passedOutlet(), plan.overOutlet(), from, to);
     }
 
-    /** Part of a lot that passed: of the whole window, with the scatter of its batches. */
-    private static Estimate passed(SizePassage sizes, ScreenPlan plan, int lot, int batches) {
-        double through = 0;
-        double over = 0;
-        double[] parts = new double[batches];
-        for (int batch = 0; batch < batches; batch++) {
-            double a = sizes.leftMass(batch, plan.passedOutlet(), lot);
-            double b = sizes.leftMass(batch, plan.overOutlet(), lot);
-            through += a;
-            over += b;
-            parts[batch] = a / (a + b);
+    private static Separation separation(SizePassage sizes, ScreenPlan plan, int from, int to) {
+        return new Separation(
+                left(sizes, plan.passedOutlet(), plan.undersizeLot(), from, to),
+                left(sizes, plan.passedOutlet(), plan.productLot(), from, to),
+                left(sizes, plan.overOutlet(), plan.undersizeLot(), from, to),
+                left(sizes, plan.overOutlet(), plan.productLot(), from, to));
+    }
+
+    /** Mass of a lot that left through an outlet in the batches from one (inclusive) to another, kg. */
+    private static double left(SizePassage sizes, int outlet, int lot, int from, int to) {
+        double sum = 0;
+        for (int batch = from; batch < to; batch++) {
+            sum += sizes.leftMass(batch, outlet, lot);
         }
-        return Estimate.around(through / (through + over), parts);
+        return sum;
     }
 }

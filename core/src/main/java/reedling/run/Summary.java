@@ -9,7 +9,9 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.IntStream;
+import reedling.probe.BulkProbe;
 import reedling.probe.LogHistogram;
+import reedling.probe.Reading;
 import reedling.probe.WireLoads;
 import reedling.probe.WirePeaks;
 
@@ -46,6 +48,7 @@ final class Summary {
         summary.text.line(result.plan().identity().title());
         summary.text.line(heading);
         result.figures().ifPresent(figures -> new ScreenText(result, figures).writeTo(summary.text));
+        summary.bulk();
         summary.wires();
         summary.walls();
         summary.trust();
@@ -53,6 +56,18 @@ final class Summary {
         summary.text.section("Timing");
         summary.text.line(timing);
         return summary.text.toString();
+    }
+
+    private void bulk() {
+        for (BulkProbe probe : probes.bulk()) {
+            text.section("Probe " + probe.name());
+            for (Reading reading : probes.readings(probe)) {
+                String value = Double.isNaN(reading.value())
+                        ? "not known"
+                        : format("%.4g %s", reading.value(), reading.unit());
+                text.line(format("%-34s %s", reading.name(), value));
+            }
+        }
     }
 
     private void wires() {

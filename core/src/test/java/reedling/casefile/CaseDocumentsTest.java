@@ -20,6 +20,13 @@ class CaseDocumentsTest {
                 .contains("## `[feeds.NAME] with kind = \"rain\" or \"jet\"`")
                 .contains("## `[feeds.NAME.region] with shape = \"disc\"`")
                 .contains("## `[lots.NAME.diameter] with distribution = \"uniform\"`")
+                .contains("## `[lots.NAME.diameter] with distribution = \"sieve-table\"`")
+                .contains("## `[[lots.NAME.diameter.sieves]]`")
+                .contains("| `basis` | one of mass, number | required |")
+                .contains("## `[walls.NAME] with shape = \"cone\"`")
+                .contains("## `[probes.NAME] with kind = \"heap\"`")
+                .contains("| `flank_to` | a plain number, 0 ≤ value ≤ 1 | 0.8 |")
+                .contains("## `[probes.NAME] with kind = \"layer-waves\"`")
                 .contains("## `[[pairs]]`")
                 .contains("| `rigid` | true or false | false |")
                 .contains("| `element` | the name of an element type");

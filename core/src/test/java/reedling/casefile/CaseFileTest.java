@@ -51,6 +51,38 @@ class CaseFileTest {
                 .isEqualTo(new DiameterSpecification.TruncatedNormal(0.0044, 0.0004, 0.0036, 0.0052));
     }
 
+    /** 80 g between 2 and 3 mm, 20 g between 3 and 4 mm: 0.8 of the mass passes 3 mm. */
+    @Test
+    void sieveTablesAreReadInAnyOrder() {
+        String table =
+                "{distribution = \"sieve-table\", basis = \"mass\", sieves = [{opening = \"4 mm\", retained = 0}, "
+                        + "{opening = \"2 mm\", retained = 80}, {opening = \"3 mm\", retained = 20}]}";
+        DiameterSpecification read = Cases.read(Cases.with("\"4 mm\"", table))
+                .specification()
+                .lots()
+                .get("small")
+                .diameter();
+        assertThat(read.smallest()).isEqualTo(2e-3);
+        assertThat(read.largest()).isEqualTo(4e-3);
+        assertThat(read).isInstanceOfSatisfying(DiameterSpecification.Graded.class, graded -> {
+            assertThat(graded.sizes().massPassing(3e-3)).isCloseTo(0.8, within(1e-12));
+            assertThat(graded.typical()).isBetween(2e-3, 3e-3);
+        });
+    }
+
+    @Test
+    void panAndCoarsestSieveReachAsFarAsTheCaseSays() {
+        String table = "{distribution = \"sieve-table\", basis = \"number\", pan = 1, min = \"1 mm\", max = \"5 mm\", "
+                + "sieves = [{opening = \"2 mm\", retained = 3}]}";
+        DiameterSpecification read = Cases.read(Cases.with("\"4 mm\"", table))
+                .specification()
+                .lots()
+                .get("small")
+                .diameter();
+        assertThat(read.smallest()).isEqualTo(1e-3);
+        assertThat(read.largest()).isEqualTo(5e-3);
+    }
+
     @Test
     void feedsAreRead() {
         FeedSpecification.PackedBlock block =

@@ -29,7 +29,7 @@ class CaseKeyErrorsTest {
                 "[steps]",
                 "[stpes]",
                 "deck.toml:144:1 stpes: is an unknown key, expected one of case, materials, pairs, lots, feeds, walls, "
-                        + "motions, wires, outlets, bounds, screen, laws, fields, steps, output. Did you mean steps?");
+                        + "motions, wires, outlets, bounds, screen, probes, laws, fields, steps, output. Did you mean steps?");
     }
 
     @Test

@@ -18,7 +18,11 @@ class SizeDistributionTest {
                 new SingleSize(0.005),
                 new UniformSize(0.002, 0.006),
                 new NormalSize(0.0044, 0.0004, 0.0036, 0.0052),
-                new NormalSize(0.004, 0.002, 0.0045, 0.012));
+                new NormalSize(0.004, 0.002, 0.0045, 0.012),
+                new RosinRammlerSize(Basis.MASS, 0.004, 1.2, 0.001, 0.01),
+                new RosinRammlerSize(Basis.NUMBER, 0.004, 4, 0.001, 0.007),
+                new SchuhmannSize(Basis.MASS, 0.006, 0.8, 0.001, 0.005),
+                new SieveSize(Basis.MASS, new double[] {0.002, 0.003, 0.005}, new double[] {0, 0.3, 1}));
     }
 
     @ParameterizedTest

@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.List;
+import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import reedling.particle.Lot;
 import reedling.particle.RandomStream;
@@ -58,5 +59,56 @@ class PartitionTest {
             sizes.left(over ? 1 : 0, 0, diameter, 1e-4, random.uniform());
         }
         return Partition.of(sizes, 0, 1, 0, 5).cutSize();
+    }
+
+    /**
+     * T = 1/(1 + (d/d50)^-8), d50 = 2 mm: d25 and d75 are d50 3^(-1/8) and d50 3^(1/8). Definitions of K. F. Tromp 1937;
+     * numbers to six digits, and straight lines between classes of ratio 1.0003 are as near.
+     */
+    @Tag("reference")
+    @Test
+    void sharpnessOfALogisticCurveIsItsClosedForm() {
+        int classes = 4000;
+        double[] size = new double[classes];
+        long[] passed = new long[classes];
+        long[] over = new long[classes];
+        for (int k = 0; k < classes; k++) {
+            size[k] = 1.2e-3 * Math.pow(1.0003, k);
+            over[k] = Math.round(1e12 / (1 + Math.pow(size[k] / 2e-3, -8)));
+            passed[k] = 1_000_000_000_000L - over[k];
+        }
+        Partition partition = new Partition(size, passed, over);
+        assertThat(partition.cutSize()).isCloseTo(2e-3, within(2e-9));
+        assertThat(partition.sizeAt(0.25)).isCloseTo(1.74337e-3, within(5e-9));
+        assertThat(partition.sizeAt(0.75)).isCloseTo(2.29441e-3, within(5e-9));
+        assertThat(partition.probableError()).isCloseTo(0.275517e-3, within(1e-9));
+        assertThat(partition.probableError() / partition.cutSize()).isCloseTo(0.137759, within(1e-6));
+        assertThat(partition.sharpness()).isCloseTo(0.759836, within(1e-6));
+    }
+
+    /** A measured table with straight lines between its sizes: arithmetic, to the digits given. */
+    @Tag("reference")
+    @Test
+    void partitionTableIsReadBetweenItsSizes() {
+        double[] size = {1e-3, 1.4e-3, 1.8e-3, 2.2e-3, 2.6e-3, 3e-3};
+        long[] over = {2, 10, 38, 66, 92, 100};
+        long[] passed = {98, 90, 62, 34, 8, 0};
+        Partition partition = new Partition(size, passed, over);
+        assertThat(partition.sizeAt(0.25)).isCloseTo(1.61429e-3, within(5e-9));
+        assertThat(partition.cutSize()).isCloseTo(1.97143e-3, within(5e-9));
+        assertThat(partition.sizeAt(0.75)).isCloseTo(2.33846e-3, within(5e-9));
+        assertThat(partition.probableError()).isCloseTo(0.362088e-3, within(1e-9));
+    }
+
+    /** Feed of 20, 30, 30, 20 kg from fine to coarse, of which 5, 30, 90, 100 % go over; undersize: the first two. */
+    @Tag("reference")
+    @Test
+    void separationIsTheMassBalance() {
+        Separation separation = new Separation(20 * 0.95 + 30 * 0.7, 30 * 0.1, 20 * 0.05 + 30 * 0.3, 30 * 0.9 + 20);
+        assertThat(separation.undersizeOver() + separation.productOver()).isCloseTo(57, within(1e-9));
+        assertThat(separation.undersizeRecovery()).isCloseTo(0.8, within(1e-6));
+        assertThat(separation.productLoss()).isCloseTo(0.06, within(1e-6));
+        assertThat(separation.undersizeInOver()).isCloseTo(0.175439, within(1e-6));
+        assertThat(separation.productInPassed()).isCloseTo(0.0697674, within(1e-6));
     }
 }

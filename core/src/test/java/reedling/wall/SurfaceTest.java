@@ -28,7 +28,10 @@ class SurfaceTest {
             new CylinderInside(0.15, 0.4),
             new CylinderInside(0.15, 0.4, true, false),
             new CylinderInside(0.15, 0.4, true, true),
-            new CylinderOutside(0.15, 0.4));
+            new CylinderOutside(0.15, 0.4),
+            new ConeSheet(0.02, 0.15, 0.2),
+            new ConeSheet(0.1, 0, 0.4),
+            new ConeSheet(0.15, 0.15, 0.4));
 
     /** Centres, faces, rims and the ends of the range: chance alone never meets them. */
     private static final double[] SPECIAL = {-0.4, -0.2, -0.15, -0.1, 0, 0.1, 0.15, 0.2, 0.4};
@@ -133,6 +136,27 @@ class SurfaceTest {
         }
         assertThat(cup.gap(0, 0.145, 0, -0.195, normal)).isEqualTo(0.005, within(1e-15));
         assertThat(cup.gap(1, 0.145, 0, -0.195, normal)).isEqualTo(0.005, within(1e-15));
+    }
+
+    /** Rims (3, 0) and (0, 4) half-way up and down: the side of a triangle of 3, 4 and 5. */
+    @Test
+    void coneKnowsItsSideAndItsRims() {
+        Surface cone = new ConeSheet(3, 0, 4);
+        assertThat(cone.gap(0, 0, 0, -2, normal)).isEqualTo(2.4, within(1e-15));
+        assertThat(normal).containsExactly(new double[] {0.8, 0, 0.6}, within(1e-15));
+        assertThat(cone.gap(0, 0, 3, 2, normal)).isEqualTo(2.4, within(1e-15));
+        assertThat(normal).containsExactly(new double[] {0, -0.8, -0.6}, within(1e-15));
+        assertThat(cone.gap(0, 0, 0, 4, normal)).isEqualTo(2, within(1e-15));
+        assertThat(cone.gap(0, 6, 0, -6, normal)).isEqualTo(5, within(1e-15));
+        assertThat(normal).containsExactly(new double[] {-0.6, 0, 0.8}, within(1e-15));
+    }
+
+    @Test
+    void coneOfEqualRadiiIsAPipe() {
+        Surface cone = new ConeSheet(0.15, 0.15, 0.4);
+        Surface pipe = new CylinderInside(0.15, 0.4);
+        everywhere((surface, p, random) -> assertThat(cone.gap(0, p[0], p[1], p[2], normal))
+                .isEqualTo(Math.abs(pipe.gap(0, p[0], p[1], p[2], second)), within(1e-14)));
     }
 
     @Test

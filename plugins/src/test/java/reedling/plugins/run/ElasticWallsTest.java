@@ -18,6 +18,7 @@ import reedling.plugins.Rig;
 import reedling.run.Simulation;
 import reedling.wall.BoxInside;
 import reedling.wall.BoxOutside;
+import reedling.wall.ConeSheet;
 import reedling.wall.CylinderInside;
 import reedling.wall.CylinderOutside;
 import reedling.wall.Placement;
@@ -43,6 +44,7 @@ class ElasticWallsTest {
                         new BoxInside(0.022, 0.02, 0.018, Set.of(BoxInside.Face.HIGH_Z, BoxInside.Face.LOW_Z))),
                 Arguments.of("roller", new CylinderOutside(0.008, 0.03)),
                 Arguments.of("pipe", new CylinderInside(0.014, 0.03)),
+                Arguments.of("funnel", new ConeSheet(0.004, 0.016, 0.02)),
                 Arguments.of("cup", new CylinderInside(0.014, 0.03, true, false)));
     }
 
