@@ -34,6 +34,14 @@ public interface ContactKernel {
     }
 
     /**
+     * Whether the dashpot may pull until the overlap is used up; asked of normal kernels only, once, when the stages of a
+     * case are put together. Where it may not, the total force ends at zero unless the elastic force itself pulls.
+     */
+    default boolean dashpotMayPull() {
+        return false;
+    }
+
+    /**
      * Several kernels as one, called in order. A vector kernel must stay small (some seventy vector operations) to keep
      * its vectors in registers; a longer law is cut into kernels and put together here.
      */

@@ -28,4 +28,9 @@ final class KernelSequence implements ContactKernel {
     public double dampingRatio() {
         return kernels[0].dampingRatio();
     }
+
+    @Override
+    public boolean dashpotMayPull() {
+        return kernels[0].dashpotMayPull();
+    }
 }

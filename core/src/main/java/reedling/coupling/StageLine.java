@@ -26,7 +26,7 @@ final class StageLine {
         List<RowStage> stages = new ArrayList<>();
         stages.add(new LawStage(laws.normal()));
         stages.add(StageLine::keepStoredEnergy);
-        stages.add(new NormalSolve());
+        stages.add(new NormalSolve(laws.normal().dashpotMayPull()));
         ContactKernel tangential = laws.tangential();
         stages.add(tangential == null ? rows -> rows.block().clear(Column.FRICTION, 4) : new LawStage(tangential));
         ContactKernel rolling = laws.rolling();
