@@ -29,7 +29,7 @@ final class CaseKeys {
             Key.required(
                     "bounds", new ValueType.Part(ControlKeys.BOX), "Grains whose centre leaves this box are spilled."),
             Key.optional("screen", new ValueType.Part(ControlKeys.SCREEN), "Report of a screen deck."),
-            Key.optional("laws", new ValueType.Part(ControlKeys.LAWS), "Stages of the contact law."),
+            Key.optional("laws", new ValueType.Part(LawKeys.LAWS), "Stages of the contact law."),
             Key.optional(
                     "fields",
                     new ValueType.Named(new ValueType.Plugin(ProviderKind.FIELD, "law"), "NAME"),

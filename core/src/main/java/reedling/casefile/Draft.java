@@ -50,7 +50,7 @@ final class Draft {
         fields = Collections.unmodifiableMap(new LinkedHashMap<>(root.<PluginChoice>named("fields")));
         bounds = part("bounds").flatMap(values -> BoxKeys.read(values, rules));
         screen = part("screen").map(ControlKeys::screen);
-        laws = part("laws").map(ControlKeys::laws);
+        laws = part("laws").map(LawKeys::read);
         steps = part("steps").map(ControlKeys::steps);
         output = part("output").map(ControlKeys::output);
     }
