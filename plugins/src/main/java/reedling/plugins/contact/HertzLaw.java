@@ -32,7 +32,8 @@ import reedling.math.Roots;
  *
  * <p>End of contact: by default the total force never pulls, and zeta is calibrated for that. Where the dashpot may pull,
  * it does so until the overlap is used up, with the smaller zeta that then gives the same restitution. The asked restitution
- * is exact in both; peak force and duration differ, and the default has no pull that dry bodies do not show.
+ * is exact in both; peak force and duration differ, and the default has no pull that dry bodies do not show. While the dashpot
+ * pulls there is no friction.
  *
  * <p>Shapes: a block of rows; no history. Stable step: t_c / 10 or less. Errors: restitution below 0.05 is refused by
  * the case file. Source: Hertz 1882; Johnson, Contact Mechanics, 1985; Tsuji, Tanaka and Ishida, Lagrangian numerical

@@ -25,7 +25,7 @@ import reedling.math.Lanes;
  * xi' = (xi - (xi . n) n_mean) b                      m, turned with the contact; b by the {@link StretchRule}
  * xi* = xi' + v_t h                                   m
  * f   = (k_t xi* + c_t v_t) / (1 + h c_t w / 2),      c_t = c sqrt(k_t / k_n)
- * q   = min(1, mu max(F_n, 0) / |f|),   f = q f,   xi = q xi* spring and dashpot shrink alike at the limit
+ * q   = min(1, mu F_n / |f|),   f = q f,   xi = q xi* spring and dashpot shrink alike at the limit
  * </pre>
  *
  * <p>Where: a radius of contact (m); n normal; n_mean mean normal of the step; v_t sliding speed (m/s); h step (s); c
@@ -86,7 +86,6 @@ final class MindlinLaw implements ContactLaw {
         private void vector(ContactBlock block) {
             double[] c = block.columns();
             double[] history = block.history();
-            DoubleVector zero = DoubleVector.zero(Lanes.SPECIES);
             DoubleVector one = DoubleVector.broadcast(Lanes.SPECIES, 1.0);
             DoubleVector tiny = DoubleVector.broadcast(Lanes.SPECIES, TINY);
             DoubleVector perRadius = DoubleVector.broadcast(Lanes.SPECIES, stiffness);
@@ -116,8 +115,7 @@ final class MindlinLaw implements ContactLaw {
                 // 3 Coulomb's limit; one division serves both quotients
                 DoubleVector size =
                         Lanes.larger(gx.fma(gx, gy.fma(gy, gz.mul(gz))).sqrt(), tiny);
-                DoubleVector pressing = Lanes.larger(load(c, Column.NORMAL_FORCE, r), zero);
-                DoubleVector limit = pressing.mul(mu).mul(den);
+                DoubleVector limit = load(c, Column.NORMAL_FORCE, r).mul(mu).mul(den);
                 DoubleVector share = Lanes.smaller(size, limit).mul(touch).div(size.mul(den));
                 DoubleVector keepStretch = share.mul(den);
                 store(gx.mul(share), c, Column.FRICTION, r);
@@ -155,8 +153,7 @@ final class MindlinLaw implements ContactLaw {
                 // 3 Coulomb's limit; one division serves both quotients
                 double raw = Math.sqrt(Math.fma(gx, gx, Math.fma(gy, gy, gz * gz)));
                 double size = raw > TINY ? raw : TINY;
-                double normalForce = c[at(Column.NORMAL_FORCE) + r];
-                double limit = (normalForce > 0 ? normalForce : 0) * friction * den;
+                double limit = c[at(Column.NORMAL_FORCE) + r] * friction * den;
                 double share = (size < limit ? size : limit) * touch / (size * den);
                 double keepStretch = share * den;
                 c[at(Column.FRICTION) + r] = gx * share;

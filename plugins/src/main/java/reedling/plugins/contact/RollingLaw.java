@@ -25,7 +25,7 @@ import reedling.math.Lanes;
  * k_r = 2.25 mu_r^2 k_n R*^2                                   N m/rad
  * th* = (th - (th . n) n_mean) min(1, a_old / a) + w_t h       rad, w_t relative spin without its part along n
  * M   = (k_r th* + c_r w_t) / (1 + h c_r w_I / 2),  c_r = 2 eta sqrt(k_r / w_I)
- * q   = min(1, mu_r R* max(F_n, 0) / |M|),  M = q M,  th = q th*
+ * q   = min(1, mu_r R* F_n / |M|),  M = q M,  th = q th*
  * </pre>
  *
  * <p>Where: mu_r rolling friction of the pair; k_n normal stiffness (N/m); R* effective radius (m); w_I sum of inverse
@@ -121,7 +121,6 @@ final class RollingLaw implements ContactLaw {
         private void vector(ContactBlock block) {
             double[] c = block.columns();
             double[] history = block.history();
-            DoubleVector zero = DoubleVector.zero(Lanes.SPECIES);
             DoubleVector one = DoubleVector.broadcast(Lanes.SPECIES, 1.0);
             DoubleVector tiny = DoubleVector.broadcast(Lanes.SPECIES, TINY);
             DoubleVector shape = DoubleVector.broadcast(Lanes.SPECIES, stiffness);
@@ -154,8 +153,8 @@ final class RollingLaw implements ContactLaw {
                 // 3 the limit moment; one division serves both quotients
                 DoubleVector size =
                         Lanes.larger(gx.fma(gx, gy.fma(gy, gz.mul(gz))).sqrt(), tiny);
-                DoubleVector pressing = Lanes.larger(load(c, Column.NORMAL_FORCE, r), zero);
-                DoubleVector limit = pressing.mul(radius).mul(mu).mul(den);
+                DoubleVector limit =
+                        load(c, Column.NORMAL_FORCE, r).mul(radius).mul(mu).mul(den);
                 DoubleVector share = Lanes.smaller(size, limit).mul(touch).div(size.mul(den));
                 DoubleVector keepAngle = share.mul(den);
                 store(gx.mul(share), c, Column.ROLLING_MOMENT, r);
@@ -192,8 +191,7 @@ final class RollingLaw implements ContactLaw {
                 // 3 the limit moment; one division serves both quotients
                 double raw = Math.sqrt(Math.fma(gx, gx, Math.fma(gy, gy, gz * gz)));
                 double size = raw > TINY ? raw : TINY;
-                double normalForce = c[at(Column.NORMAL_FORCE) + r];
-                double limit = (normalForce > 0 ? normalForce : 0) * radius * friction * den;
+                double limit = c[at(Column.NORMAL_FORCE) + r] * radius * friction * den;
                 double share = (size < limit ? size : limit) * touch / (size * den);
                 double keepAngle = share * den;
                 c[at(Column.ROLLING_MOMENT) + r] = gx * share;
