@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.plugins.contact;
 
+import java.util.ArrayList;
+import java.util.List;
 import reedling.error.ExitCode;
 import reedling.error.Finding;
 import reedling.error.ReedlingException;
@@ -28,14 +30,17 @@ final class EndOfContact {
     /**
      * Reads the choice.
      *
-     * @throws ReedlingException where it is neither 0 nor 1
+     * @param faults what else is wrong with the law's values; thrown with what is wrong with this one
+     * @throws ReedlingException where the value is neither 0 nor 1, or there are other faults
      */
-    static boolean dashpotMayPull(ParameterValues values) {
+    static boolean dashpotMayPull(ParameterValues values, Finding... faults) {
+        List<Finding> all = new ArrayList<>(List.of(faults));
         double value = values.get(NAME);
         if (value != 0 && value != 1) {
-            throw new ReedlingException(
-                    ExitCode.CASE,
-                    new Finding("law", NAME, String.valueOf(value), "0 or 1", "It is a choice, not a degree."));
+            all.add(new Finding("law", NAME, String.valueOf(value), "0 or 1", "It is a choice, not a degree."));
+        }
+        if (!all.isEmpty()) {
+            throw new ReedlingException(ExitCode.CASE, all);
         }
         return value == 1;
     }

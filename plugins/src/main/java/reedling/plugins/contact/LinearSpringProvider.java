@@ -5,7 +5,6 @@ import java.util.List;
 import reedling.contact.ContactLaw;
 import reedling.contact.ContactLawProvider;
 import reedling.contact.Stage;
-import reedling.error.ExitCode;
 import reedling.error.Finding;
 import reedling.error.ReedlingException;
 import reedling.plugin.Parameter;
@@ -76,18 +75,15 @@ public final class LinearSpringProvider implements ContactLawProvider {
         double speed = values.get(SPEED.name());
         double overlap = values.get(OVERLAP.name());
         boolean reference = speed != SPEED.defaultValue() || overlap != OVERLAP.defaultValue();
-        if (fixed > 0 && reference) {
-            throw new ReedlingException(
-                    ExitCode.CASE,
-                    new Finding(
-                            "law",
-                            STIFFNESS.name(),
-                            fixed + " N/m beside a reference impact of " + speed + " m/s and overlap " + overlap,
-                            "one of both",
-                            "Take the stiffness or the reference impact away."));
-        }
+        Finding both = new Finding(
+                "law",
+                STIFFNESS.name(),
+                fixed + " N/m beside a reference impact of " + speed + " m/s and overlap " + overlap,
+                "one of both",
+                "Take the stiffness or the reference impact away.");
+        Finding[] faults = fixed > 0 && reference ? new Finding[] {both} : new Finding[0];
         double referenceSpeed = fixed > 0 ? 0 : speed / overlap;
         return new LinearSpringLaw(
-                new LinearSpringLaw.Stiffness(fixed, referenceSpeed), EndOfContact.dashpotMayPull(values));
+                new LinearSpringLaw.Stiffness(fixed, referenceSpeed), EndOfContact.dashpotMayPull(values, faults));
     }
 }

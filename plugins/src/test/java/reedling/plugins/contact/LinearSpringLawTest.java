@@ -163,10 +163,11 @@ class LinearSpringLawTest {
     }
 
     @Test
-    void stiffnessAndReferenceImpactExcludeEachOther() {
-        assertThatThrownBy(() -> law(Map.of("stiffness", 1e4, "reference_speed", 2.0)))
+    void faultsOfTheParametersAreAllReported() {
+        assertThatThrownBy(() -> law(Map.of("stiffness", 1e4, "reference_speed", 2.0, "dashpot_pulls", 0.5)))
                 .isInstanceOf(ReedlingException.class)
                 .hasMessageContaining("stiffness")
-                .hasMessageContaining("10000.0 N/m");
+                .hasMessageContaining("10000.0 N/m")
+                .hasMessageContaining("dashpot_pulls");
     }
 }
