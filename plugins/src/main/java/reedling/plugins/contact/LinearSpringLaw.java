@@ -44,6 +44,8 @@ import reedling.math.Lanes;
  */
 final class LinearSpringLaw implements ContactLaw {
 
+    private static final double APART = 1e-12; // N/m where nothing touches: no step limit, quotients stay finite
+
     /**
      * How stiff the spring is: one of both numbers is 0.
      *
@@ -101,13 +103,14 @@ final class LinearSpringLaw implements ContactLaw {
             DoubleVector twiceRatio = DoubleVector.broadcast(Lanes.SPECIES, 2 * dampingRatio);
             DoubleVector perStiffness = DoubleVector.broadcast(Lanes.SPECIES, radius);
             DoubleVector zero = DoubleVector.zero(Lanes.SPECIES);
+            DoubleVector apart = DoubleVector.broadcast(Lanes.SPECIES, APART);
             DoubleVector infinite = DoubleVector.broadcast(Lanes.SPECIES, Double.POSITIVE_INFINITY);
             DoubleVector least = infinite;
             for (int r = 0; r < block.rows(); r += Lanes.TILE) {
                 DoubleVector mass = load(c, Column.EFFECTIVE_MASS, r);
                 DoubleVector signed = load(c, Column.OVERLAP, r);
                 DoubleVector rate = speed.div(load(c, Column.EFFECTIVE_RADIUS, r));
-                DoubleVector k = rate.mul(rate).fma(mass, fixed);
+                DoubleVector k = apart.blend(rate.mul(rate).fma(mass, fixed), zero.lt(signed));
                 store(k, c, Column.STIFFNESS, r);
                 store(k.mul(perStiffness), c, Column.CONTACT_RADIUS, r);
                 store(k.mul(Lanes.larger(signed, zero)), c, Column.ELASTIC_FORCE, r);
@@ -123,7 +126,7 @@ final class LinearSpringLaw implements ContactLaw {
             for (int r = 0; r < block.rows(); r++) {
                 double mass = c[at(Column.EFFECTIVE_MASS) + r];
                 double signed = c[at(Column.OVERLAP) + r];
-                double k = stiffness.of(c[at(Column.EFFECTIVE_RADIUS) + r], mass);
+                double k = signed > 0 ? stiffness.of(c[at(Column.EFFECTIVE_RADIUS) + r], mass) : APART;
                 c[at(Column.STIFFNESS) + r] = k;
                 c[at(Column.CONTACT_RADIUS) + r] = k * radius;
                 c[at(Column.ELASTIC_FORCE) + r] = k * (signed > 0 ? signed : 0);

@@ -11,6 +11,8 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
+import reedling.contact.Column;
+import reedling.contact.ContactKernel;
 import reedling.contact.ContactKind;
 import reedling.contact.ContactLaw;
 import reedling.contact.Stage;
@@ -134,6 +136,25 @@ class LinearSpringLawTest {
         assertThat(kernel.duration(0.01, RADIUS, MASS)).isCloseTo(expected, within(1e-12 * expected));
         assertThat(kernel.duration(10, RADIUS, MASS)).isCloseTo(expected, within(1e-12 * expected));
         assertThat(kernel.dampingRatio()).isEqualTo(Restitution.dampingRatio(0.5, false));
+    }
+
+    /** The stiffest row limits the step: a row with a gap, such as one that only fills a tile, must not be it. */
+    @Test
+    void rowsApartHaveNoStiffness() {
+        MaterialPair pair = new MaterialPair(GRAIN, GRAIN, 0.5, 0.3, 0);
+        ContactKernel normal = law(Map.of()).bind(pair, ContactKind.GRAIN_GRAIN, 1);
+        ContactKernel friction = new MindlinLaw(StretchRule.PASSIVE).bind(pair, ContactKind.GRAIN_GRAIN, 1);
+        RowTile tile = new RowTile(4)
+                .set(Column.EFFECTIVE_RADIUS, 1e-30)
+                .set(Column.OVERLAP, -1e-3)
+                .set(Column.TOUCH, 0);
+        assertThat(tile.apply(normal, 0)).isZero();
+        tile.apply(friction, 0);
+        assertThat(tile.get(Column.STIFFNESS)).isBetween(0.0, 1e-9);
+        assertThat(tile.get(Column.SLIDING_STIFFNESS)).isBetween(0.0, 1e-9);
+        assertThat(tile.get(Column.ELASTIC_FORCE)).isZero();
+        assertThat(tile.get(Column.CONTACT_RADIUS)).isPositive();
+        assertThat(tile.duration()).isInfinite();
     }
 
     /** Oblique and lossy, with the tangential spring of the Mindlin ratio: what is left over falls with the step. */
