@@ -31,7 +31,7 @@ final class CaseKeys {
             Key.optional("screen", new ValueType.Part(ControlKeys.SCREEN), "Report of a screen deck."),
             Key.optional(
                     "probes", new ValueType.Named(ProbeKeys.TYPE, "NAME"), "Figures taken from all grains together."),
-            Key.optional("laws", new ValueType.Part(ControlKeys.LAWS), "Stages of the contact law."),
+            Key.optional("laws", new ValueType.Part(LawKeys.LAWS), "Stages of the contact law."),
             Key.optional(
                     "fields",
                     new ValueType.Named(new ValueType.Plugin(ProviderKind.FIELD, "law"), "NAME"),

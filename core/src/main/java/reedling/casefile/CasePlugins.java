@@ -30,8 +30,11 @@ public record CasePlugins(PluginCatalogue catalogue) implements ProviderLookup {
     public List<? extends Provider> providers(ProviderKind kind) {
         return switch (kind) {
             case NORMAL -> laws(Stage.NORMAL);
+            case ADHESION -> laws(Stage.ADHESION);
+            case NEAR_FIELD -> laws(Stage.NEAR_FIELD);
             case TANGENTIAL -> laws(Stage.TANGENTIAL);
             case ROLLING -> laws(Stage.ROLLING);
+            case TWISTING -> laws(Stage.TWISTING);
             case FIELD -> all(FIELD);
             case ELEMENT -> all(ELEMENT);
         };

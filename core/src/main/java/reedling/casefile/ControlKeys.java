@@ -36,16 +36,6 @@ final class ControlKeys {
                     0.0,
                     "Start of the measured part of the run."));
 
-    static final Section LAWS = Section.of(
-            "Stages of the contact law.",
-            Key.preset("normal", new ValueType.Plugin(ProviderKind.NORMAL, "law"), "hertz", "Normal force."),
-            Key.preset("tangential", new ValueType.Plugin(ProviderKind.TANGENTIAL, "law"), "mindlin", "Friction."),
-            Key.preset(
-                    "rolling",
-                    new ValueType.Plugin(ProviderKind.ROLLING, "law"),
-                    "elastic-plastic",
-                    "Rolling resistance."));
-
     static final Section STEPS = Section.of(
             "Limits of the time step.",
             Key.preset("steps_per_contact", new ValueType.Whole(5, 10_000), 20L, "Time steps in the shortest contact."),
@@ -81,10 +71,6 @@ final class ControlKeys {
                 values.number("peg_time"),
                 values.number("peg_distance"),
                 values.number("measure_from"));
-    }
-
-    static LawsSpecification laws(Values values) {
-        return new LawsSpecification(values.plugin("normal"), values.plugin("tangential"), values.plugin("rolling"));
     }
 
     static StepSpecification steps(Values values) {

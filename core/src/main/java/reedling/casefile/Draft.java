@@ -52,7 +52,7 @@ final class Draft {
         probes = each("probes", (name, values) -> ProbeKeys.read(name, values, rules));
         bounds = part("bounds").flatMap(values -> BoxKeys.read(values, rules));
         screen = part("screen").map(ControlKeys::screen);
-        laws = part("laws").map(ControlKeys::laws);
+        laws = part("laws").map(LawKeys::read);
         steps = part("steps").map(ControlKeys::steps);
         output = part("output").map(ControlKeys::output);
     }

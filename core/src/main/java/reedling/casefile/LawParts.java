@@ -25,9 +25,7 @@ record LawParts(Map<Stage, ContactLaw> byStage, List<Field> fields, Map<String, 
     static LawParts make(CaseReading reading, CasePlugins plugins, PartFaults faults) {
         LawParts parts = new LawParts(new EnumMap<>(Stage.class), new ArrayList<>(), new TreeMap<>());
         CaseSpecification specification = reading.specification();
-        parts.law(Stage.NORMAL, "laws.normal", specification.laws().normal(), reading, plugins, faults);
-        parts.law(Stage.TANGENTIAL, "laws.tangential", specification.laws().tangential(), reading, plugins, faults);
-        parts.law(Stage.ROLLING, "laws.rolling", specification.laws().rolling(), reading, plugins, faults);
+        specification.laws().byStage().forEach((stage, choice) -> parts.law(stage, choice, reading, plugins, faults));
         specification.fields().forEach((name, choice) -> {
             String path = "fields." + name;
             faults.make(
@@ -44,13 +42,8 @@ record LawParts(Map<Stage, ContactLaw> byStage, List<Field> fields, Map<String, 
         return parts;
     }
 
-    private void law(
-            Stage stage,
-            String path,
-            PluginChoice choice,
-            CaseReading reading,
-            CasePlugins available,
-            PartFaults faults) {
+    private void law(Stage stage, PluginChoice choice, CaseReading reading, CasePlugins available, PartFaults faults) {
+        String path = LawKeys.path(stage);
         faults.make(
                         path,
                         () -> available.law(choice.name(), reading.where(path)).create(choice.parameters()))

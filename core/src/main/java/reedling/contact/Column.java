@@ -38,7 +38,7 @@ public final class Column {
     /** Inverse mass felt by a force along the surface, levers included, 1/kg. */
     public static final int INVERSE_MASS_SLIDING = 21;
 
-    // Written by normal stages, which add.
+    // Written by the stage NORMAL; the later normal stages add to them.
 
     /** Elastic normal force, N, repulsive positive. */
     public static final int ELASTIC_FORCE = 22;
@@ -51,7 +51,7 @@ public final class Column {
 
     // Written by the engine's solve stage.
 
-    /** Normal force with its dashpot, N, as the later stages may use it. */
+    /** Normal force with its dashpot, N, as the later stages may use it: never below 0 where a law pulls. */
     public static final int NORMAL_FORCE = 26;
     /** Contact radius of the step before over that of now; 0 for a new contact. */
     public static final int RADIUS_RATIO = 27;
@@ -68,8 +68,20 @@ public final class Column {
     /** Energy stored in the springs of the row, J; filled only when {@link ContactBlock#energyDue()}. */
     public static final int STORED_ENERGY = 35;
 
+    /** Relative spin about the normal, rad/s; filled only where the case has a twisting law, which reads it. */
+    public static final int TWIST = 36;
+
+    // Filled by normal stages only where one of them pulls; the engine clears them before.
+
+    /** What is added to the normal force to make the load that friction, rolling and twisting limits come from, N. */
+    public static final int ADHESIVE_LOAD = 37;
+    /** Energy that a change of state of the contact, such as tearing, turned into heat in this step, J. */
+    public static final int LOST_ENERGY = 38;
+    /** The engine's: normal force, N, while the load of the limits stands in its column. */
+    public static final int PULLING_FORCE = 39;
+
     /** Number of columns. */
-    public static final int COUNT = 36;
+    public static final int COUNT = 40;
 
     private Column() {}
 }

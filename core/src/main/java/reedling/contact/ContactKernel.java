@@ -34,7 +34,32 @@ public interface ContactKernel {
     }
 
     /**
-     * Several kernels as one, called in order. A vector kernel must stay small (some seventy vector operations) to keep
+     * Whether the dashpot may pull until the overlap is used up; asked of normal kernels only, once, when the stages of a
+     * case are put together. Where it may not, the total force ends at zero unless the elastic force itself pulls.
+     */
+    default boolean dashpotMayPull() {
+        return false;
+    }
+
+    /**
+     * Largest gap, m, across which the bodies may act on each other, or must be watched; asked of normal kernels only.
+     * Rows are given to the laws with TOUCH = 1 while the overlap is above minus the reach of their contact kind and
+     * material pair; a law with a reach keeps its own state of touching in its history.
+     *
+     * @param largestRadius largest effective radius R* of the rows, m
+     */
+    default double reach(double largestRadius) {
+        return 0;
+    }
+
+    /** Whether the normal force may pull, or a change of state may lose energy; asked of normal kernels only, once. */
+    default boolean pulls() {
+        return dashpotMayPull();
+    }
+
+    /**
+     * Several kernels as one, called in order; what is asked of them is answered for all. A vector kernel must stay
+     * small (some seventy vector operations) to keep
      * its vectors in registers; a longer law is cut into kernels and put together here.
      */
     static ContactKernel inOrder(ContactKernel first, ContactKernel... others) {

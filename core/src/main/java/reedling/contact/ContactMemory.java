@@ -14,7 +14,8 @@ import reedling.math.Lanes;
  *
  * The stored vector turns with the contact, keeping its length to fourth order in the angle of a step because n_mean is
  * the normal half-way; a growing contact keeps the force (the stretch shrinks as the stiffness grows with the contact
- * radius a), a shrinking one keeps the stretch, so that a spring never creates energy.
+ * radius a), a shrinking one keeps the stretch, so that a spring never creates energy. {@link #ofStretch} and
+ * {@link #ofForce} keep one of both whatever the contact does; a spring of such a law can create energy.
  *
  * <p>Put it before the law's own kernel with {@link ContactKernel#inOrder}. Where: n normal, v the motion of a column (m/s or rad/s), h the past step (s). Source: the rule for changing stiffness
  * after Thornton and Randall, Applications of theoretical contact mechanics to solid particle system simulation, 1988 (from
@@ -22,22 +23,39 @@ import reedling.math.Lanes;
  *
  * @param column first of the three history columns that hold the vector
  * @param motion first of the three block columns that hold its rate
+ * @param ratio block column of the number that the old vector is multiplied by
+ * @param most largest factor
  */
-public record ContactMemory(int column, int motion) implements ContactKernel {
+public record ContactMemory(int column, int motion, int ratio, double most) implements ContactKernel {
+
+    /** The rule above. */
+    public ContactMemory(int column, int motion) {
+        this(column, motion, Column.RADIUS_RATIO, 1);
+    }
+
+    /** x' = (x - (x . n) n_mean) + v h. */
+    public static ContactMemory ofStretch(int column, int motion) {
+        return new ContactMemory(column, motion, Column.TOUCH, 1);
+    }
+
+    /** x' = (x - (x . n) n_mean) a_old / a + v h: stiffness times x, with a stiffness that goes with a, is not changed. */
+    public static ContactMemory ofForce(int column, int motion) {
+        return new ContactMemory(column, motion, Column.RADIUS_RATIO, Double.POSITIVE_INFINITY);
+    }
 
     @Override
     public void apply(ContactBlock block) {
         if (Lanes.VECTORISED) {
-            vector(block, column, motion);
+            vector(block);
         } else {
-            scalar(block, column, motion);
+            scalar(block);
         }
     }
 
-    private static void vector(ContactBlock block, int column, int motion) {
+    private void vector(ContactBlock block) {
         double[] c = block.columns();
         double[] history = block.history();
-        DoubleVector one = DoubleVector.broadcast(Lanes.SPECIES, 1.0);
+        DoubleVector largest = DoubleVector.broadcast(Lanes.SPECIES, most);
         DoubleVector step = DoubleVector.broadcast(Lanes.SPECIES, block.step());
         for (int r = 0; r < block.rows(); r += Lanes.TILE) {
             int at = block.historyAt(r, column);
@@ -48,7 +66,7 @@ public record ContactMemory(int column, int motion) implements ContactKernel {
                     ny = load(c, Column.NORMAL + 1, r),
                     nz = load(c, Column.NORMAL + 2, r);
             DoubleVector along = x.fma(nx, y.fma(ny, z.mul(nz))).neg();
-            DoubleVector keep = Lanes.smaller(load(c, Column.RADIUS_RATIO, r), one);
+            DoubleVector keep = Lanes.smaller(load(c, ratio, r), largest);
             x = along.fma(load(c, Column.MEAN_NORMAL, r), x).mul(keep);
             y = along.fma(load(c, Column.MEAN_NORMAL + 1, r), y).mul(keep);
             z = along.fma(load(c, Column.MEAN_NORMAL + 2, r), z).mul(keep);
@@ -58,7 +76,7 @@ public record ContactMemory(int column, int motion) implements ContactKernel {
         }
     }
 
-    private static void scalar(ContactBlock block, int column, int motion) {
+    private void scalar(ContactBlock block) {
         double[] c = block.columns();
         double[] history = block.history();
         double step = block.step();
@@ -67,8 +85,8 @@ public record ContactMemory(int column, int motion) implements ContactKernel {
             double x = history[h], y = history[h + Lanes.TILE], z = history[h + 2 * Lanes.TILE];
             double nx = c[at(Column.NORMAL) + r], ny = c[at(Column.NORMAL + 1) + r], nz = c[at(Column.NORMAL + 2) + r];
             double along = -Math.fma(x, nx, Math.fma(y, ny, z * nz));
-            double ratio = c[at(Column.RADIUS_RATIO) + r];
-            double keep = ratio < 1.0 ? ratio : 1.0;
+            double factor = c[at(ratio) + r];
+            double keep = factor < most ? factor : most;
             x = Math.fma(along, c[at(Column.MEAN_NORMAL) + r], x) * keep;
             y = Math.fma(along, c[at(Column.MEAN_NORMAL + 1) + r], y) * keep;
             z = Math.fma(along, c[at(Column.MEAN_NORMAL + 2) + r], z) * keep;

@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.contact;
 
-/** Kernels called one after the other, from one place, so that each is compiled for itself; the first speaks for all. */
+/** Kernels called one after the other, from one place, so that each is compiled for itself; the strictest speaks for all. */
 final class KernelSequence implements ContactKernel {
 
     private final ContactKernel[] kernels;
@@ -21,11 +21,43 @@ final class KernelSequence implements ContactKernel {
 
     @Override
     public double duration(double speed, double radius, double mass) {
-        return kernels[0].duration(speed, radius, mass);
+        double shortest = Double.POSITIVE_INFINITY;
+        for (ContactKernel kernel : kernels) {
+            shortest = Math.min(shortest, kernel.duration(speed, radius, mass));
+        }
+        return shortest;
     }
 
     @Override
     public double dampingRatio() {
-        return kernels[0].dampingRatio();
+        double largest = 0;
+        for (ContactKernel kernel : kernels) {
+            largest = Math.max(largest, kernel.dampingRatio());
+        }
+        return largest;
+    }
+
+    @Override
+    public double reach(double largestRadius) {
+        double largest = 0;
+        for (ContactKernel kernel : kernels) {
+            largest = Math.max(largest, kernel.reach(largestRadius));
+        }
+        return largest;
+    }
+
+    @Override
+    public boolean pulls() {
+        for (ContactKernel kernel : kernels) {
+            if (kernel.pulls()) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    @Override
+    public boolean dashpotMayPull() {
+        return kernels[0].dashpotMayPull();
     }
 }

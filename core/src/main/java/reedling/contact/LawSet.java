@@ -19,13 +19,19 @@ public final class LawSet {
     /**
      * Kernels of one contact kind and material pair.
      *
+     * @param normal all normal stages, in order
      * @param tangential null where the case has no friction law
      * @param rolling null where the case has no rolling law
+     * @param twisting null where the case has no twisting law
      */
     public record Bound(
             ContactKernel normal,
             @Nullable ContactKernel tangential,
-            @Nullable ContactKernel rolling) {}
+            @Nullable ContactKernel rolling,
+            @Nullable ContactKernel twisting) {}
+
+    /** Normal stages that a case may add to the obligatory one, in order. */
+    private static final List<Stage> ADDED = List.of(Stage.ADHESION, Stage.NEAR_FIELD);
 
     private final Map<Stage, ContactLaw> laws;
     private final Map<ContactKind, List<Bound>> bound = new EnumMap<>(ContactKind.class);
@@ -67,9 +73,22 @@ public final class LawSet {
 
     private Bound bind(MaterialPair pair, ContactKind kind, Map<Stage, Integer> start) {
         return new Bound(
-                Objects.requireNonNull(laws.get(Stage.NORMAL)).bind(pair, kind, startOf(Stage.NORMAL, start)),
+                normal(pair, kind, start),
                 optional(Stage.TANGENTIAL, pair, kind, start),
-                optional(Stage.ROLLING, pair, kind, start));
+                optional(Stage.ROLLING, pair, kind, start),
+                optional(Stage.TWISTING, pair, kind, start));
+    }
+
+    private ContactKernel normal(MaterialPair pair, ContactKind kind, Map<Stage, Integer> start) {
+        ContactKernel first = Objects.requireNonNull(optional(Stage.NORMAL, pair, kind, start));
+        List<ContactKernel> added = new ArrayList<>();
+        for (Stage stage : ADDED) {
+            ContactKernel kernel = optional(stage, pair, kind, start);
+            if (kernel != null) {
+                added.add(kernel);
+            }
+        }
+        return added.isEmpty() ? first : ContactKernel.inOrder(first, added.toArray(new ContactKernel[0]));
     }
 
     private @Nullable ContactKernel optional(

@@ -20,7 +20,8 @@ import reedling.neighbour.PairSegment;
  * <pre>v_d = (v - h F_el / (2 m)) / (1 + h c / (2 m)),   F_n = max(F_el + c v_d, min(F_el, 0))</pre>
  *
  * where v is the closing speed at the half step (m/s), h the step (s), c the dashpot (N s/m), 1/m the true inverse mass
- * (1/kg). A contact may not pull unless its elastic force does. Books the dashpot's work, 1/2 (old + new force) v h.
+ * (1/kg). A contact may not pull unless its elastic force does, or unless the normal law lets its dashpot pull: then F_n
+ * = F_el + c v_d until the overlap is used up. Books the dashpot's work, 1/2 (old + new force) v h.
  *
  * <p>Source of the clipped end of contact: Schwager and Poeschel, Coefficient of restitution and linear-dashpot model
  * revisited, 2007 (from memory).
@@ -32,31 +33,39 @@ final class NormalSolve implements RowStage {
 
     private static final int HISTORY_RADIUS = 0;
 
+    private final double
+            least; // N, under which the dashpot may not take the force: 0, or minus infinity where it may pull
+
+    NormalSolve(boolean dashpotMayPull) {
+        least = dashpotMayPull ? Double.NEGATIVE_INFINITY : 0;
+    }
+
     @Override
     public void run(RowRange rows) {
         ContactBlock block = rows.block();
         ContactTally tally = rows.tally();
         if (Lanes.VECTORISED) {
-            vector(block, rows.ledger(), rows.ledgerAt(), tally);
+            vector(block, rows.ledger(), rows.ledgerAt(), tally, least);
         } else {
-            scalar(block, rows.ledger(), rows.ledgerAt(), tally);
+            scalar(block, rows.ledger(), rows.ledgerAt(), tally, least);
         }
         if (!(block.shortestDuration() == Double.POSITIVE_INFINITY)) {
             tally.duration(block.shortestDuration());
         }
     }
 
-    private static void vector(ContactBlock block, float[] ledger, int ledgerAt, ContactTally tally) {
+    private static void vector(
+            ContactBlock block, float[] ledger, int ledgerAt, ContactTally tally, double leastForce) {
         double[] c = block.columns();
         double[] history = block.history();
         double halfStep = 0.5 * block.step();
         DoubleVector one = DoubleVector.broadcast(Lanes.SPECIES, 1.0);
-        DoubleVector zero = DoubleVector.zero(Lanes.SPECIES);
+        DoubleVector least = DoubleVector.broadcast(Lanes.SPECIES, leastForce);
         DoubleVector half = DoubleVector.broadcast(Lanes.SPECIES, halfStep);
         DoubleVector deepest = DoubleVector.broadcast(Lanes.SPECIES, -DEEPEST);
         DoubleVector work = DoubleVector.fromArray(Lanes.SPECIES, tally.sums(), ContactTally.NORMAL);
         DoubleVector excess = DoubleVector.broadcast(Lanes.SPECIES, Double.NEGATIVE_INFINITY);
-        DoubleVector touched = zero;
+        DoubleVector touched = DoubleVector.zero(Lanes.SPECIES);
         for (int r = 0; r < block.rows(); r += Lanes.TILE) {
             DoubleVector touch = load(c, Column.TOUCH, r);
             touched = touched.max(touch);
@@ -66,7 +75,7 @@ final class NormalSolve implements RowStage {
             DoubleVector halfOverMass = half.mul(load(c, Column.INVERSE_MASS, r));
 
             DoubleVector speed = halfOverMass.neg().fma(elastic, closing).div(halfOverMass.fma(damping, one));
-            DoubleVector total = Lanes.larger(damping.fma(speed, elastic), Lanes.smaller(elastic, zero))
+            DoubleVector total = Lanes.larger(damping.fma(speed, elastic), Lanes.smaller(elastic, least))
                     .mul(touch);
             DoubleVector dashpot = total.sub(elastic.mul(touch));
             store(total, c, Column.NORMAL_FORCE, r);
@@ -88,7 +97,8 @@ final class NormalSolve implements RowStage {
         tally.touch(touched.reduceLanes(VectorOperators.MAX) > 0);
     }
 
-    private static void scalar(ContactBlock block, float[] ledger, int ledgerAt, ContactTally tally) {
+    private static void scalar(
+            ContactBlock block, float[] ledger, int ledgerAt, ContactTally tally, double leastForce) {
         double[] c = block.columns();
         double[] history = block.history();
         double half = 0.5 * block.step();
@@ -106,7 +116,7 @@ final class NormalSolve implements RowStage {
             double halfOverMass = half * c[at(Column.INVERSE_MASS) + r];
 
             double speed = Math.fma(-halfOverMass, elastic, closing) / Math.fma(halfOverMass, damping, 1.0);
-            double pull = elastic < 0 ? elastic : 0;
+            double pull = elastic < leastForce ? elastic : leastForce;
             double raw = Math.fma(damping, speed, elastic);
             double total = (raw > pull ? raw : pull) * touch;
             double dashpot = total - elastic * touch;

@@ -24,13 +24,31 @@ final class StageLine {
     /** Laws of one contact kind and material pair with the engine's stages between them. */
     static StageLine ofLaws(LawSet.Bound laws) {
         List<RowStage> stages = new ArrayList<>();
+        boolean pulls = laws.normal().pulls();
+        if (pulls) {
+            stages.add(rows -> rows.block().clear(Column.ADHESIVE_LOAD, 2));
+        }
         stages.add(new LawStage(laws.normal()));
         stages.add(StageLine::keepStoredEnergy);
-        stages.add(new NormalSolve());
+        stages.add(new NormalSolve(laws.normal().dashpotMayPull()));
+        if (pulls) {
+            stages.add(PullingForce::load);
+        }
         ContactKernel tangential = laws.tangential();
         stages.add(tangential == null ? rows -> rows.block().clear(Column.FRICTION, 4) : new LawStage(tangential));
         ContactKernel rolling = laws.rolling();
+        ContactKernel twisting = laws.twisting();
+        if (twisting != null) {
+            stages.add(new TwistRate());
+        }
         stages.add(rolling == null ? rows -> rows.block().clear(Column.ROLLING_MOMENT, 3) : new LawStage(rolling));
+        if (twisting != null) {
+            stages.add(new LawStage(twisting));
+            stages.add(new TwistReturn());
+        }
+        if (pulls) {
+            stages.add(PullingForce::giveBack);
+        }
         stages.add(new ContactWork());
         stages.add(new ContactForce());
         stages.add(new FirstForces());

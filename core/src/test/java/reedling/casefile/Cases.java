@@ -45,6 +45,7 @@ final class Cases {
             case NORMAL -> List.of(new Named("hertz", List.of()), new Named("linear", List.of(obligatory())));
             case TANGENTIAL -> List.of(new Named("mindlin", List.of()));
             case ROLLING -> List.of(new Named("elastic-plastic", List.of()));
+            case ADHESION, NEAR_FIELD, TWISTING -> List.of();
             case FIELD -> List.of(new Named("gravity", List.of(gravity())), new Named("drag", List.of()));
             case ELEMENT -> List.of(new Named("beam", List.of(shear())));
         };

@@ -89,7 +89,8 @@ final class BedModel {
     private static LawSet laws(MaterialTable table) {
         Map<Stage, ContactLaw> laws = new EnumMap<>(Stage.class);
         RollingProvider rolling = new RollingProvider();
-        laws.put(Stage.NORMAL, new HertzProvider().create(new ParameterValues(Map.of())));
+        HertzProvider hertz = new HertzProvider();
+        laws.put(Stage.NORMAL, hertz.create(ParameterValues.of(hertz, Map.of())));
         laws.put(Stage.TANGENTIAL, new MindlinProvider().create(new ParameterValues(Map.of())));
         laws.put(Stage.ROLLING, rolling.create(ParameterValues.of(rolling, Map.of())));
         return new LawSet(laws, table);

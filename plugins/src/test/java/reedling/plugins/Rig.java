@@ -51,7 +51,8 @@ public final class Rig {
 
     /** Hertz, Mindlin and rolling resistance. */
     public Rig() {
-        laws.put(Stage.NORMAL, new HertzProvider().create(new ParameterValues(Map.of())));
+        HertzProvider hertz = new HertzProvider();
+        laws.put(Stage.NORMAL, hertz.create(ParameterValues.of(hertz, Map.of())));
         laws.put(Stage.TANGENTIAL, new MindlinProvider().create(new ParameterValues(Map.of())));
         RollingProvider rolling = new RollingProvider();
         laws.put(Stage.ROLLING, rolling.create(ParameterValues.of(rolling, Map.of())));

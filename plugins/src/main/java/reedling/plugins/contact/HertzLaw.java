@@ -23,12 +23,17 @@ import reedling.math.Roots;
  * a = sqrt(R* d)                       radius of contact, m
  * F_el = 4/3 E* a d                    N
  * k_n = 2 E* a                         N/m
- * c = alpha sqrt(2/3 k_n m*)           N s/m, alpha = sqrt(5) zeta(e)
+ * c = alpha sqrt(2/3 k_n m*)           N s/m, alpha = sqrt(5) zeta(e), so c = alpha sqrt(m* k) d^(1/4), k = 4/3 E* sqrt(R*)
  * t_c = 2.868266 (m*^2 / (R* E*^2 v_eq))^(1/5),  v_eq^2 = v_n^2 + 4/5 F_el d / m*     s
  * </pre>
  *
  * <p>Where: d overlap (m); R* effective radius (m); m* effective mass (kg); E* contact modulus (Pa); v_n closing speed
  * (m/s); e restitution of the material pair. v_eq is the speed the pair had: constant through an elastic contact.
+ *
+ * <p>End of contact: by default the total force never pulls, and zeta is calibrated for that. Where the dashpot may pull,
+ * it does so until the overlap is used up, with the smaller zeta that then gives the same restitution. The asked restitution
+ * is exact in both; peak force and duration differ, and the default has no pull that dry bodies do not show. While the dashpot
+ * pulls there is no friction.
  *
  * <p>Shapes: a block of rows; no history. Stable step: t_c / 10 or less. Errors: restitution below 0.05 is refused by
  * the case file. Source: Hertz 1882; Johnson, Contact Mechanics, 1985; Tsuji, Tanaka and Ishida, Lagrangian numerical
@@ -41,21 +46,30 @@ final class HertzLaw implements ContactLaw {
 
     private static final double SMALLEST_OVERLAP = 1e-40; // m, keeps roots and quotients finite where nothing touches
 
+    private final boolean dashpotMayPull;
+
+    HertzLaw(boolean dashpotMayPull) {
+        this.dashpotMayPull = dashpotMayPull;
+    }
+
     @Override
     public ContactKernel bind(MaterialPair pair, ContactKind kind, int historyColumn) {
         double modulus = pair.contactModulus();
         return new Kernel(
                 modulus,
-                StrictMath.sqrt(5) * Restitution.dampingRatio(pair.restitution()),
-                DURATION * StrictMath.pow(modulus, -0.4));
+                StrictMath.sqrt(5) * Restitution.dampingRatio(pair.restitution(), dashpotMayPull),
+                DURATION * StrictMath.pow(modulus, -0.4),
+                dashpotMayPull);
     }
 
     /**
      * @param modulus E*, Pa
      * @param alpha damping number, 0 for an elastic contact
      * @param duration contact time for (m*^2 / (R* v))^(1/5) = 1 SI
+     * @param dashpotMayPull until the overlap is used up
      */
-    private record Kernel(double modulus, double alpha, double duration) implements ContactKernel {
+    private record Kernel(double modulus, double alpha, double duration, boolean dashpotMayPull)
+            implements ContactKernel {
 
         @Override
         public void apply(ContactBlock block) {

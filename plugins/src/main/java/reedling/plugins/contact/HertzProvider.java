@@ -1,9 +1,11 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.plugins.contact;
 
+import java.util.List;
 import reedling.contact.ContactLaw;
 import reedling.contact.ContactLawProvider;
 import reedling.contact.Stage;
+import reedling.plugin.Parameter;
 import reedling.plugin.ParameterValues;
 
 /** Offers {@link HertzLaw} under the name {@code hertz}. */
@@ -30,12 +32,17 @@ public final class HertzProvider implements ContactLawProvider {
     }
 
     @Override
+    public List<Parameter> parameters() {
+        return List.of(EndOfContact.PARAMETER);
+    }
+
+    @Override
     public Stage stage() {
         return Stage.NORMAL;
     }
 
     @Override
     public ContactLaw create(ParameterValues values) {
-        return new HertzLaw();
+        return new HertzLaw(EndOfContact.dashpotMayPull(values));
     }
 }

@@ -36,6 +36,6 @@ public final class MindlinProvider implements ContactLawProvider {
 
     @Override
     public ContactLaw create(ParameterValues values) {
-        return new MindlinLaw();
+        return new MindlinLaw(StretchRule.PASSIVE);
     }
 }

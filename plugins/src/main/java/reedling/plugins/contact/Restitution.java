@@ -2,11 +2,13 @@
 package reedling.plugins.contact;
 
 /**
- * Damping ratio zeta that gives a Hertz contact, its total force clipped at zero, the asked coefficient of restitution.
+ * Damping ratio zeta that gives a contact the asked coefficient of restitution, for both ends that a contact can have.
  *
- * <p>With s = 4/5 d^(5/4) the damped Hertz contact is a linear oscillator in s, so restitution does not depend on speed.
- * Where the force may not pull, it ends the impulse at zero force:
- * {@code e = exp(-2 zeta acos(zeta) / sqrt(1 - zeta^2))}, for zeta > 1 with acosh and sqrt(zeta^2 - 1).
+ * <p>A linear spring with a dashpot is a linear oscillator; so is the damped Hertz contact, in s = 4/5 d^(5/4). Restitution
+ * therefore does not depend on speed, and one formula serves both laws. Where the force may not pull, it ends the impulse
+ * at zero force: {@code e = exp(-2 zeta acos(zeta) / sqrt(1 - zeta^2))}, for zeta > 1 with acosh and sqrt(zeta^2 - 1).
+ * Where the dashpot may pull until the overlap is used up: {@code e = exp(-pi zeta / sqrt(1 - zeta^2))}, which turned
+ * round is {@code zeta = L / sqrt(L^2 + pi^2), L = -ln e}.
  *
  * <p>Source: Antypov and Elliott, On an analytical solution for the damped Hertzian spring, 2011 (map to the linear
  * oscillator); Schwager and Poeschel 2007 (end of contact at zero force); both from memory, the compact form is derived
@@ -21,7 +23,17 @@ final class Restitution {
 
     private Restitution() {}
 
-    /** Restitution of a damping ratio. */
+    /** Damping ratio of a restitution in 0.05..1 for an end of contact. */
+    static double dampingRatio(double restitution, boolean dashpotMayPull) {
+        return dashpotMayPull ? pullingDampingRatio(restitution) : dampingRatio(restitution);
+    }
+
+    private static double pullingDampingRatio(double restitution) {
+        double loss = -StrictMath.log(Math.min(restitution, 1));
+        return loss / StrictMath.sqrt(loss * loss + Math.PI * Math.PI);
+    }
+
+    /** Restitution of a damping ratio where the force may not pull. */
     static double of(double zeta) {
         if (Math.abs(zeta - 1) < 1e-9) {
             return StrictMath.exp(-2);
@@ -36,7 +48,7 @@ final class Restitution {
         return StrictMath.log(x + StrictMath.sqrt(x * x - 1));
     }
 
-    /** Damping ratio of a restitution in 0.05..1, by bisection: restitution falls as damping rises. */
+    /** Damping ratio of a restitution in 0.05..1 where the force may not pull, by bisection: restitution falls as damping rises. */
     static double dampingRatio(double restitution) {
         double low = 0;
         double high = 4;

@@ -21,8 +21,8 @@ import reedling.plugin.ParameterValues;
 class ContactDurationTest {
 
     private static ContactKernel kernel(Material one, Material two) {
-        return new HertzProvider()
-                .create(new ParameterValues(Map.of()))
+        HertzProvider provider = new HertzProvider();
+        return provider.create(ParameterValues.of(provider, Map.of()))
                 .bind(new MaterialPair(one, two, 0.5, 0, 0), ContactKind.GRAIN_GRAIN, 1);
     }
 

@@ -153,7 +153,8 @@ final class RainDeck {
                 new Lot("vetch", 0, new UniformSize(3.6e-3, 5.2e-3)),
                 new Lot("peas", 0, new UniformSize(5.0e-3, 7.0e-3)));
         Map<Stage, ContactLaw> laws = new EnumMap<>(Stage.class);
-        laws.put(Stage.NORMAL, new HertzProvider().create(new ParameterValues(Map.of())));
+        HertzProvider hertz = new HertzProvider();
+        laws.put(Stage.NORMAL, hertz.create(ParameterValues.of(hertz, Map.of())));
         laws.put(Stage.TANGENTIAL, new MindlinProvider().create(new ParameterValues(Map.of())));
         RollingProvider rolling = new RollingProvider();
         laws.put(Stage.ROLLING, rolling.create(ParameterValues.of(rolling, Map.of())));

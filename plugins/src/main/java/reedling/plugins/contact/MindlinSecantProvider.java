@@ -1,0 +1,41 @@
+// SPDX-License-Identifier: Apache-2.0
+package reedling.plugins.contact;
+
+import reedling.contact.ContactLaw;
+import reedling.contact.ContactLawProvider;
+import reedling.contact.Stage;
+import reedling.plugin.ParameterValues;
+
+/** Offers {@link MindlinLaw} with {@link StretchRule#SECANT} under the name {@code mindlin-secant}. */
+public final class MindlinSecantProvider implements ContactLawProvider {
+
+    @Override
+    public String name() {
+        return "mindlin-secant";
+    }
+
+    @Override
+    public int apiLevel() {
+        return API_LEVEL;
+    }
+
+    @Override
+    public String summary() {
+        return "Friction as mindlin, but its spring keeps the stretch when the load changes; may create energy.";
+    }
+
+    @Override
+    public String source() {
+        return "Mindlin, Compliance of elastic bodies in contact, 1949; the rule for changing load: common practice, no source";
+    }
+
+    @Override
+    public Stage stage() {
+        return Stage.TANGENTIAL;
+    }
+
+    @Override
+    public ContactLaw create(ParameterValues values) {
+        return new MindlinLaw(StretchRule.SECANT);
+    }
+}
