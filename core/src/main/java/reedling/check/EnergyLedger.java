@@ -134,8 +134,7 @@ public final class EnergyLedger implements Persistent {
         }
         residual = balance - start;
         dissipated = contactWork - springs + energy.strainDissipation() + energy.modalDissipation();
-        throughput =
-                dissipated + Math.abs(fieldWork) + kinetic + energy.kinetic() + stored + springs + energy.strain();
+        throughput = dissipated + Math.abs(fieldWork) + kinetic + energy.kinetic() + stored + springs + energy.strain();
         holdings = new Holdings(
                 kinetic + energy.kinetic(),
                 interactions.potentialEnergy() + energy.gravity(),

@@ -146,8 +146,8 @@ final class FlowTable {
         long expected = (long) grid.count()[0] * grid.count()[1] * grid.count()[2];
         if (expected != nodes.size()) {
             String got = nodes.size() + " nodes";
-            String wanted = expected + " for a grid of " + grid.count()[0] + " x " + grid.count()[1] + " x "
-                    + grid.count()[2];
+            String wanted =
+                    expected + " for a grid of " + grid.count()[0] + " x " + grid.count()[1] + " x " + grid.count()[2];
             find("nodes", got, wanted, "Every node of the grid needs one line.");
             stopAtFindings();
         }

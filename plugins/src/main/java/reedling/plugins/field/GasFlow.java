@@ -4,7 +4,6 @@ package reedling.plugins.field;
 /** Velocity of a gas over space, before any change with time. Threads: immutable. */
 interface GasFlow {
 
-
     /**
      * Writes the gas at a point.
      *

@@ -130,9 +130,7 @@ record GasForce(Gas gas, Choices choices, GasFlow flow, FlowVariation variation)
             case NONE -> 0;
             case RUBINOW_KELLER -> Math.PI * radius * radius * radius * gas.density;
             case CONSTANT ->
-                spin > 0
-                        ? 0.5 * gas.density * Math.PI * radius * radius * choices.liftCoefficient * speed / spin
-                        : 0;
+                spin > 0 ? 0.5 * gas.density * Math.PI * radius * radius * choices.liftCoefficient * speed / spin : 0;
         };
     }
 }

@@ -80,7 +80,8 @@ public final class GasProvider implements FieldProvider {
         all.add(number("swing_frequency", Dimension.FREQUENCY, 0, 1e6, 0, "Frequency of the swing."));
     }
 
-    private static Parameter number(String key, Dimension dimension, double least, double most, double preset, String is) {
+    private static Parameter number(
+            String key, Dimension dimension, double least, double most, double preset, String is) {
         return new Parameter(key, dimension, least, most, preset, is);
     }
 
@@ -137,7 +138,8 @@ public final class GasProvider implements FieldProvider {
 
     private static GasFlow table(String file) {
         if (file.isEmpty()) {
-            Finding missing = new Finding("gas", "table", "missing", "the path of a CSV file", "flow = \"table\" needs it.");
+            Finding missing =
+                    new Finding("gas", "table", "missing", "the path of a CSV file", "flow = \"table\" needs it.");
             throw new ReedlingException(ExitCode.CASE, missing);
         }
         return FlowTable.read(file);
