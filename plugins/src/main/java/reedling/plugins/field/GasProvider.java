@@ -65,7 +65,7 @@ public final class GasProvider implements FieldProvider {
 
     private static void flow(List<Parameter> all) {
         all.add(Parameter.choice("flow", List.of("uniform", "shear", "vortex", "table"), "uniform", "How it moves."));
-        three(all, "velocity_", Dimension.SPEED, FASTEST, "Uniform part of the flow along ");
+        three(all, "velocity_", Dimension.SPEED, FASTEST, "Uniform part of the flow, not with a table, along ");
         three(all, "centre_", Dimension.LENGTH, FAR, "Point of the vortex axis, or where the shear is zero, along ");
         all.add(number("shear_rate", Dimension.SHEAR_RATE, -1e6, 1e6, 0, "Growth of the sheared velocity."));
         all.add(Parameter.choice("shear_along", AXES, "x", "Axis of the sheared velocity."));
@@ -93,6 +93,10 @@ public final class GasProvider implements FieldProvider {
 
     @Override
     public Field create(ParameterValues values) {
+        List<Finding> unused = unused(values);
+        if (!unused.isEmpty()) {
+            throw new ReedlingException(ExitCode.CASE, unused);
+        }
         GasForce.Gas gas = new GasForce.Gas(values.get("density"), values.get("viscosity"));
         GasForce.Choices choices = new GasForce.Choices(
                 DragCurve.of(values.word("drag")),
@@ -105,6 +109,31 @@ public final class GasProvider implements FieldProvider {
         double[] gravity = vector(values, "gravity_");
         return new GasField(
                 gas.density(), gravity[0], gravity[1], gravity[2], new GasForce(gas, choices, flow(values), variation));
+    }
+
+    /** What is written but would not be felt: most likely the choice that needs it was forgotten. */
+    private static List<Finding> unused(ParameterValues values) {
+        List<Finding> findings = new ArrayList<>();
+        String flow = values.word("flow");
+        if (!flow.equals("shear") && values.get("shear_rate") != 0) {
+            findings.add(unused("shear rate", "a shear"));
+        }
+        if (!flow.equals("vortex") && values.get("vortex_spin") != 0) {
+            findings.add(unused("vortex spin", "a vortex"));
+        }
+        if (!flow.equals("table") && !values.word("table").isEmpty()) {
+            findings.add(unused("table", "a table"));
+        }
+        for (String axis : AXES) {
+            if (flow.equals("table") && values.get("velocity_" + axis) != 0) {
+                findings.add(unused("velocity " + axis, "no table"));
+            }
+        }
+        return findings;
+    }
+
+    private static Finding unused(String what, String flow) {
+        return new Finding("gas", what, "without effect", "flow to be " + flow, "Correct flow, or remove this key.");
     }
 
     private static GasFlow flow(ParameterValues values) {

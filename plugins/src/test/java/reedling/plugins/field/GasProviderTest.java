@@ -9,6 +9,7 @@ import java.util.Map;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import reedling.error.Finding;
 import reedling.error.ReedlingException;
 import reedling.plugin.Parameter;
 import reedling.plugin.ParameterValues;
@@ -56,6 +57,21 @@ class GasProviderTest {
                 ReedlingException.class,
                 () -> provider.create(ParameterValues.of(provider, Map.of(), Map.of("flow", "table"))));
         assertThat(tableless.findings().getFirst().toString()).contains("table: is missing");
+    }
+
+    @Test
+    void keysWithoutEffectAreRefused() {
+        GasProvider provider = new GasProvider();
+        ReedlingException idle = catchThrowableOfType(
+                ReedlingException.class,
+                () -> provider.create(ParameterValues.of(
+                        provider, Map.of("shear_rate", 2.0, "vortex_spin", 3.0), Map.of("table", "wind.csv"))));
+        assertThat(idle.findings()).extracting(Finding::what).containsExactly("shear rate", "vortex spin", "table");
+        ReedlingException doubled = catchThrowableOfType(
+                ReedlingException.class,
+                () -> provider.create(ParameterValues.of(
+                        provider, Map.of("velocity_y", 2.0), Map.of("table", "wind.csv", "flow", "table"))));
+        assertThat(doubled.findings()).extracting(Finding::what).containsExactly("velocity y");
     }
 
     @Test
