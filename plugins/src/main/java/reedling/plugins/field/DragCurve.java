@@ -41,9 +41,11 @@ enum DragCurve {
      * and Naumann, Ueber die grundlegenden Berechnungen bei der Schwerkraftaufbereitung, 1933.
      */
     SCHILLER_NAUMANN {
+        private final PowerLaw power = new PowerLaw(0.687);
+
         @Override
         double factor(double re, double constant) {
-            return re < SWITCH ? 1 + 0.15 * StrictMath.pow(re, 0.687) : 0.44 / 24 * re;
+            return re < SWITCH ? 1 + 0.15 * power.of(re) : 0.44 / 24 * re;
         }
 
         @Override
@@ -57,9 +59,11 @@ enum DragCurve {
      * Levenspiel, Drag coefficient and terminal velocity of spherical and nonspherical particles, 1989.
      */
     HAIDER_LEVENSPIEL {
+        private final PowerLaw power = new PowerLaw(0.6459);
+
         @Override
         double factor(double re, double constant) {
-            return 1 + 0.1806 * StrictMath.pow(re, 0.6459) + inertial(re);
+            return 1 + 0.1806 * power.of(re) + inertial(re);
         }
 
         @Override
