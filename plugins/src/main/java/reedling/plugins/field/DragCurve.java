@@ -41,11 +41,9 @@ enum DragCurve {
      * and Naumann, Ueber die grundlegenden Berechnungen bei der Schwerkraftaufbereitung, 1933.
      */
     SCHILLER_NAUMANN {
-        private final PowerLaw power = new PowerLaw(0.687);
-
         @Override
         double factor(double re, double constant) {
-            return re < SWITCH ? 1 + 0.15 * power.of(re) : 0.44 / 24 * re;
+            return re < SWITCH ? 1 + 0.15 * SCHILLER_POWER.of(re) : 0.44 / 24 * re;
         }
 
         @Override
@@ -59,11 +57,9 @@ enum DragCurve {
      * Levenspiel, Drag coefficient and terminal velocity of spherical and nonspherical particles, 1989.
      */
     HAIDER_LEVENSPIEL {
-        private final PowerLaw power = new PowerLaw(0.6459);
-
         @Override
         double factor(double re, double constant) {
-            return 1 + 0.1806 * power.of(re) + inertial(re);
+            return 1 + 0.1806 * HAIDER_POWER.of(re) + inertial(re);
         }
 
         @Override
@@ -92,6 +88,9 @@ enum DragCurve {
 
     /** Reynolds number from which the constant part of Schiller and Naumann holds. */
     private static final double SWITCH = 1000;
+
+    private static final PowerLaw SCHILLER_POWER = new PowerLaw(0.687);
+    private static final PowerLaw HAIDER_POWER = new PowerLaw(0.6459);
 
     /**
      * Factor f on the drag of Stokes.
