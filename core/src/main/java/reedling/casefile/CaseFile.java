@@ -8,6 +8,7 @@ import java.nio.file.Files;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Objects;
 import reedling.error.ExitCode;
 import reedling.error.Finding;
 import reedling.error.ReedlingException;
@@ -31,18 +32,25 @@ public final class CaseFile {
      *     {@link ExitCode#NO_INPUT}
      */
     public static CaseReading read(Path file, List<String> assignments, ProviderLookup lookup) {
-        return read(text(file), file.toString(), assignments, lookup);
+        Path folder = Objects.requireNonNullElse(file.toAbsolutePath().getParent(), file.toAbsolutePath());
+        return read(text(file), file.toString(), folder, assignments, lookup);
     }
 
     /**
-     * The same for a text already in memory.
+     * The same for a text already in memory; files it names are taken from the current folder.
      *
      * @param source name for findings
      */
     public static CaseReading read(String text, String source, List<String> assignments, ProviderLookup lookup) {
+        return read(text, source, Path.of("").toAbsolutePath(), assignments, lookup);
+    }
+
+    private static CaseReading read(
+            String text, String source, Path folder, List<String> assignments, ProviderLookup lookup) {
         Findings findings = new Findings();
         Node.Table root = TomlTree.read(text, source, findings);
         Assignments.apply(root, assignments, findings);
+        new FileAnchors(folder, lookup).apply(root);
         return new CaseReader(root, lookup, findings).read();
     }
 

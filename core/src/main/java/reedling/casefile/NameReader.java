@@ -69,11 +69,19 @@ final class NameReader {
         return text(node, "a name of " + table, path).filter(name -> known(node, name, table, path));
     }
 
-    private boolean known(Node node, String name, String table, String path) {
-        Node entries = root.entries().get(table);
-        List<String> names = entries instanceof Node.Table found
+    /** Number of a name in its table, counted from 0 in file order. */
+    Optional<Double> number(Node node, String table, String path) {
+        return reference(node, table, path).map(name -> (double) names(table).indexOf(name));
+    }
+
+    private List<String> names(String table) {
+        return root.entries().get(table) instanceof Node.Table found
                 ? List.copyOf(found.entries().keySet())
                 : List.of();
+    }
+
+    private boolean known(Node node, String name, String table, String path) {
+        List<String> names = names(table);
         if (names.contains(name)) {
             return true;
         }

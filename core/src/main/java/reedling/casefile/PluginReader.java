@@ -15,11 +15,13 @@ final class PluginReader {
 
     private final ProviderLookup lookup;
     private final NumberReader numbers;
+    private final NameReader names;
     private final Findings findings;
 
-    PluginReader(ProviderLookup lookup, NumberReader numbers, Findings findings) {
+    PluginReader(ProviderLookup lookup, NumberReader numbers, NameReader names, Findings findings) {
         this.lookup = lookup;
         this.numbers = numbers;
+        this.names = names;
         this.findings = findings;
     }
 
@@ -65,25 +67,36 @@ final class PluginReader {
     }
 
     private Optional<PluginChoice> parameters(Node.Table table, Provider provider, String nameKey, String path) {
-        Map<String, Double> given = new LinkedHashMap<>();
+        Map<String, Double> numbersGiven = new LinkedHashMap<>();
+        Map<String, String> wordsGiven = new LinkedHashMap<>();
         boolean sound = noOthers(table, provider, nameKey, path);
         for (Parameter parameter : provider.parameters()) {
             String inner = ValueReader.join(path, parameter.name());
-            ValueType.Quantity type = new ValueType.Quantity(
-                    parameter.dimension(), Range.closed(parameter.minimum(), parameter.maximum()));
             Node node = table.entries().get(parameter.name());
-            if (node != null) {
-                Optional<Double> value = numbers.quantity(node, type, inner);
-                value.ifPresent(number -> given.put(parameter.name(), number));
-                sound &= value.isPresent();
-            } else if (parameter.obligatory()) {
-                findings.missing(table.place(), inner, TypeText.of(type), parameter.meaning());
+            if (node == null && parameter.obligatory()) {
+                findings.missing(table.place(), inner, TypeText.of(quantity(parameter)), parameter.meaning());
                 sound = false;
+            } else if (node != null) {
+                sound &= switch (parameter.kind()) {
+                    case NUMBER -> kept(numbers.quantity(node, quantity(parameter), inner), parameter, numbersGiven);
+                    case LOT -> kept(names.number(node, "lots", inner), parameter, numbersGiven);
+                    case FILE -> kept(names.text(node, "the path of a file", inner), parameter, wordsGiven);
+                    case CHOICE ->
+                        kept(names.choice(node, parameter.wording().choices(), inner), parameter, wordsGiven);
+                };
             }
         }
-        return sound
-                ? Optional.of(new PluginChoice(provider.name(), ParameterValues.of(provider, given)))
-                : Optional.empty();
+        ParameterValues values = ParameterValues.of(provider, numbersGiven, wordsGiven);
+        return sound ? Optional.of(new PluginChoice(provider.name(), values)) : Optional.empty();
+    }
+
+    private static ValueType.Quantity quantity(Parameter parameter) {
+        return new ValueType.Quantity(parameter.dimension(), Range.closed(parameter.minimum(), parameter.maximum()));
+    }
+
+    private static <T> boolean kept(Optional<T> value, Parameter parameter, Map<String, T> given) {
+        value.ifPresent(read -> given.put(parameter.name(), read));
+        return value.isPresent();
     }
 
     private boolean noOthers(Node.Table table, Provider provider, String nameKey, String path) {

@@ -23,7 +23,7 @@ final class ValueReader {
         this.findings = findings;
         this.numbers = new NumberReader(findings);
         this.names = new NameReader(root, numbers, findings);
-        this.plugins = new PluginReader(lookup, numbers, findings);
+        this.plugins = new PluginReader(lookup, numbers, names, findings);
     }
 
     Optional<?> read(Node node, ValueType type, String path) {

@@ -15,8 +15,8 @@ import reedling.structure.StructureEnergy;
 import reedling.wall.WallPose;
 
 /**
- * Balance of energy: what grains and structures hold, what contacts and damping took, what walls, supports and feeds
- * brought. Work is booked every step as 1/2 (old + new force) . displacement, which kick-drift-kick closes exactly, so
+ * Balance of energy: what grains and structures hold, what contacts and damping took, what walls, supports, fields
+ * without potential and feeds brought. Work is booked every step as 1/2 (old + new force) . displacement, which kick-drift-kick closes exactly, so
  * what is left over measures the discretisation: it falls by four when the steps per contact double.
  *
  * <p>Threads: one thread, between phases; sums run in chunk order.
@@ -24,7 +24,7 @@ import reedling.wall.WallPose;
 public final class EnergyLedger implements Persistent {
 
     private static final int LOAD = 6; // force 3, torque 3
-    private static final int NUMBERS = 12; // saved beside the loads
+    private static final int NUMBERS = 14; // saved beside the loads
 
     /**
      * What the bodies held at the last report, J.
@@ -39,6 +39,8 @@ public final class EnergyLedger implements Persistent {
     private final double[] oldLoads;
     private double contactWork;
     private double wallWork;
+    private double fieldWork;
+    private double openedWork;
     private double brought;
     private double taken;
     private double start;
@@ -83,6 +85,19 @@ public final class EnergyLedger implements Persistent {
         System.arraycopy(loads, 0, oldLoads, 0, oldLoads.length);
     }
 
+    /**
+     * Books the work of fields without potential: that of the kicks that opened the past step and closed it. Call after a
+     * move, before the report; needless where no field is of that kind.
+     */
+    public void fields(List<MoveTally> moves) {
+        fieldWork += openedWork;
+        openedWork = 0;
+        for (int k = 0; k < moves.size(); k++) {
+            fieldWork += moves.get(k).closingWork();
+            openedWork += moves.get(k).openingWork();
+        }
+    }
+
     /** Books energy that a feed brought, J. */
     public void brought(double energy) {
         brought += energy;
@@ -112,14 +127,14 @@ public final class EnergyLedger implements Persistent {
         StructureEnergy energy = structure.energy(strainEnergy);
         double held = kinetic + interactions.potentialEnergy() + stored + energy.balance();
         // the work against friction and rolling resistance holds what their springs store
-        double balance = held + contactWork - wallWork - brought + taken;
+        double balance = held + contactWork - wallWork - fieldWork - brought + taken;
         if (!started) {
             started = true;
             start = balance;
         }
         residual = balance - start;
         dissipated = contactWork - springs + energy.strainDissipation() + energy.modalDissipation();
-        throughput = dissipated + kinetic + energy.kinetic() + stored + springs + energy.strain();
+        throughput = dissipated + Math.abs(fieldWork) + kinetic + energy.kinetic() + stored + springs + energy.strain();
         holdings = new Holdings(
                 kinetic + energy.kinetic(),
                 interactions.potentialEnergy() + energy.gravity(),
@@ -145,6 +160,11 @@ public final class EnergyLedger implements Persistent {
     /** Work that moving walls did on the grains so far, J. */
     public double wallWork() {
         return wallWork;
+    }
+
+    /** Work that fields without potential did on the grains so far, J; what drag took counts negative. */
+    public double fieldWork() {
+        return fieldWork;
     }
 
     /** Energy that went through the system so far, J. */
@@ -176,7 +196,9 @@ public final class EnergyLedger implements Persistent {
             holdings.kinetic,
             holdings.potential,
             holdings.contacts,
-            holdings.strain
+            holdings.strain,
+            fieldWork,
+            openedWork
         };
         out.writeBoolean(started);
         out.writeDoubles(numbers, 0, numbers.length);
@@ -197,6 +219,8 @@ public final class EnergyLedger implements Persistent {
         throughput = saved[6];
         dissipated = saved[7];
         holdings = new Holdings(saved[8], saved[9], saved[10], saved[11]);
+        fieldWork = saved[12];
+        openedWork = saved[13];
         in.readDoubles(oldLoads, 0, oldLoads.length);
     }
 }

@@ -48,14 +48,19 @@ final class PluginsCommand implements Runnable {
         out.printf("          Source: %s%n", plugin.source());
         out.printf("          Jar: %s%n", plugin.jar());
         for (Parameter parameter : plugin.parameters()) {
-            out.printf(
-                    "          %s (%s, %s .. %s, %s): %s%n",
-                    parameter.name(),
-                    parameter.dimension().siUnit(),
-                    parameter.minimum(),
-                    parameter.maximum(),
-                    parameter.obligatory() ? "no default" : "default " + parameter.defaultValue(),
-                    parameter.meaning());
+            out.printf("          %s (%s): %s%n", parameter.name(), accepted(parameter), parameter.meaning());
         }
+    }
+
+    private static String accepted(Parameter parameter) {
+        String fallback = parameter.wording().fallback();
+        return switch (parameter.kind()) {
+            case NUMBER ->
+                parameter.dimension().siUnit() + ", " + parameter.minimum() + " .. " + parameter.maximum() + ", "
+                        + (parameter.obligatory() ? "no default" : "default " + parameter.defaultValue());
+            case CHOICE -> String.join(" | ", parameter.wording().choices()) + ", default " + fallback;
+            case FILE -> "path of a file, optional";
+            case LOT -> "name of a lot, default all";
+        };
     }
 }

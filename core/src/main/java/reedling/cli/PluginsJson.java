@@ -2,6 +2,7 @@
 package reedling.cli;
 
 import java.util.List;
+import java.util.Locale;
 import java.util.stream.Collectors;
 import reedling.plugin.Parameter;
 import reedling.plugin.PluginDescription;
@@ -25,6 +26,20 @@ final class PluginsJson {
     }
 
     private static String parameter(Parameter parameter) {
+        return parameter.kind() == Parameter.Kind.NUMBER ? number(parameter) : word(parameter);
+    }
+
+    private static String word(Parameter parameter) {
+        String choices = parameter.wording().choices().stream()
+                .map(PluginsJson::quoted)
+                .collect(Collectors.joining(", ", "[", "]"));
+        String kind = parameter.kind().name().toLowerCase(Locale.ROOT);
+        return "{" + member("name", parameter.name()) + ", " + member("kind", kind) + ", \"choices\": " + choices + ", "
+                + member("default", parameter.wording().fallback()) + ", " + member("meaning", parameter.meaning())
+                + "}";
+    }
+
+    private static String number(Parameter parameter) {
         return "{" + member("name", parameter.name()) + ", "
                 + member("unit", parameter.dimension().siUnit()) + ", \"minimum\": "
                 + number(parameter.minimum()) + ", \"maximum\": " + number(parameter.maximum()) + ", \"default\": "

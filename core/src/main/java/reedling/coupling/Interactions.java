@@ -27,6 +27,7 @@ public final class Interactions {
     private final GrainStore grains;
     private final Structure structure;
     private final List<Field> fields;
+    private final MotionForces motionForces;
     private final NeighbourLists lists;
     private final CandidateWatch candidates;
     private final PairForces pairs;
@@ -71,6 +72,7 @@ public final class Interactions {
         this.grains = grains;
         this.structure = structure;
         this.fields = List.copyOf(fields);
+        motionForces = new MotionForces(fields, grains);
         lists = new NeighbourLists(materials.materials().size(), laws.signedColumns());
         candidates = new CandidateWatch(laws);
         pairs = new PairForces(laws, materials.pairs().size());
@@ -144,6 +146,7 @@ public final class Interactions {
             moves.add(new MoveTally());
         }
         wires.layOut(chunkCount(), workers);
+        motionForces.makeRoom(workers);
         while (workspaces.size() < workers) {
             workspaces.add(new Workspace());
         }
@@ -255,6 +258,10 @@ public final class Interactions {
             GrainMotion.turn(chunk, grains, turning);
         }
         GrainMotion.importForces(chunk, grains);
+        if (!motionForces.none()) {
+            motionForces.apply(worker, chunk.from(), chunk.to(), time, 0.5 * coarseStep.pastStep());
+            motionForces.book(worker, near.near(), 0.5 * pastFine, 0.5 * nextCoarse, tally);
+        }
         GrainMotion.move(chunk, grains, 0.5 * coarseStep.pastStep(), nextCoarse, energyDue, near.near(), tally);
         NearMotion.first(near, grains, 0.5 * pastFine, nextCoarse, nextFine, energyDue, tally);
     }
@@ -277,6 +284,16 @@ public final class Interactions {
         } else {
             NearMotion.further(wires.chunk(task), grains, 0.5 * pastFine, nextFine, moves.get(task));
         }
+    }
+
+    /** Whether any field has a part without potential, whose work must be booked. */
+    public boolean hasMotionForces() {
+        return !motionForces.none();
+    }
+
+    /** Squared frequency, 1/s2, that bounds the step as the motion forces on the grains as they are now demand. */
+    public double motionFrequencySquared(double now) {
+        return motionForces.frequencySquared(now);
     }
 
     /** Potential energy of the grains in all fields at the last force phase, J; 0 unless energies were wanted. */

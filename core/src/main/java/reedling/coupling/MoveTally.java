@@ -13,9 +13,13 @@ public final class MoveTally {
     private double largestSpeedSquared;
     private double largestFrequencySquared;
     private double check;
+    private double closingWork;
+    private double openingWork;
 
     void clear() {
         kinetic = 0;
+        closingWork = 0;
+        openingWork = 0;
         largestSpeedSquared = 0;
         largestFrequencySquared = 0;
         check = 0;
@@ -23,6 +27,14 @@ public final class MoveTally {
 
     void kinetic(double energy) {
         kinetic += energy;
+    }
+
+    void closingWork(double energy) {
+        closingWork += energy;
+    }
+
+    void openingWork(double energy) {
+        openingWork += energy;
     }
 
     void speedSquared(double value) {
@@ -37,6 +49,16 @@ public final class MoveTally {
     /** Kinetic energy at the end of the past step, J. */
     public double kinetic() {
         return kinetic;
+    }
+
+    /** Work of motion forces in the kicks that closed the past step, J. */
+    public double closingWork() {
+        return closingWork;
+    }
+
+    /** Work of motion forces in the kicks that opened the next step, J. */
+    public double openingWork() {
+        return openingWork;
     }
 
     /** Largest squared speed after the opening kick, m2/s2. */

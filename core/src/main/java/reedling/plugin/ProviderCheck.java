@@ -87,6 +87,12 @@ final class ProviderCheck {
                     "default of " + what + " " + parameter.name(),
                     value + " " + parameter.dimension().siUnit(),
                     parameter.minimum() + " .. " + parameter.maximum() + " in SI");
+            Parameter.Wording wording = parameter.wording();
+            sound &= require(
+                    wording.kind() != Parameter.Kind.CHOICE || wording.choices().contains(wording.fallback()),
+                    "default of " + what + " " + parameter.name(),
+                    quoted(wording.fallback()),
+                    "one of " + String.join(", ", wording.choices()));
         }
         return sound;
     }

@@ -41,6 +41,7 @@ final class RunTables implements AutoCloseable {
             new Column("strain energy", "J"),
             new Column("dissipated", "J"),
             new Column("work of walls", "J"),
+            new Column("work of fields without potential", "J"),
             new Column("throughput", "J"),
             new Column("residual", "J"),
             new Column("relative residual", ""));
@@ -217,6 +218,7 @@ final class RunTables implements AutoCloseable {
             held.strain(),
             ledger.dissipated(),
             ledger.wallWork(),
+            ledger.fieldWork(),
             ledger.throughput(),
             ledger.residual(),
             ledger.relativeResidual()

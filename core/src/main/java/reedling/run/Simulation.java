@@ -94,6 +94,7 @@ public final class Simulation {
         traffic.release(0, 0);
         search(new boolean[0]);
         largestSpeed = fastest();
+        moveFrequencySquared = interactions.motionFrequencySquared(0);
     }
 
     /** Largest speed of any grain, wall or node as they are now, m/s. */
@@ -123,6 +124,9 @@ public final class Simulation {
         // move; the supports stand at the end of the first fine step
         model.structure().poseSupports(fineSteps == 1 ? time + next : time + fine, fine);
         interactions.move(turnTime(), past, next, fine, team);
+        if (interactions.hasMotionForces()) {
+            ledger.fields(interactions.moves());
+        }
         if (report) {
             ledger.report(interactions, model.structure(), strain);
         }
@@ -259,6 +263,7 @@ public final class Simulation {
         boolean released = traffic.releaseDue(time) && traffic.release(time, pastStep) > 0;
         if (released) {
             largestSpeed = Math.max(largestSpeed, fastest()); // new grains may be the fastest
+            moveFrequencySquared = Math.max(moveFrequencySquared, interactions.motionFrequencySquared(time));
         }
         boolean used = 2 * (travel + largestSpeed * control.longestNext())
                 > model.steps().margin();

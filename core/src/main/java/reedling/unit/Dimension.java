@@ -33,7 +33,11 @@ public enum Dimension {
     DAMPING("N s/m", "a damping coefficient"),
     LINE_DENSITY("kg/m", "a mass per length"),
     AREA_DENSITY("kg/m2", "a mass per area"),
-    POWER("W", "a power");
+    POWER("W", "a power"),
+    ELECTRIC_FIELD("V/m", "an electric field"),
+    MAGNETIC_FIELD("T", "a magnetic flux density"),
+    CHARGE_PER_MASS("C/kg", "a charge per mass"),
+    SHEAR_RATE("1/s", "a velocity per length");
 
     private final String siUnit;
     private final String phrase;

@@ -23,6 +23,16 @@ class PluginsJsonTest {
     }
 
     @Test
+    void wordsAreListedWithTheirChoices() {
+        Parameter mood = Parameter.choice("mood", List.of("mild", "gusty"), "mild", "How it blows.");
+        PluginDescription plugin =
+                new PluginDescription("breeze", "field", "/p/a.jar", "1", "Blows.", "none", List.of(mood));
+        assertThat(PluginsJson.of(List.of(plugin))).endsWith("""
+                "parameters": [{"name": "mood", "kind": "choice", "choices": ["mild", "gusty"], "default": "mild", \
+                "meaning": "How it blows."}]}]""");
+    }
+
+    @Test
     void quotesBackslashesAndControlCharactersAreEscaped() {
         PluginDescription plugin = new PluginDescription("a", "field", "C:\\a", "1", "say \"x\"\n", "s", List.of());
         assertThat(PluginsJson.of(List.of(plugin))).contains("C:\\\\a", "say \\\"x\\\"\\u000a");
