@@ -106,6 +106,11 @@ public final class Rig {
         return this;
     }
 
+    public Rig field(Field field) {
+        fields.add(field);
+        return this;
+    }
+
     public Rig structure(Structure made, int... bodyMaterials) {
         structure = made;
         materialOfBody = bodyMaterials;
