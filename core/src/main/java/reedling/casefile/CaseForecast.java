@@ -8,6 +8,7 @@ import java.util.OptionalDouble;
 import java.util.OptionalLong;
 import reedling.contact.ContactKind;
 import reedling.error.ReedlingException;
+import reedling.material.MaterialTable;
 import reedling.parallel.WorkerTeam;
 import reedling.structure.Position;
 import reedling.time.RayleighStep;
@@ -112,9 +113,10 @@ public final class CaseForecast {
 
     /** Shortest Rayleigh time of any grain, s; infinite without grains. */
     private double surfaceWave() {
+        MaterialTable table = assembly.model().materials();
         return specification.lots().values().stream()
                 .mapToDouble(lot -> RayleighStep.of(
-                        specification.materials().get(lot.material()),
+                        table.materials().get(table.indexOf(lot.material())),
                         0.5 * lot.diameter().smallest()))
                 .min()
                 .orElse(Double.POSITIVE_INFINITY);
