@@ -32,7 +32,7 @@ class CheckCommandTest {
         assertThat(text)
                 .contains("15 wires, 900 elements, 915 nodes", "15 of 300 mm, gap 5.4 mm")
                 .contains("acceleration 4.03 g, throw index 2.86", "mid-span 107 N/m", "sqrt(EI/T) = 2.43 mm")
-                .contains("600 g in 5 s", "120 g/s")
+                .contains("600 g in 5 s", "120 g/s", "around half of a grain (Rayleigh)")
                 .contains("is within 5 % of harmonic 4 of the drive, 80 Hz")
                 .contains("wall-clock time", "5 cautions.");
         assertThat(program.out().lines()).allSatisfy(line -> assertThat(line).hasSizeLessThanOrEqualTo(80));

@@ -84,7 +84,8 @@ public record CaseAssembly(
                 steps.maximum().orElse(LONGEST_STEP),
                 motions.shortestPeriod(),
                 steps.searchMargin().length(smallest),
-                REPORT_EVERY);
+                REPORT_EVERY,
+                steps.midpoint());
     }
 
     /**

@@ -8,8 +8,10 @@ import java.util.OptionalDouble;
 import java.util.OptionalLong;
 import reedling.contact.ContactKind;
 import reedling.error.ReedlingException;
+import reedling.material.MaterialTable;
 import reedling.parallel.WorkerTeam;
 import reedling.structure.Position;
+import reedling.time.RayleighStep;
 import reedling.unit.Dimension;
 
 /** What follows from the numbers of a case, in plain words, before anyone waits for a run. Threads: one. */
@@ -90,6 +92,10 @@ public final class CaseForecast {
                     "contact",
                     time(contact) + ": 1/" + parts + " of an impact at " + ForecastText.figure(speed, Dimension.SPEED));
         }
+        double wave = surfaceWave();
+        if (wave < Double.POSITIVE_INFINITY) {
+            text.entry("surface wave", time(wave) + " around half of a grain (Rayleigh); for comparison only");
+        }
         if (stable < Double.POSITIVE_INFINITY) {
             double fine = Math.min(stable, onWire);
             text.entry(
@@ -103,6 +109,17 @@ public final class CaseForecast {
                 "memory",
                 "about " + ForecastText.number((BASE_MEMORY + GRAIN_MEMORY * feeds.total()) / 1e6) + " MB at most");
         wallTime(step, feeds, threads);
+    }
+
+    /** Shortest Rayleigh time of any grain, s; infinite without grains. */
+    private double surfaceWave() {
+        MaterialTable table = assembly.model().materials();
+        return specification.lots().values().stream()
+                .mapToDouble(lot -> RayleighStep.of(
+                        table.materials().get(table.indexOf(lot.material())),
+                        0.5 * lot.diameter().smallest()))
+                .min()
+                .orElse(Double.POSITIVE_INFINITY);
     }
 
     private void wallTime(double shortest, FeedFigures feeds, int threads) {

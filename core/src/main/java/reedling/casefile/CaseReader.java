@@ -31,6 +31,7 @@ final class CaseReader {
             FeedChecks.run(draft, rules);
             WireChecks.run(draft, rules);
             OutputChecks.run(draft, rules);
+            StepChecks.run(draft, rules);
         }
         if (!findings.none()) {
             throw new ReedlingException(ExitCode.CASE, findings.errors());

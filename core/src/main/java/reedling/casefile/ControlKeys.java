@@ -3,12 +3,17 @@ package reedling.casefile;
 
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
+import reedling.run.MidpointRule;
 import reedling.unit.Dimension;
 
 /** Keys of the case itself, its laws, steps, output and report. */
 final class ControlKeys {
 
     private static final ValueType INTERVAL = Key.quantity(Dimension.TIME, Range.above(0, 1e7));
+
+    static final String EXPLICIT = "explicit";
+    static final String MIDPOINT = "midpoint";
 
     static final Section CASE = Section.of(
             "What the case is.",
@@ -44,7 +49,23 @@ final class ControlKeys {
                     "search_margin",
                     new ValueType.Margin(Range.above(0, 2), Range.above(0, 0.1)),
                     new SearchMargin(0.3, true),
-                    "How far beyond touch the neighbour search looks: fraction of the smallest radius, or a length."));
+                    "How far beyond touch the neighbour search looks: fraction of the smallest radius, or a length."),
+            Key.preset(
+                    "integrator",
+                    new ValueType.Choice(List.of(EXPLICIT, MIDPOINT)),
+                    EXPLICIT,
+                    "How grains are moved: explicit steps of second order, or the midpoint rule, a reference mode for"
+                            + " grains and walls that takes several times as long."),
+            Key.optional(
+                    "theta",
+                    Key.quantity(Dimension.NUMBER, Range.closed(0.5, 1)),
+                    "Of the midpoint rule: where in the step forces are taken; 0.5 unless given, second order only"
+                            + " there."),
+            Key.optional(
+                    "tolerance",
+                    Key.quantity(Dimension.NUMBER, Range.closed(1e-13, 1e-2)),
+                    "Of the midpoint rule: change of a velocity in the last iteration, as a fraction of the largest"
+                            + " speed; 1e-8 unless given."));
 
     static final Section OUTPUT = Section.of(
             "What a run writes and when. Intervals are counted in simulated time unless said; absent means never.",
@@ -77,7 +98,16 @@ final class ControlKeys {
         return new StepSpecification(
                 (int) values.whole("steps_per_contact"),
                 values.optionalNumber("maximum"),
-                values.margin("search_margin"));
+                values.margin("search_margin"),
+                midpoint(values));
+    }
+
+    private static Optional<MidpointRule> midpoint(Values values) {
+        return values.text("integrator").equals(MIDPOINT)
+                ? Optional.of(new MidpointRule(
+                        values.optionalNumber("theta").orElse(MidpointRule.MIDDLE),
+                        values.optionalNumber("tolerance").orElse(MidpointRule.TOLERANCE)))
+                : Optional.empty();
     }
 
     static OutputSpecification output(Values values) {

@@ -9,6 +9,9 @@ import java.util.TreeMap;
 import reedling.contact.ContactLaw;
 import reedling.contact.LawSet;
 import reedling.contact.Stage;
+import reedling.error.ExitCode;
+import reedling.error.Finding;
+import reedling.error.ReedlingException;
 import reedling.field.Field;
 import reedling.material.MaterialTable;
 import reedling.structure.Position;
@@ -30,8 +33,12 @@ record LawParts(Map<Stage, ContactLaw> byStage, List<Field> fields, Map<String, 
             String path = "fields." + name;
             faults.make(
                             path,
-                            () -> plugins.field(choice.name(), reading.where(path))
-                                    .create(choice.parameters()))
+                            () -> fieldThatSuits(
+                                    plugins.field(choice.name(), reading.where(path))
+                                            .create(choice.parameters()),
+                                    choice.name(),
+                                    path,
+                                    reading))
                     .ifPresent(parts.fields::add);
             parts.plugins.put(choice.name(), 0);
         });
@@ -40,6 +47,23 @@ record LawParts(Map<Stage, ContactLaw> byStage, List<Field> fields, Map<String, 
                 .values()
                 .forEach(wire -> parts.plugins.put(wire.element().name(), 0));
         return parts;
+    }
+
+    /** Refuses a field that the integrator of the case cannot take. */
+    private static Field fieldThatSuits(Field field, String law, String path, CaseReading reading) {
+        boolean explicit = reading.specification().steps().midpoint().isEmpty();
+        if (explicit || field.motionForce().isEmpty()) {
+            return field;
+        }
+        throw new ReedlingException(
+                ExitCode.CASE,
+                List.of(new Finding(
+                        reading.where(path),
+                        "law",
+                        law + ", a force that depends on velocity",
+                        "a field with a potential, such as gravity",
+                        "The midpoint rule iterates over contacts and positions only. Leave the field out of a reference"
+                                + " run, or take explicit steps.")));
     }
 
     private void law(Stage stage, PluginChoice choice, CaseReading reading, CasePlugins available, PartFaults faults) {

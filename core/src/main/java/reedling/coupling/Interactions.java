@@ -84,6 +84,15 @@ public final class Interactions {
         time = startTime;
     }
 
+    /** Phases of steps by the midpoint rule, for runs in which nothing bends. */
+    public MidpointPasses midpointPasses(double stepsPerContact) {
+        return new MidpointPasses(this, grains, stepsPerContact);
+    }
+
+    GrainStore grains() {
+        return grains;
+    }
+
     public NeighbourLists lists() {
         return lists;
     }
@@ -187,23 +196,37 @@ public final class Interactions {
             structure.elementForces(task - chunkCount(), pastFine);
             return;
         }
-        Chunk chunk = lists.chunks().get(task);
         ContactTally tally = coarse.get(task);
         tally.clear();
+        contactForces(task, worker, coarseStep, tally);
+        fieldForces(task, time);
+        potentials[task] = energyDue ? potential(lists.chunks().get(task)) : 0;
+        wireForces(task, worker);
+    }
+
+    /** Forces of grains on grains and of walls on grains, for one chunk. */
+    void contactForces(int task, int worker, StepContext step, ContactTally tally) {
+        Chunk chunk = lists.chunks().get(task);
         Workspace workspace = workspaces.get(worker);
-        candidates.look(
-                chunk, grains, lists.layout(), coarseStep.travel(), coarseStep.reach(), coarseStep.approach(), tally);
-        pairs.apply(chunk, grains, coarseStep, workspace.rows(), tally);
-        walls.apply(task, grains, coarseStep, workspace, tally);
+        candidates.look(chunk, grains, lists.layout(), step.travel(), step.reach(), step.approach(), tally);
+        pairs.apply(chunk, grains, step, workspace.rows(), tally);
+        walls.apply(task, grains, step, workspace, tally);
+    }
+
+    /** Forces of all fields at a time (s), for one chunk. */
+    void fieldForces(int task, double now) {
+        Chunk chunk = lists.chunks().get(task);
+        for (int k = 0; k < fields.size(); k++) {
+            fields.get(k).apply(grains, chunk.from(), chunk.to(), now);
+        }
+    }
+
+    private double potential(Chunk chunk) {
         double potential = 0;
         for (int k = 0; k < fields.size(); k++) {
-            fields.get(k).apply(grains, chunk.from(), chunk.to(), time);
-            if (energyDue) {
-                potential += fields.get(k).potentialEnergy(grains, chunk.from(), chunk.to());
-            }
+            potential += fields.get(k).potentialEnergy(grains, chunk.from(), chunk.to());
         }
-        potentials[task] = potential;
-        wireForces(task, worker);
+        return potential;
     }
 
     private void wireForces(int task, int worker) {

@@ -61,7 +61,7 @@ final class GrainTraffic {
     /**
      * Lets the feeds release what is due.
      *
-     * @param past the past step, s, whose closing half kick new grains will get too
+     * @param past the past step, s, whose closing half kick new grains will get too; 0 if none is to come
      * @return grains added
      */
     int release(double time, double past) {
@@ -85,7 +85,7 @@ final class GrainTraffic {
         grains.velocity(g, seeds.velocityX(k), seeds.velocityY(k), seeds.velocityZ(k));
         passage.fed(lot, grains.mass(g));
         watch.fed(lot, grains.mass(g), time);
-        if (past > 0) {
+        if (time > 0) {
             ledger.brought(energy(g, past));
         }
     }

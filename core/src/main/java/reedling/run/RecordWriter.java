@@ -46,6 +46,7 @@ final class RecordWriter {
                 .set("state_digest", StateDigest.of(simulation))
                 .set("ledger_residual", simulation.ledger().relativeResidual())
                 .set("ledger", ledger(result.trust()))
+                .set("integrator", integrator())
                 .set("wall_s", clock.elapsed())
                 .set("grain_steps_per_s", clock.grainStepsPerSecond(simulation))
                 .set("phases_s", phases())
@@ -77,6 +78,22 @@ final class RecordWriter {
         map.put("dissipated_J", simulation.ledger().dissipated());
         map.put("expected_relative", trust.expected());
         map.put("verdict", trust.verdict());
+        return map;
+    }
+
+    private Map<String, Object> integrator() {
+        Map<String, Object> map = new LinkedHashMap<>();
+        map.put("name", simulation.midpoint().isPresent() ? "midpoint" : "explicit");
+        simulation.model().steps().midpoint().ifPresent(rule -> {
+            map.put("theta", rule.theta());
+            map.put("tolerance", rule.tolerance());
+        });
+        simulation.midpoint().ifPresent(tally -> {
+            map.put("iterations_mean", tally.meanIterations());
+            map.put("iterations_most", tally.mostIterations());
+            map.put("halvings", tally.halvings());
+            map.put("force_passes_per_step", tally.meanPasses());
+        });
         return map;
     }
 

@@ -4,6 +4,7 @@ package reedling.run;
 import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import reedling.check.EnergyLedger;
 import reedling.check.StateGuard;
 import reedling.checkpoint.Persistent;
@@ -40,8 +41,9 @@ public final class Simulation {
     private final Model model;
     private final WorkerTeam team;
     private final Interactions interactions;
-    private final StepSurvey survey;
     private final StepControl control;
+    private final Stepper stepper;
+    private final StepSurvey survey;
     private final EnergyLedger ledger;
     private final Passage passage;
     private final GrainTraffic traffic;
@@ -73,11 +75,19 @@ public final class Simulation {
                 model.materials(),
                 model.steps().stepsPerContact(),
                 0);
-        survey = new StepSurvey(model, interactions);
         control = new StepControl(model.steps().stepsPerContact(), model.steps().maximum());
         ledger = new EnergyLedger(model.walls().size());
+        stepper = stepper();
+        survey = new StepSurvey(model, interactions, stepper.stableShare());
         passage = new Passage(model.lots().size(), model.exits().outlets().size() + 1);
         traffic = new GrainTraffic(model, interactions, passage, ledger);
+    }
+
+    private Stepper stepper() {
+        return model.steps()
+                .midpoint()
+                .<Stepper>map(rule -> MidpointStepper.of(rule, model, interactions, control, ledger, team))
+                .orElseGet(() -> new KickDriftKick(interactions, control, team));
     }
 
     /**
@@ -109,21 +119,22 @@ public final class Simulation {
     /** One step. */
     public void step() {
         boolean report = step % model.steps().reportEvery() == 0;
-        PastStep past = new PastStep(pastStep, pastFine);
+        PastStep past = new PastStep(stepper.unclosed(pastStep), stepper.unclosed(pastFine));
+        StepStart start = new StepStart(step, time, past, travel, largestSpeed, report);
 
         // force
-        interactions.force(time, past, control.longestNext(), travel, largestSpeed, report, team);
+        stepper.look(start);
         bookContacts(true);
         double strain = report ? model.structure().strainEnergy() : 0;
-        ledger.walls(interactions.walls().sumLoads(), interactions.facets(), pastStep);
+        ledger.walls(interactions.walls().sumLoads(), interactions.facets(), past.coarse());
 
         // choose the step
-        double next = chooseStep();
-        double fine = next / fineSteps;
+        double chosen = chooseStep();
+        double fine = chosen / fineSteps;
 
         // move; the supports stand at the end of the first fine step
-        model.structure().poseSupports(fineSteps == 1 ? time + next : time + fine, fine);
-        interactions.move(turnTime(), past, next, fine, team);
+        model.structure().poseSupports(fineSteps == 1 ? time + chosen : time + fine, fine);
+        double next = stepper.move(start, turnTime(), chosen, fine);
         if (interactions.hasMotionForces()) {
             ledger.fields(interactions.moves());
         }
@@ -228,13 +239,14 @@ public final class Simulation {
                 model.structure().nodes(),
                 step,
                 time);
+        double begun = time;
         time += next;
         step++;
         grainSteps += model.grains().count();
         pastStep = next;
         pastFine = fine;
         for (WallPose pose : interactions.facets().walls()) {
-            pose.advance(time, next);
+            pose.restore(begun, time, next);
         }
         double speedSquared = 0;
         moveFrequencySquared = 0;
@@ -260,7 +272,7 @@ public final class Simulation {
     }
 
     private void searchIfDue() {
-        boolean released = traffic.releaseDue(time) && traffic.release(time, pastStep) > 0;
+        boolean released = traffic.releaseDue(time) && traffic.release(time, stepper.unclosed(pastStep)) > 0;
         if (released) {
             largestSpeed = Math.max(largestSpeed, fastest()); // new grains may be the fastest
             moveFrequencySquared = Math.max(moveFrequencySquared, interactions.motionFrequencySquared(time));
@@ -268,7 +280,7 @@ public final class Simulation {
         boolean used = 2 * (travel + largestSpeed * control.longestNext())
                 > model.steps().margin();
         if (released || used) {
-            search(traffic.leaving(time, pastStep));
+            search(traffic.leaving(time, stepper.unclosed(pastStep)));
         }
     }
 
@@ -301,6 +313,11 @@ public final class Simulation {
 
     public StepControl control() {
         return control;
+    }
+
+    /** What the midpoint rule took to settle; empty for explicit steps. */
+    public Optional<MidpointTally> midpoint() {
+        return stepper.midpoint();
     }
 
     /** Time of the present positions, s. */
@@ -357,6 +374,7 @@ public final class Simulation {
         for (Model.FeedLine line : model.feeds()) {
             owners.add(new FeedSection(line.feed()));
         }
+        owners.addAll(stepper.persistents());
         owners.add(new StepClock());
         return owners;
     }

@@ -16,9 +16,6 @@ final class StepSurvey {
     /** A fine step may take so much of the stability limit of contacts with structure nodes. */
     private static final double FINE_STABLE = 0.4;
 
-    /** A coarse step may take so much of the stability limit of lasting contacts. */
-    private static final double COARSE_STABLE = 0.8;
-
     /**
      * A contact with a wire takes so many times fewer coarse steps than a contact between grains: its own force is found
      * on the fine step, but what else pushes the grain reaches it once a coarse step.
@@ -33,10 +30,15 @@ final class StepSurvey {
 
     private final Model model;
     private final Interactions interactions;
+    private final double stableShare;
 
-    StepSurvey(Model model, Interactions interactions) {
+    /**
+     * @param stableShare part of the stability limit of lasting contacts that a coarse step may take
+     */
+    StepSurvey(Model model, Interactions interactions, double stableShare) {
         this.model = model;
         this.interactions = interactions;
+        this.stableShare = stableShare;
     }
 
     /**
@@ -77,7 +79,7 @@ final class StepSurvey {
 
     private double persistent(double frequencySquared) {
         double xi = 2 * model.laws().largestDampingRatio(); // densest packing: its mode has twice a pair's frequency
-        return COARSE_STABLE * 2 / Math.sqrt(frequencySquared) * (Math.sqrt(1 + xi * xi) - xi);
+        return stableShare * 2 / Math.sqrt(frequencySquared) * (Math.sqrt(1 + xi * xi) - xi);
     }
 
     /**

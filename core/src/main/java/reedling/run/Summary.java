@@ -140,12 +140,21 @@ final class Summary {
                     steps.meanFineSteps()));
             text.line("Bounded by " + bounds(steps) + ".");
         }
+        simulation.midpoint().ifPresent(this::midpoint);
         figures.ifPresent(f -> text.line("Drift of recovery: "
                 + (f.recovery().tooShort()
                         ? "run too short to tell"
                         : f.recovery().drifts() ? "yes, the start is not over" : "none seen")
                 + "."));
         plan.identity().cautions().forEach(text::line);
+    }
+
+    private void midpoint(MidpointTally tally) {
+        MidpointRule rule = simulation.model().steps().midpoint().orElseThrow();
+        text.line(format(
+                "Midpoint rule (theta %.3g, tolerance %.2g): %.3g iterations a step, %d at most;",
+                rule.theta(), rule.tolerance(), tally.meanIterations(), tally.mostIterations()));
+        text.line(format("%d halvings, %.3g force passes a step (explicit: 1).", tally.halvings(), tally.meanPasses()));
     }
 
     private void percentiles(String what, LogHistogram overlap) {

@@ -70,6 +70,13 @@ public final class StepControl implements Persistent {
         return step;
     }
 
+    /** Halves the step chosen last, which turned out too long. */
+    public void halve() {
+        step *= 0.5;
+        rung *= 0.5; // four rungs down, exactly
+        permitting = 0;
+    }
+
     /** The step chosen last, s; 0 before the first. */
     public double step() {
         return step;

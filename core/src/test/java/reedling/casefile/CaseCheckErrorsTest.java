@@ -302,4 +302,25 @@ class CaseCheckErrorsTest {
                 "deck.toml:44:1 feeds.shower.start: is 2 s, expected less than output.end_time, 2 s. "
                         + "It would never start.");
     }
+
+    @Test
+    void midpointRuleAndWiresExcludeEachOther() {
+        expect(
+                "[steps]\n",
+                "[steps]\nintegrator = \"midpoint\"\n",
+                "deck.toml:145:1 steps.integrator: is \"midpoint\" in a case with wires.deck, expected \"explicit\". The"
+                        + " midpoint rule iterates over grains and walls only; wires take explicit fine steps of their"
+                        + " own. Leave the wires out of a reference run.");
+    }
+
+    @Test
+    void keysOfTheMidpointRuleNeedIt() {
+        expect(
+                "[steps]\n",
+                "[steps]\ntheta = 0.5\ntolerance = 1e-9\n",
+                "deck.toml:145:1 steps.theta: is given for the explicit integrator, expected integrator = \"midpoint\""
+                        + " beside it. Remove it, or choose the midpoint rule.",
+                "deck.toml:146:1 steps.tolerance: is given for the explicit integrator, expected integrator ="
+                        + " \"midpoint\" beside it. Remove it, or choose the midpoint rule.");
+    }
 }

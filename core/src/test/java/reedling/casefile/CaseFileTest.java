@@ -168,7 +168,8 @@ class CaseFileTest {
     void stepsAndLawsMayBeLeftOut() {
         String text = Cases.with("[steps]\nmaximum = \"10 us\"\nsearch_margin = \"0.5 mm\"\n", "");
         assertThat(Cases.read(text).specification().steps())
-                .isEqualTo(new StepSpecification(20, OptionalDouble.empty(), new SearchMargin(0.3, true)));
+                .isEqualTo(new StepSpecification(
+                        20, OptionalDouble.empty(), new SearchMargin(0.3, true), Optional.empty()));
         assertThat(new SearchMargin(0.3, true).length(0.002)).isEqualTo(0.0006);
     }
 

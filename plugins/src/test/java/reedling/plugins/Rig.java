@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import reedling.contact.ContactLaw;
 import reedling.contact.LawSet;
 import reedling.contact.Stage;
@@ -24,6 +25,7 @@ import reedling.plugins.contact.MindlinProvider;
 import reedling.plugins.contact.RollingProvider;
 import reedling.plugins.field.GravityProvider;
 import reedling.run.Exits;
+import reedling.run.MidpointRule;
 import reedling.run.Model;
 import reedling.run.Simulation;
 import reedling.run.StepSettings;
@@ -48,6 +50,7 @@ public final class Rig {
     private double maximumStep = 1e-3;
     private double margin = 1e-3;
     private int reportEvery = 1;
+    private Optional<MidpointRule> midpoint = Optional.empty();
 
     /** Hertz, Mindlin and rolling resistance. */
     public Rig() {
@@ -130,6 +133,12 @@ public final class Rig {
         return this;
     }
 
+    /** Steps by the midpoint rule. */
+    public Rig midpoint(double theta, double tolerance) {
+        midpoint = Optional.of(new MidpointRule(theta, tolerance));
+        return this;
+    }
+
     public Rig reportEvery(int steps) {
         reportEvery = steps;
         return this;
@@ -148,7 +157,8 @@ public final class Rig {
         return grains;
     }
 
-    public Simulation start(WorkerTeam team) {
+    /** The run before it begins, for a checkpoint to be restored into. */
+    public Simulation simulation(WorkerTeam team) {
         MaterialTable table = table();
         Model model = new Model(
                 table,
@@ -161,8 +171,13 @@ public final class Rig {
                 new LawSet(laws, table),
                 feeds,
                 exits,
-                new StepSettings(stepsPerContact, maximumStep, Double.POSITIVE_INFINITY, margin, reportEvery));
-        Simulation simulation = new Simulation(model, team);
+                new StepSettings(
+                        stepsPerContact, maximumStep, Double.POSITIVE_INFINITY, margin, reportEvery, midpoint));
+        return new Simulation(model, team);
+    }
+
+    public Simulation start(WorkerTeam team) {
+        Simulation simulation = simulation(team);
         simulation.begin();
         return simulation;
     }

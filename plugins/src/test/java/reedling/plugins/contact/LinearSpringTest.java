@@ -43,7 +43,7 @@ class LinearSpringTest {
      * @param stiffness N/m
      * @param reported share of the stiffness that the law admits to; 0 leaves the step to the test
      */
-    private record LinearSpring(double stiffness, double reported) implements ContactLaw, ContactKernel {
+    record LinearSpring(double stiffness, double reported) implements ContactLaw, ContactKernel {
 
         @Override
         public ContactKernel bind(MaterialPair pair, ContactKind kind, int historyColumn) {
