@@ -29,13 +29,14 @@ final class PairNormals implements RowStage {
     public void run(RowRange rows) {
         ContactBlock block = rows.block();
         if (Lanes.VECTORISED) {
-            vector(block.columns(), block.rows());
+            vector(block.columns(), block.rows(), block.reach());
         } else {
-            scalar(block.columns(), block.rows());
+            scalar(block.columns(), block.rows(), block.reach());
         }
     }
 
-    private static void vector(double[] c, int rows) {
+    private static void vector(double[] c, int rows, double reach) {
+        DoubleVector beyond = DoubleVector.broadcast(Lanes.SPECIES, -reach);
         DoubleVector zero = DoubleVector.zero(Lanes.SPECIES);
         DoubleVector one = DoubleVector.broadcast(Lanes.SPECIES, 1.0);
         DoubleVector half = DoubleVector.broadcast(Lanes.SPECIES, 0.5);
@@ -54,7 +55,7 @@ final class PairNormals implements RowStage {
             store(dz.mul(inverse), c, Column.NORMAL + 2, r);
             store(inverse, c, INVERSE_DISTANCE, r);
             store(overlap, c, Column.OVERLAP, r);
-            store(zero.blend(one, zero.lt(overlap)), c, Column.TOUCH, r);
+            store(zero.blend(one, beyond.lt(overlap)), c, Column.TOUCH, r);
 
             // 2 levers, effective radius and mass
             DoubleVector inverseRadii = one.div(radii);
@@ -76,7 +77,7 @@ final class PairNormals implements RowStage {
         }
     }
 
-    private static void scalar(double[] c, int rows) {
+    private static void scalar(double[] c, int rows, double reach) {
         for (int r = 0; r < rows; r++) {
             // 1 distance, normal, overlap
             double dx = c[at(Column.NORMAL) + r], dy = c[at(Column.NORMAL + 1) + r], dz = c[at(Column.NORMAL + 2) + r];
@@ -89,7 +90,7 @@ final class PairNormals implements RowStage {
             c[at(Column.NORMAL + 2) + r] = dz * inverse;
             c[at(INVERSE_DISTANCE) + r] = inverse;
             c[at(Column.OVERLAP) + r] = overlap;
-            c[at(Column.TOUCH) + r] = 0.0 < overlap ? 1.0 : 0.0;
+            c[at(Column.TOUCH) + r] = -reach < overlap ? 1.0 : 0.0;
 
             // 2 levers, effective radius and mass
             double inverseRadii = 1.0 / radii;

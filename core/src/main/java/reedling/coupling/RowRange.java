@@ -30,6 +30,7 @@ final class RowRange {
                 source.historyAt(first),
                 source.historyColumns(),
                 step.energyDue());
+        block.reach(source.reach());
     }
 
     ContactBlock block() {
