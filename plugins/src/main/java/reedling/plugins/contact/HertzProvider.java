@@ -1,9 +1,11 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.plugins.contact;
 
+import java.util.Set;
 import reedling.contact.ContactLaw;
 import reedling.contact.ContactLawProvider;
 import reedling.contact.Stage;
+import reedling.contact.Trait;
 import reedling.plugin.ParameterValues;
 
 /** Offers {@link HertzLaw} under the name {@code hertz}. */
@@ -32,6 +34,11 @@ public final class HertzProvider implements ContactLawProvider {
     @Override
     public Stage stage() {
         return Stage.NORMAL;
+    }
+
+    @Override
+    public Set<Trait> brings() {
+        return Set.of(Trait.STIFFNESS, Trait.CONTACT_RADIUS, Trait.HERTZ_CONTACT);
     }
 
     @Override
