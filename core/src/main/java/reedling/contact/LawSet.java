@@ -102,6 +102,13 @@ public final class LawSet {
         return Objects.requireNonNull(start.get(stage));
     }
 
+    /** What the laws have to say against contacts of a material pair at an effective radius, m. */
+    public List<String> cautions(MaterialPair pair, double radius) {
+        return laws.values().stream()
+                .flatMap(law -> law.cautions(pair, radius).stream())
+                .toList();
+    }
+
     /** Kernels for a contact kind and the number of a material pair. */
     public Bound bound(ContactKind kind, int materialPair) {
         return Objects.requireNonNull(bound.get(kind)).get(materialPair);

@@ -2,6 +2,7 @@
 package reedling.plugins.contact;
 
 import java.util.List;
+import java.util.Locale;
 import reedling.contact.ContactKernel;
 import reedling.contact.ContactKind;
 import reedling.contact.ContactLaw;
@@ -43,6 +44,11 @@ final class JkrLaw implements ContactLaw {
     /** Energy of a contact at the fold, over E* q^4 k^5. */
     static final double TEAR_ENERGY = 0.05 * StrictMath.cbrt(0.25) + 0.3;
 
+    /** Tabor number under which attraction acts outside the contact area too, so that this law pulls too little. */
+    private static final double LEAST_TABOR = 5;
+
+    private static final double ATOMS = 4e-10; // m, distance of the surfaces' atoms in contact, z0
+
     private static final double LEAST_WORK = 1e-12; // J/m2: no adhesion that counts, and nothing divides by zero
 
     private final double work;
@@ -63,6 +69,26 @@ final class JkrLaw implements ContactLaw {
     @Override
     public List<HistoryColumn> history() {
         return List.of(HistoryColumn.scalar("joined"), HistoryColumn.scalar("radius_root"));
+    }
+
+    /** Tabor number (R* w^2 / (E*^2 z0^3))^(1/3), z0 = 0.4 nm (Tabor, Surface forces and surface interactions, 1977). */
+    static double tabor(double work, double modulus, double radius) {
+        double ratio = work / modulus;
+        return StrictMath.cbrt(radius * ratio * ratio / (ATOMS * ATOMS * ATOMS));
+    }
+
+    @Override
+    public List<String> cautions(MaterialPair pair, double radius) {
+        double tabor = tabor(work, pair.contactModulus(), radius);
+        return tabor >= LEAST_TABOR
+                ? List.of()
+                : List.of(String.format(
+                        Locale.ROOT,
+                        "law jkr between %s and %s: the Tabor number is %.2g, below 5, so attraction acts outside the"
+                                + " contact area too; take an adhesion law for small, hard grains.",
+                        pair.first().name(),
+                        pair.second().name(),
+                        tabor));
     }
 
     @Override

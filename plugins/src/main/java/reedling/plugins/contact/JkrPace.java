@@ -64,6 +64,7 @@ record JkrPace(JkrScale scale, double alpha, double perImpact) implements Contac
 
             DoubleVector depth = radius.mul(q).mul(WELL * scale.energy());
             DoubleVector above = load(c, Column.STORED_ENERGY, r).add(depth).mul(2.0);
+            above = Lanes.larger(above, zero); // rounding at the bottom of the well
             DoubleVector energy = closing.mul(closing).mul(mass).add(above); // m* v_eq^2
             DoubleVector squared = mass.mul(mass);
             DoubleVector impact =
@@ -88,7 +89,9 @@ record JkrPace(JkrScale scale, double alpha, double perImpact) implements Contac
             c[at(Column.DAMPING) + r] = Math.sqrt(c[at(Column.STIFFNESS) + r] * mass) * dashpot;
 
             double depth = radius * q * (WELL * scale.energy());
-            double energy = closing * closing * mass + (c[at(Column.STORED_ENERGY) + r] + depth) * 2.0; // m* v_eq^2
+            double above = (c[at(Column.STORED_ENERGY) + r] + depth) * 2.0;
+            above = above > 0 ? above : 0; // rounding at the bottom of the well
+            double energy = closing * closing * mass + above; // m* v_eq^2
             double squared = mass * mass;
             double impact = squared * squared * mass / (energy * radius * radius);
             double swing = mass / (q * q);

@@ -188,6 +188,20 @@ class JkrLawTest {
         assertThat(row.get(Column.LOST_ENERGY)).isCloseTo(set.cycle, within(5e-3 * set.cycle));
     }
 
+    /** Tabor 1977; the numbers are the formula's, worked apart from this project with z0 = 0.4 nm. */
+    @Test
+    void taborNumberTellsSoftFromHard() {
+        assertThat(JkrLaw.tabor(0.05, 1e7, 1e-3)).isCloseTo(731, within(1.0));
+        assertThat(JkrLaw.tabor(0.1, 3.5e10, 5e-6)).isCloseTo(0.86077, within(1e-4));
+        Material hard = new Material("hard", 1000, 7e10, 0);
+        MaterialPair pair = new MaterialPair(hard, hard, 1, 0, 0);
+        assertThat(new JkrLaw(0.1, 1, 1).cautions(pair, 5e-6))
+                .singleElement()
+                .asString()
+                .contains("is 0.86, below 5");
+        assertThat(new JkrLaw(10, 1, 1).cautions(pair, 1)).isEmpty();
+    }
+
     @Test
     void weakAdhesionIsHertz() {
         OneRow row = new OneRow(kernel(1e-9, 1e7), 1e-3, MASS);

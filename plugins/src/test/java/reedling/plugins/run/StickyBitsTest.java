@@ -7,6 +7,7 @@ import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.EnumMap;
+import java.util.List;
 import java.util.Map;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
@@ -19,6 +20,7 @@ import reedling.checkpoint.Persistent;
 import reedling.contact.ContactLaw;
 import reedling.contact.LawSet;
 import reedling.contact.Stage;
+import reedling.neighbour.PairSegment;
 import reedling.parallel.WorkerTeam;
 import reedling.plugin.ParameterValues;
 import reedling.plugins.Rig;
@@ -71,6 +73,37 @@ class StickyBitsTest {
         assertThat(digest(3, 1000)).isEqualTo(digest(1, 1000));
     }
 
+    /** So that equality means something: grains hold on to wires and each other; for walls see HangingGrainTest. */
+    @Test
+    void sceneCoversWhatItShould() {
+        Rig rig = ShakenScreen.scene(11).reportEvery(100);
+        laws().forEach(rig::law);
+        boolean onGrains = false;
+        boolean onWires = false;
+        try (WorkerTeam team = new WorkerTeam(1)) {
+            Simulation run = rig.start(team);
+            while (run.stepCount() < 1000) {
+                run.step();
+                onGrains |= anyJoined(run.interactions().pairRows());
+                onWires |= anyJoined(run.interactions().wireRows());
+            }
+            assertThat(onGrains).isTrue();
+            assertThat(onWires).isTrue();
+        }
+    }
+
+    private static boolean anyJoined(List<PairSegment> segments) {
+        for (PairSegment segment : segments) {
+            for (int row = 0; row < segment.activeCount(); row++) {
+                int tile = row & -8;
+                if (segment.history()[segment.historyAt(tile) + 8 + row - tile] > 0) {
+                    return true;
+                }
+            }
+        }
+        return false;
+    }
+
     @Test
     void lanesDoNotChangeABit() throws IOException, InterruptedException {
         assertThat(withLanes(8)).isEqualTo(withLanes(1)).hasSizeGreaterThan(8);
@@ -97,7 +130,8 @@ class StickyBitsTest {
     private static Simulation sticky(WorkerTeam team) {
         Model dry = RainDeck.shaken().model();
         Map<Stage, ContactLaw> laws = laws();
-        laws.put(Stage.TANGENTIAL, new MindlinProvider().create(new ParameterValues(Map.of())));
+        MindlinProvider friction = new MindlinProvider();
+        laws.put(Stage.TANGENTIAL, friction.create(ParameterValues.of(friction, Map.of())));
         return new Simulation(
                 new Model(
                         dry.materials(),
