@@ -10,6 +10,7 @@ import org.assertj.core.data.Percentage;
 import org.junit.jupiter.api.Test;
 import reedling.probe.HeapPlan;
 import reedling.probe.WavePlan;
+import reedling.contact.ContactKind;
 import reedling.run.Model;
 import reedling.run.RunPlan;
 import reedling.structure.Body;
@@ -99,6 +100,18 @@ class CaseAssemblyTest {
         Model rigid = Shipped.assemble("wire-deck", "wires.deck.rigid=true").model();
         assertThat(rigid.structure().bodies()).allMatch(Body::rigid);
         assertThat(rigid.structure().stableStep()).isInfinite();
+    }
+
+    @Test
+    void lawsOfFurtherStagesAreBoundAndNamed() {
+        CaseAssembly sticky = Shipped.assemble(
+                "first-look",
+                "laws.normal={law = \"jkr\", work_of_adhesion = \"50 mJ/m2\"}",
+                "laws.near_field={law = \"lennard-jones\", depth = 1e-9, zero_distance = \"0.1 mm\","
+                        + " contact_distance = \"0.11 mm\", cutoff = \"0.5 mm\"}");
+        assertThat(sticky.plugins())
+                .containsOnlyKeys("jkr", "lennard-jones", "mindlin", "elastic-plastic", "gravity", "beam");
+        assertThat(sticky.model().laws().reach(ContactKind.GRAIN_WIRE, 1e-3)).isCloseTo(0.39e-3, within(1e-12));
     }
 
     @Test

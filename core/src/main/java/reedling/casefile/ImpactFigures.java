@@ -2,7 +2,9 @@
 package reedling.casefile;
 
 import java.util.ArrayList;
+import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Set;
 import reedling.contact.ContactKind;
 import reedling.material.MaterialPair;
 import reedling.material.MaterialTable;
@@ -71,10 +73,26 @@ final class ImpactFigures {
             }
             specification.wires().values().forEach(wire -> onWire(lot, radius, wire, text));
         }
+        lawCautions().forEach(text::caution);
         if (!specification.wires().isEmpty()) {
             text.line("  Softened grains squeeze through gaps that real ones do not pass: repeat with four times"
                     + " youngs_modulus before trusting a passage.");
         }
+    }
+
+    /** What the laws say of the contacts of typical grains, each thing once. */
+    private Set<String> lawCautions() {
+        Set<String> cautions = new LinkedHashSet<>();
+        MaterialTable table = model.materials();
+        for (LotSpecification lot : specification.lots().values()) {
+            for (Partner partner : partners()) {
+                MaterialPair pair = table.pair(table.indexOf(lot.material()), table.indexOf(partner.material));
+                double radius =
+                        impact(lot, 0.5 * lot.diameter().typical(), partner).radius();
+                cautions.addAll(model.laws().cautions(pair, radius));
+            }
+        }
+        return cautions;
     }
 
     private void onWire(LotSpecification lot, double radius, WireSpecification wire, ForecastText text) {

@@ -7,6 +7,8 @@ import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
 import reedling.contact.ContactLaw;
+import reedling.contact.ContactLawProvider;
+import reedling.contact.LawCombination;
 import reedling.contact.LawSet;
 import reedling.contact.Stage;
 import reedling.error.ExitCode;
@@ -29,6 +31,7 @@ record LawParts(Map<Stage, ContactLaw> byStage, List<Field> fields, Map<String, 
         LawParts parts = new LawParts(new EnumMap<>(Stage.class), new ArrayList<>(), new TreeMap<>());
         CaseSpecification specification = reading.specification();
         specification.laws().byStage().forEach((stage, choice) -> parts.law(stage, choice, reading, plugins, faults));
+        refuse(specification.laws(), reading, plugins, faults);
         specification.fields().forEach((name, choice) -> {
             String path = "fields." + name;
             faults.make(
@@ -64,6 +67,17 @@ record LawParts(Map<Stage, ContactLaw> byStage, List<Field> fields, Map<String, 
                         "a field with a potential, such as gravity",
                         "The midpoint rule iterates over contacts and positions only. Leave the field out of a reference"
                                 + " run, or take explicit steps.")));
+    }
+
+    /** Faults of laws that do not stand together. */
+    private static void refuse(LawsSpecification laws, CaseReading reading, CasePlugins plugins, PartFaults faults) {
+        Map<Stage, ContactLawProvider> providers = new EnumMap<>(Stage.class);
+        laws.byStage()
+                .forEach((stage, choice) ->
+                        providers.put(stage, plugins.law(choice.name(), reading.where(LawKeys.path(stage)))));
+        LawCombination.refusals(providers)
+                .forEach(refusal ->
+                        faults.add(LawKeys.path(refusal.stage()), refusal.got(), refusal.expected(), refusal.remedy()));
     }
 
     private void law(Stage stage, PluginChoice choice, CaseReading reading, CasePlugins available, PartFaults faults) {

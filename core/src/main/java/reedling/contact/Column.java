@@ -27,7 +27,7 @@ public final class Column {
     public static final int LEVER_FIRST = 15;
     /** Distance of the contact point from the second centre or axis, m. */
     public static final int LEVER_SECOND = 16;
-    /** 1 where the bodies are within the reach of the law, else 0. */
+    /** 1 where the overlap is above minus the reach of the laws, which is 0 for most, else 0. */
     public static final int TOUCH = 17;
     /** Effective radius R*, m, any geometry factor folded in. */
     public static final int EFFECTIVE_RADIUS = 18;

@@ -29,6 +29,7 @@ public final class ContactBlock {
     private double[] history = new double[0];
     private int historyStart;
     private int historyColumns;
+    private double reach;
     private boolean energyDue;
     private double shortestDuration = Double.POSITIVE_INFINITY;
 
@@ -66,6 +67,16 @@ public final class ContactBlock {
     /** Length of the step that led to the present positions, s; 0 at the start of a run. */
     public double step() {
         return step;
+    }
+
+    /** Reach of the laws, m: rows have TOUCH = 1 while their overlap is above minus this. */
+    public double reach() {
+        return reach;
+    }
+
+    /** Sets the reach of the laws, m. */
+    public void reach(double metres) {
+        reach = metres;
     }
 
     public double[] history() {

@@ -18,6 +18,15 @@ public interface ContactLaw {
     }
 
     /**
+     * Sentences for the check of a case about contacts for which this law is not made; empty where there is nothing to say.
+     *
+     * @param radius effective radius, m
+     */
+    default List<String> cautions(MaterialPair pair, double radius) {
+        return List.of();
+    }
+
+    /**
      * Binds the law to a material pair.
      *
      * @param historyColumn number of its first history column in a row's history

@@ -2,6 +2,7 @@
 package reedling.contact;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
@@ -101,9 +102,33 @@ public final class LawSet {
         return Objects.requireNonNull(start.get(stage));
     }
 
+    /** What the laws have to say against contacts of a material pair at an effective radius, m. */
+    public List<String> cautions(MaterialPair pair, double radius) {
+        return laws.values().stream()
+                .flatMap(law -> law.cautions(pair, radius).stream())
+                .toList();
+    }
+
     /** Kernels for a contact kind and the number of a material pair. */
     public Bound bound(ContactKind kind, int materialPair) {
         return Objects.requireNonNull(bound.get(kind)).get(materialPair);
+    }
+
+    /** Largest of {@link #reaches}, m. */
+    public double reach(ContactKind kind, double largestRadius) {
+        return Arrays.stream(reaches(kind, largestRadius)).max().orElse(0);
+    }
+
+    /**
+     * Largest gap at which rows are given to the laws with TOUCH = 1, m, for each material pair; 0 for laws that act only
+     * on bodies that overlap.
+     *
+     * @param largestRadius largest effective radius of rows of this kind, m
+     */
+    public double[] reaches(ContactKind kind, double largestRadius) {
+        return Objects.requireNonNull(bound.get(kind)).stream()
+                .mapToDouble(one -> one.normal().reach(largestRadius))
+                .toArray();
     }
 
     /** For each history column of a row, whether it turns its sign when first and second are exchanged. */

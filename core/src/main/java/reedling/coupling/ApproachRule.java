@@ -36,6 +36,11 @@ final class ApproachRule {
         longestStep = seconds;
     }
 
+    /** What is left of a gap, m, before the reach of the laws, m, or inside it before the touch. */
+    static double ahead(double gap, double reach) {
+        return gap > reach ? gap - reach : gap;
+    }
+
     /** True when a gap (m) may close soon enough, at a closing speed (m/s), to limit the step. */
     boolean concerns(double gap, double closing) {
         return gap < HORIZON * longestStep * closing;

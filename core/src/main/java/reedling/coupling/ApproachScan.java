@@ -19,7 +19,7 @@ final class ApproachScan {
         double[] c = block.columns();
         for (int r = 0; r < block.rows(); r += Lanes.TILE) {
             if (anyApart(c, r)) {
-                scanTile(c, r, normal, rule, tally);
+                scanTile(c, r, block.reach(), normal, rule, tally);
             }
         }
     }
@@ -33,10 +33,12 @@ final class ApproachScan {
         return true;
     }
 
-    private static void scanTile(double[] c, int from, ContactKernel normal, ApproachRule rule, ContactTally tally) {
+    private static void scanTile(
+            double[] c, int from, double reach, ContactKernel normal, ApproachRule rule, ContactTally tally) {
         for (int r = from; r < from + Lanes.TILE; r++) {
             double gap = -c[at(Column.OVERLAP) + r];
             if (gap > 0) {
+                gap = ApproachRule.ahead(gap, reach);
                 double closing = c[at(Column.CLOSING) + r];
                 if (rule.concerns(gap, closing)) {
                     double radius = c[at(Column.EFFECTIVE_RADIUS) + r];

@@ -11,7 +11,8 @@ import reedling.particle.GrainRow;
 import reedling.particle.GrainStore;
 
 /**
- * Looks at candidate pairs that could touch: those that do become active, those about to do so limit the next step.
+ * Looks at candidate pairs that could come into the reach of the laws, which for most is the touch: those that do become
+ * active, those about to do so limit the next step. Gaps are counted from the reach on.
  *
  * <p>A block of candidates is left alone while its smallest gap cannot have closed:
  * {@code 2 (D - D0) + 3 v_max h_max < gap}, with D the accumulated largest displacement, D0 its value when the block was
@@ -67,13 +68,13 @@ final class CandidateWatch {
         for (int k = block * PairSegment.CANDIDATE_BLOCK; k < end; k++) {
             int i = segment.candidateFirst()[k];
             int j = segment.candidateSecond()[k];
-            double gap = gap(rows, i, j);
+            double gap = gap(rows, i, j) - segment.reach();
             if (gap <= 0) {
                 chunk.activate(segmentNumber, i, j, layout, grains.ghost());
                 segment.removeCandidate(k, grains.ghost());
             } else {
                 smallest = gap < smallest ? gap : smallest;
-                approach(rows, i, j, gap, law, rule, tally);
+                approach(rows, i, j, gap, segment.reach(), law, rule, tally);
             }
         }
         segment.blockGap()[block] = smallest;
@@ -89,14 +90,21 @@ final class CandidateWatch {
         return distance - (rows[a + GrainRow.RADIUS] + rows[b + GrainRow.RADIUS]);
     }
 
-    /** Limits the step for two grains that are apart and closing. */
+    /** Limits the step for two grains that are apart, by a gap less reach in m, and closing. */
     static void approach(
-            double[] rows, int i, int j, double gap, ContactKernel law, ApproachRule rule, ContactTally tally) {
+            double[] rows,
+            int i,
+            int j,
+            double gap,
+            double reach,
+            ContactKernel law,
+            ApproachRule rule,
+            ContactTally tally) {
         int a = GrainRow.at(i);
         int b = GrainRow.at(j);
         double radiusI = rows[a + GrainRow.RADIUS];
         double radiusJ = rows[b + GrainRow.RADIUS];
-        double distance = gap + radiusI + radiusJ;
+        double distance = gap + reach + radiusI + radiusJ;
         double closing = 0;
         for (int axis = 0; axis < 3; axis++) {
             double across = rows[b + axis] - rows[a + axis];

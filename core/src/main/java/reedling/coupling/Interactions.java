@@ -3,6 +3,7 @@ package reedling.coupling;
 
 import java.util.ArrayList;
 import java.util.List;
+import reedling.contact.ContactKind;
 import reedling.contact.LawSet;
 import reedling.field.Field;
 import reedling.material.MaterialTable;
@@ -28,6 +29,7 @@ public final class Interactions {
     private final Structure structure;
     private final List<Field> fields;
     private final MotionForces motionForces;
+    private final LawSet laws;
     private final NeighbourLists lists;
     private final CandidateWatch candidates;
     private final PairForces pairs;
@@ -73,6 +75,7 @@ public final class Interactions {
         this.structure = structure;
         this.fields = List.copyOf(fields);
         motionForces = new MotionForces(fields, grains);
+        this.laws = laws;
         lists = new NeighbourLists(materials.materials().size(), laws.signedColumns());
         candidates = new CandidateWatch(laws);
         pairs = new PairForces(laws, materials.pairs().size());
@@ -135,16 +138,35 @@ public final class Interactions {
      * @param removed grains to drop, or an empty array
      */
     public void search(double margin, boolean[] removed, WorkerTeam team) {
+        double largest = largestRadius(removed);
+        settleReach(largest);
         walls.copyOut(team);
         wires.copyOut(team);
         lists.search(grains, margin, removed, team);
         walls.list(lists, grains, margin, team);
-        double largest = 0;
-        for (int g = 0; g < grains.count(); g++) {
-            largest = Math.max(largest, grains.radius(g));
-        }
         wires.list(lists, grains, margin, largest, team);
         makeRoom(team.workers());
+    }
+
+    private double largestRadius(boolean[] removed) {
+        double largest = 0;
+        for (int g = 0; g < grains.count(); g++) {
+            if (removed.length == 0 || !removed[g]) {
+                largest = Math.max(largest, grains.radius(g));
+            }
+        }
+        return largest;
+    }
+
+    /** Settles how far the laws reach for the present grains, as the last search did; after a restored state. */
+    public void settleReach() {
+        settleReach(largestRadius(new boolean[0]));
+    }
+
+    private void settleReach(double largestRadius) {
+        lists.reach(laws.reaches(ContactKind.GRAIN_GRAIN, 0.5 * largestRadius));
+        walls.reach(largestRadius);
+        wires.reach(laws.reaches(ContactKind.GRAIN_WIRE, largestRadius));
     }
 
     /** Makes room for the chunks there are and so many workers; after a search or a restored state. */

@@ -29,14 +29,15 @@ final class PairDistance implements RowStage {
     public void run(RowRange rows) {
         ContactBlock block = rows.block();
         if (Lanes.VECTORISED) {
-            vector(block.columns(), block.rows());
+            vector(block.columns(), block.rows(), -block.reach());
         } else {
-            scalar(block.columns(), block.rows());
+            scalar(block.columns(), block.rows(), -block.reach());
         }
     }
 
-    private static void vector(double[] c, int rows) {
+    private static void vector(double[] c, int rows, double farthest) {
         DoubleVector zero = DoubleVector.zero(Lanes.SPECIES);
+        DoubleVector edge = DoubleVector.broadcast(Lanes.SPECIES, farthest);
         DoubleVector one = DoubleVector.broadcast(Lanes.SPECIES, 1.0);
         for (int r = 0; r < rows; r += Lanes.TILE) {
             DoubleVector a = load(c, QUAD, r), b = load(c, QUAD + 1, r);
@@ -56,7 +57,7 @@ final class PairDistance implements RowStage {
             store(dy.mul(inverse), c, Column.NORMAL + 1, r);
             store(dz.mul(inverse), c, Column.NORMAL + 2, r);
             store(overlap, c, Column.OVERLAP, r);
-            store(zero.blend(one, zero.lt(overlap)), c, Column.TOUCH, r);
+            store(zero.blend(one, edge.lt(overlap)), c, Column.TOUCH, r);
             store(inverse, c, INVERSE_DISTANCE, r);
             DoubleVector inverseRadii = inverseBoth.mul(distance);
             store(inverseRadii, c, INVERSE_RADII, r);
@@ -65,7 +66,7 @@ final class PairDistance implements RowStage {
         }
     }
 
-    private static void scalar(double[] c, int rows) {
+    private static void scalar(double[] c, int rows, double farthest) {
         for (int r = 0; r < rows; r++) {
             double dx = c[at(Column.NORMAL) + r], dy = c[at(Column.NORMAL + 1) + r], dz = c[at(Column.NORMAL + 2) + r];
             double radii = c[at(Column.OVERLAP) + r];
@@ -78,7 +79,7 @@ final class PairDistance implements RowStage {
             c[at(Column.NORMAL + 1) + r] = dy * inverse;
             c[at(Column.NORMAL + 2) + r] = dz * inverse;
             c[at(Column.OVERLAP) + r] = overlap;
-            c[at(Column.TOUCH) + r] = 0.0 < overlap ? 1.0 : 0.0;
+            c[at(Column.TOUCH) + r] = farthest < overlap ? 1.0 : 0.0;
             c[at(INVERSE_DISTANCE) + r] = inverse;
             double inverseRadii = inverseBoth * distance;
             c[at(INVERSE_RADII) + r] = inverseRadii;

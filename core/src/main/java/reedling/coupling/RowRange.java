@@ -31,6 +31,7 @@ final class RowRange {
                 source.historyColumns(),
                 step.energyDue());
         block.reportDuration(sums.shortestDuration());
+        block.reach(source.reach());
     }
 
     ContactBlock block() {

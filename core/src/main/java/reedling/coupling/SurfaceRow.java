@@ -40,6 +40,9 @@ final class SurfaceRow {
     /** Effective radius, m. */
     double effectiveRadius;
 
+    /** Reach of the laws over gaps, m. */
+    double reach;
+
     /** Relative velocity of the centres, m/s, as {@link #write} found it. */
     final double[] relative = new double[3];
 
@@ -78,7 +81,7 @@ final class SurfaceRow {
         }
         c[at(Column.LEVER_FIRST) + r] = lever;
         c[at(Column.LEVER_SECOND) + r] = leverSecond;
-        c[at(Column.TOUCH) + r] = overlap > 0 ? 1.0 : 0.0;
+        c[at(Column.TOUCH) + r] = overlap > -reach ? 1.0 : 0.0;
         c[at(Column.EFFECTIVE_RADIUS) + r] = effectiveRadius;
         c[at(Column.EFFECTIVE_MASS) + r] = 1 / inverseMassGrain;
         c[at(Column.CLOSING) + r] = closing;

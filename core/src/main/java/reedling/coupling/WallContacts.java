@@ -45,6 +45,7 @@ public final class WallContacts implements Persistent {
     private final List<double[][]> radii = new ArrayList<>();
     private final List<double[]> loads = new ArrayList<>();
     private final double[] total;
+    private double[] reach;
     private int chunks;
 
     WallContacts(GrainStore grains, LawSet laws, MaterialTable materials, WallFacets facets) {
@@ -60,6 +61,7 @@ public final class WallContacts implements Persistent {
             lawLines.add(StageLine.ofLaws(laws.bound(ContactKind.GRAIN_WALL, pair)));
         }
         total = new double[LOAD * facets.walls().size()];
+        reach = new double[materials.pairs().size()];
     }
 
     /** Segments of one chunk, one for each material pair. */
@@ -69,6 +71,24 @@ public final class WallContacts implements Persistent {
 
     void copyOut(WorkerTeam team) {
         carry.copyOut(segments.subList(0, chunks), team);
+    }
+
+    /** Sets how far the laws reach for grains up to a radius, m; before a search and after a restored state. */
+    void reach(double largestRadius) {
+        double widest = largestRadius; // largest effective radius; that of a sphere in a bore is larger than its own
+        if (laws.reach(ContactKind.GRAIN_WALL, 1) > 0) {
+            for (int facet = 0; facet < facets.count(); facet++) {
+                widest = Math.max(widest, facets.effectiveRadius(facet, largestRadius));
+            }
+        }
+        reach = laws.reaches(ContactKind.GRAIN_WALL, widest);
+        segments.forEach(this::setReach);
+    }
+
+    private void setReach(PairSegment[] own) {
+        for (int pair = 0; pair < own.length; pair++) {
+            own[pair].reach(reach[pair]);
+        }
     }
 
     /** Lists all near facets anew after the grains were sorted. */
@@ -84,6 +104,7 @@ public final class WallContacts implements Persistent {
         while (segments.size() < count) {
             PairSegment[] made = new PairSegment[materials.pairs().size()];
             Arrays.setAll(made, k -> new PairSegment(laws.historyColumns(), false));
+            setReach(made);
             segments.add(made);
             double[][] cached = new double[made.length][];
             Arrays.fill(cached, new double[0]);
@@ -105,9 +126,9 @@ public final class WallContacts implements Persistent {
             double radius = rows[at + GrainRow.RADIUS];
             for (int facet = 0; facet < facets.count(); facet++) {
                 double gap = facets.gap(facet, rows[at], rows[at + 1], rows[at + 2], normal) - radius;
-                if (gap < margin) {
-                    int pair = MaterialTable.pairIndex(
-                            grains.material()[g], facets.pose(facet).wall().material());
+                int pair = MaterialTable.pairIndex(
+                        grains.material()[g], facets.pose(facet).wall().material());
+                if (gap < margin + reach[pair]) {
                     int row = own[pair].activate(g, facet, grains.ghost());
                     effective[pair] = keep(effective[pair], row, facets.effectiveRadius(facet, radius));
                     int carried = carry.find(g, facet);
@@ -148,6 +169,7 @@ public final class WallContacts implements Persistent {
         double[] c = block.columns();
         double[] rows = grains.rows();
         double halfStep = 0.5 * block.step();
+        row.reach = block.reach();
         for (int r = 0; r < block.rows(); r++) {
             if (from + r >= segment.activeCount()) {
                 SurfaceRow.writeIdle(c, r);

@@ -3,6 +3,7 @@ package reedling.coupling;
 
 import java.io.IOException;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import reedling.checkpoint.Persistent;
 import reedling.checkpoint.SectionReader;
@@ -44,6 +45,7 @@ public final class WireContacts implements NodalLoads, Persistent {
     private int chunks;
     private long pass;
     private boolean listedAnew;
+    private double[] reach;
 
     WireContacts(GrainStore grains, LawSet laws, MaterialTable materials, Structure structure, int[] materialOfBody) {
         this.grains = grains;
@@ -51,6 +53,7 @@ public final class WireContacts implements NodalLoads, Persistent {
         this.materials = materials;
         elements = new WireElements(structure, materialOfBody);
         carry = new HistoryCarry(laws.signedColumns(), false);
+        reach = new double[materials.pairs().size()];
         for (int pair = 0; pair < materials.pairs().size(); pair++) {
             lawLines.add(StageLine.ofLaws(laws.bound(ContactKind.GRAIN_WIRE, pair)));
         }
@@ -81,10 +84,24 @@ public final class WireContacts implements NodalLoads, Persistent {
     void layOut(int chunkCount, int workers) {
         chunks = chunkCount;
         while (pool.size() < chunkCount) {
-            pool.add(new WireChunk(materials.pairs().size(), laws.historyColumns()));
+            WireChunk made = new WireChunk(materials.pairs().size(), laws.historyColumns());
+            setReach(made);
+            pool.add(made);
         }
         while (touches.size() < workers) {
             touches.add(new WireTouch(elements, laws));
+        }
+    }
+
+    /** Sets how far the laws reach, m, for each material pair; before a search and after a restored state. */
+    void reach(double[] byMaterialPair) {
+        reach = byMaterialPair.clone();
+        pool.forEach(this::setReach);
+    }
+
+    private void setReach(WireChunk chunk) {
+        for (int pair = 0; pair < reach.length; pair++) {
+            chunk.rows()[pair].segment().reach(reach[pair]);
         }
     }
 
@@ -92,8 +109,9 @@ public final class WireContacts implements NodalLoads, Persistent {
     void list(NeighbourLists lists, GrainStore grains, double margin, double largestRadius, WorkerTeam team) {
         carry.rename(lists.newRow(), grains.count());
         layOut(lists.chunks().size(), team.workers());
-        elements.enter(lists.grid(), largestRadius + margin);
-        team.run((task, worker) -> list(lists.chunks().get(task), grains, margin), chunks);
+        double far = margin + Arrays.stream(reach).max().orElse(0);
+        elements.enter(lists.grid(), largestRadius + far);
+        team.run((task, worker) -> list(lists.chunks().get(task), grains, far), chunks);
         listedAnew = true;
     }
 
@@ -167,6 +185,7 @@ public final class WireContacts implements NodalLoads, Persistent {
     private void gather(ContactBlock block, WireRows rows, int from, GrainStore grains, SurfaceRow row) {
         double[] c = block.columns();
         double halfStep = 0.5 * block.step();
+        row.reach = block.reach();
         for (int r = 0; r < block.rows(); r++) {
             int k = from + r;
             if (k >= rows.segment().activeCount() || rows.element()[k] < 0) {
@@ -212,7 +231,9 @@ public final class WireContacts implements NodalLoads, Persistent {
             row.normalRate[axis] = -across * inverseDistance; // sliding along the wire does not turn the normal
         }
         double near = 1 - along;
-        row.overlap = touching ? g[at + WireRows.OVERLAP] : Math.min(0, g[at + WireRows.OVERLAP]) - Double.MIN_NORMAL;
+        row.overlap = touching
+                ? g[at + WireRows.OVERLAP]
+                : Math.min(-row.reach, g[at + WireRows.OVERLAP]) - Double.MIN_NORMAL;
         row.leverSecond = elements.radius(wire) - 0.5 * row.overlap;
         row.inverseMass = near * near * nodes.inverseMass[first] + along * along * nodes.inverseMass[second];
         row.inverseInertia = near * near * nodes.inverseInertia[first] + along * along * nodes.inverseInertia[second];

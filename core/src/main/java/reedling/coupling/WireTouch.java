@@ -10,8 +10,8 @@ import reedling.structure.NodeStore;
 import reedling.wall.HertzLine;
 
 /**
- * Finds where the near grains of a chunk touch wires. All elements of one wire that a grain overlaps and that follow one
- * another form a run; the deepest point of a run is the contact (ties: the lower element), which is the exact gradient of
+ * Finds where the near grains of a chunk touch wires, or have them in reach of the laws. All elements of one wire that a
+ * grain overlaps, or has in reach, and that follow one another form a run; the deepest point of a run is the contact (ties: the lower element), which is the exact gradient of
  * a potential of the deepest overlap, with no double count at nodes. Two runs are two contacts. A run takes over the row
  * of the same grain and wire whose normal is nearest to its own.
  *
@@ -63,6 +63,8 @@ final class WireTouch {
         int grain = chunk.near().grain(number);
         int at = GrainRow.at(grain);
         double[] rows = grains.rows();
+        int pair = MaterialTable.pairIndex(grains.material()[grain], elements.material(wire));
+        double reach = chunk.rows()[pair].segment().reach();
         int bestElement = -1;
         int previous = -2;
         double nearest = Double.NEGATIVE_INFINITY;
@@ -75,12 +77,13 @@ final class WireTouch {
                 nearest = overlap;
                 nearestElement = element;
             }
+            boolean inReach = overlap > -reach;
             boolean continues = bestElement >= 0 && element == previous + 1;
-            if (bestElement >= 0 && !(continues && overlap > 0)) {
+            if (bestElement >= 0 && !(continues && inReach)) {
                 claimRow(chunk, number, wire, bestElement, grains, pass);
                 bestElement = -1;
             }
-            if (overlap > 0) {
+            if (inReach) {
                 if (bestElement < 0 || overlap > best[WireRows.OVERLAP]) {
                     System.arraycopy(trial, 0, best, 0, WireRows.GEOMETRY);
                     bestElement = element;
@@ -92,7 +95,7 @@ final class WireTouch {
             claimRow(chunk, number, wire, bestElement, grains, pass);
         }
         if (nearest <= 0) {
-            approach(nearestElement, wire, grains, grain, rule, tally);
+            approach(nearestElement, wire, reach, grains, grain, rule, tally);
         }
     }
 
@@ -149,7 +152,8 @@ final class WireTouch {
         return found;
     }
 
-    private void approach(int element, int wire, GrainStore grains, int grain, ApproachRule rule, ContactTally tally) {
+    private void approach(
+            int element, int wire, double reach, GrainStore grains, int grain, ApproachRule rule, ContactTally tally) {
         double[] rows = grains.rows();
         int at = GrainRow.at(grain);
         measure(element, wire, rows, at, trial);
@@ -163,7 +167,7 @@ final class WireTouch {
             double speed = rows[at + GrainRow.V + axis] - Math.fma(along, nodes.velocity[b + axis] - va, va);
             closing = Math.fma(speed, trial[axis], closing);
         }
-        double gap = -trial[WireRows.OVERLAP];
+        double gap = ApproachRule.ahead(-trial[WireRows.OVERLAP], reach);
         if (rule.concerns(gap, closing)) {
             int pair = MaterialTable.pairIndex(grains.material()[grain], elements.material(wire));
             double effective = HertzLine.outside(grains.radius(grain), elements.radius(wire));

@@ -12,6 +12,20 @@ public final class Roots {
 
     private Roots() {}
 
+    /** Third root of a positive finite number; infinity for infinity, not a number for a negative number. */
+    public static double third(double x) {
+        if (!(x > 0) || x == Double.POSITIVE_INFINITY) {
+            return x < 0 ? Double.NaN : x;
+        }
+        int power = Math.floorDiv(Math.getExponent(x), 3);
+        double part = Math.scalb(x, -3 * power); // 1 <= part < 8 for normal numbers
+        double root = 0.48 * (1 + (part - 1) * (1.0 / 7) + Math.sqrt(part));
+        for (int k = 0; k < NEWTON_STEPS; k++) {
+            root = (2 * root + part / (root * root)) * (1.0 / 3);
+        }
+        return Math.scalb(root, power);
+    }
+
     /** Fifth root of a positive finite number; infinity for infinity, not a number for a negative number. */
     public static double fifth(double x) {
         if (!(x > 0) || x == Double.POSITIVE_INFINITY) {

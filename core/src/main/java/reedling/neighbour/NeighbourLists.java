@@ -30,6 +30,8 @@ public final class NeighbourLists implements Persistent {
     private List<Chunk> chunks = new ArrayList<>();
     private ChunkLayout layout = ChunkLayout.of(0);
     private int[] newRow = new int[0];
+    private double[] reach;
+    private double largestReach;
 
     /**
      * @param materials number of materials
@@ -39,6 +41,7 @@ public final class NeighbourLists implements Persistent {
         materialPairs = materials * (materials + 1) / 2;
         historyColumns = signedColumns.length;
         carry = new HistoryCarry(signedColumns, true);
+        reach = new double[materialPairs];
     }
 
     public List<Chunk> chunks() {
@@ -59,15 +62,34 @@ public final class NeighbourLists implements Persistent {
     }
 
     /**
+     * Sets how far the laws reach over gaps, m, for each material pair; before a search and after a restored state. Pairs
+     * in reach are active.
+     */
+    public void reach(double[] byMaterialPair) {
+        reach = byMaterialPair.clone();
+        largestReach = 0;
+        for (double one : reach) {
+            largestReach = Math.max(largestReach, one);
+        }
+        chunks.forEach(this::setReach);
+    }
+
+    private void setReach(Chunk chunk) {
+        for (int s = 0; s < chunk.segments().length; s++) {
+            chunk.segments()[s].reach(reach[s / 2]);
+        }
+    }
+
+    /**
      * Sorts the grains, drops those marked, and builds all lists anew.
      *
-     * @param margin pairs with a gap below it are listed, m
+     * @param margin pairs with a gap less than it beyond their reach are listed, m
      * @param removed grains to drop, or an empty array
      */
     public void search(GrainStore grains, double margin, boolean[] removed, WorkerTeam team) {
         carry.copyOut(chunks.stream().map(Chunk::segments).toList(), team);
         double largest = largestRadius(grains);
-        grid.fit(grains, 2 * largest + margin);
+        grid.fit(grains, 2 * largest + (margin + largestReach));
         sortGrains(grains, removed);
         grid.index(grains);
         layOut(grains.count());
@@ -121,8 +143,9 @@ public final class NeighbourLists implements Persistent {
     }
 
     private void list(Chunk chunk, GrainStore grains, double margin, CandidateSort sort) {
+        setReach(chunk);
         for (int i = chunk.from(); i < chunk.to(); i++) {
-            listPairsOf(i, chunk, grains, margin);
+            listPairsOf(i, chunk, grains, margin + largestReach);
         }
         for (PairSegment segment : chunk.segments()) {
             segment.sortCandidates(sort, margin);
@@ -175,13 +198,14 @@ public final class NeighbourLists implements Persistent {
         int pair = MaterialTable.pairIndex(grains.material()[i], grains.material()[j]);
         int segmentNumber = 2 * pair + (j < chunk.to() ? 0 : 1);
         int carried = carry.find(i, j);
-        if (carried >= 0 || gap <= 0) {
+        double ahead = gap - reach[pair];
+        if (carried >= 0 || ahead <= 0) {
             int row = chunk.activate(segmentNumber, i, j, layout, grains.ghost());
             if (carried >= 0) {
                 carry.giveBack(carried, chunk.segments()[segmentNumber], row);
             }
         } else {
-            chunk.addCandidate(segmentNumber, i, j, gap, layout);
+            chunk.addCandidate(segmentNumber, i, j, ahead, layout);
         }
     }
 

@@ -8,8 +8,8 @@ import reedling.checkpoint.SectionWriter;
 import reedling.math.Lanes;
 
 /**
- * Pairs of one material pair in one chunk, either all inside the chunk or all reaching into another. Active pairs touch
- * or did so since the last search and carry history; candidates are near and are looked at only when they could touch.
+ * Pairs of one material pair in one chunk, either all inside the chunk or all reaching into another. Active pairs are in
+ * reach or were so since the last search and carry history; candidates are near and are looked at only when they could touch.
  *
  * <p>Active rows are filled up to whole tiles of 8 with the two ghost grains. History stands in groups of 8 rows:
  * {@code [group][column][8]} doubles for the laws (column 0 is the contact radius of the step before) and
@@ -32,6 +32,7 @@ public final class PairSegment {
 
     private final int historyColumns;
     private final boolean cross;
+    private double reach;
 
     private int activeCount;
     private int[] first = new int[0];
@@ -58,6 +59,16 @@ public final class PairSegment {
 
     public boolean cross() {
         return cross;
+    }
+
+    /** Gap up to which pairs are active, m: the reach of their laws; kept when pairs are forgotten. */
+    public double reach() {
+        return reach;
+    }
+
+    /** Sets the reach of the laws, m. */
+    public void reach(double metres) {
+        reach = metres;
     }
 
     /** Active pairs, ghosts not counted. */
@@ -123,7 +134,7 @@ public final class PairSegment {
         return (candidateCount + CANDIDATE_BLOCK - 1) / CANDIDATE_BLOCK;
     }
 
-    /** Smallest gap of each candidate block when it was last looked at, m. */
+    /** Smallest gap less reach of each candidate block when it was last looked at, m. */
     public double[] blockGap() {
         return blockGap;
     }
@@ -176,7 +187,7 @@ public final class PairSegment {
         }
     }
 
-    /** Adds a candidate found by the search; {@link #sortCandidates} must follow before the next step. */
+    /** Adds a candidate found by the search with its gap less reach, m; {@link #sortCandidates} must follow before the next step. */
     public void addCandidate(int i, int j, double gap) {
         if (candidateCount == candidateFirst.length) {
             int capacity = Math.max(CANDIDATE_BLOCK, candidateCount + candidateCount / 4);

@@ -416,6 +416,7 @@ public final class Simulation {
             turned = in.readDouble();
             traffic.nextRelease(in.readDouble());
             interactions.makeRoom(team.workers());
+            interactions.settleReach();
         }
     }
 

@@ -2,9 +2,11 @@
 package reedling.plugins.contact;
 
 import java.util.List;
+import java.util.Set;
 import reedling.contact.ContactLaw;
 import reedling.contact.ContactLawProvider;
 import reedling.contact.Stage;
+import reedling.contact.Trait;
 import reedling.plugin.Parameter;
 import reedling.plugin.ParameterValues;
 
@@ -39,6 +41,11 @@ public final class HertzProvider implements ContactLawProvider {
     @Override
     public Stage stage() {
         return Stage.NORMAL;
+    }
+
+    @Override
+    public Set<Trait> brings() {
+        return Set.of(Trait.STIFFNESS, Trait.CONTACT_RADIUS, Trait.HERTZ_CONTACT);
     }
 
     @Override

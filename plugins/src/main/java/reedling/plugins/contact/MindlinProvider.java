@@ -1,9 +1,11 @@
 // SPDX-License-Identifier: Apache-2.0
 package reedling.plugins.contact;
 
+import java.util.Set;
 import reedling.contact.ContactLaw;
 import reedling.contact.ContactLawProvider;
 import reedling.contact.Stage;
+import reedling.contact.Trait;
 import reedling.plugin.ParameterValues;
 
 /** Offers {@link MindlinLaw} under the name {@code mindlin}. */
@@ -32,6 +34,11 @@ public final class MindlinProvider implements ContactLawProvider {
     @Override
     public Stage stage() {
         return Stage.TANGENTIAL;
+    }
+
+    @Override
+    public Set<Trait> needs() {
+        return Set.of(Trait.CONTACT_RADIUS);
     }
 
     @Override

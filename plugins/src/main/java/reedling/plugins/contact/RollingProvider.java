@@ -2,9 +2,11 @@
 package reedling.plugins.contact;
 
 import java.util.List;
+import java.util.Set;
 import reedling.contact.ContactLaw;
 import reedling.contact.ContactLawProvider;
 import reedling.contact.Stage;
+import reedling.contact.Trait;
 import reedling.plugin.Parameter;
 import reedling.plugin.ParameterValues;
 import reedling.unit.Dimension;
@@ -43,6 +45,11 @@ public final class RollingProvider implements ContactLawProvider {
     @Override
     public Stage stage() {
         return Stage.ROLLING;
+    }
+
+    @Override
+    public Set<Trait> needs() {
+        return Set.of(Trait.STIFFNESS);
     }
 
     @Override
