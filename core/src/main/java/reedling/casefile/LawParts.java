@@ -8,6 +8,7 @@ import java.util.Map;
 import java.util.TreeMap;
 import reedling.contact.ContactLaw;
 import reedling.contact.LawSet;
+import reedling.contact.NamedLaw;
 import reedling.contact.Stage;
 import reedling.field.Field;
 import reedling.material.MaterialTable;
@@ -55,7 +56,7 @@ record LawParts(Map<Stage, ContactLaw> byStage, List<Field> fields, Map<String, 
                         path,
                         () -> available.law(choice.name(), reading.where(path)).create(choice.parameters()))
                 .ifPresent(law -> {
-                    byStage.put(stage, law);
+                    byStage.put(stage, new NamedLaw(choice.name(), law));
                     plugins.put(choice.name(), law.historyVersion());
                 });
     }
