@@ -39,6 +39,8 @@ public final class Main {
         commandLine.addSubcommand(new RunCommand(ending));
         commandLine.addSubcommand(new ResumeCommand(ending));
         commandLine.addSubcommand(new CheckCommand());
+        commandLine.addSubcommand(new CertifyCommand());
+        commandLine.addSubcommand(new NewLawCommand());
         ServiceLoader.load(SubCommand.class).forEach(commandLine::addSubcommand);
         commandLine.setCaseInsensitiveEnumValuesAllowed(true);
         setUsageExitCode(commandLine);
