@@ -65,7 +65,8 @@ record Axis(double low, double high, double from, double to, boolean logarithmic
     String written(double value) {
         double size = Math.max(Math.abs(low), Math.abs(high));
         if (logarithmic || size < 1e-3 || size >= 1e5) {
-            return value == 0 ? "0" : String.format(Locale.ROOT, "%.3g", value).replaceAll("\\.?0+(e|$)", "$1");
+            String text = String.format(Locale.ROOT, "%.3g", value);
+            return value == 0 ? "0" : text.contains(".") ? text.replaceAll("\\.?0+(e|$)", "$1") : text;
         }
         int digits = (int) Math.max(0, Math.ceil(-Math.log10(step()) - 1e-9));
         return String.format(Locale.ROOT, "%." + digits + "f", value);

@@ -59,7 +59,8 @@ record Slopes(Range normal, Range sliding) {
                 double back = at(bench, couple, overlap, 0, 0)[0];
                 normal = normal.with(bench.normalStiffness(0), (after - back) / nudge);
                 double normalSlope = (after - back) / nudge;
-                double slid = at(bench, couple, overlap, nudge, nudge / STEP)[1];
+                at(bench, couple, overlap, nudge, nudge / STEP);
+                double slid = at(bench, couple, overlap, nudge, 0)[1]; // at rest again: no dashpot
                 if (slid / nudge > NOTHING * normalSlope) {
                     sliding = sliding.with(bench.slidingStiffness(0), slid / nudge);
                 }

@@ -26,7 +26,8 @@ class BrokenFieldsTest {
             for (int g = from; g < to; g++) {
                 for (int axis = 0; axis < 3; axis++) {
                     int f = GrainRow.forceAt(g + stray) + GrainRow.FORCE + axis;
-                    grains.forces()[f] -= 2 * grains.position(g, axis) + pole / grains.position(g, axis);
+                    double x = grains.position(g, axis);
+                    grains.forces()[f] -= 2 * x + (pole == 0 ? 0 : pole / x);
                 }
             }
         }
