@@ -57,9 +57,15 @@ final class ProgramRepository {
         String version = digest("SHA-256", jar).substring(0, DIGITS);
         write(artifact, version, "jar", jar);
         write(artifact, version, "pom", pom(artifact, version, "jar", ""));
-        dependencies.append(String.format(
-                "<dependency><groupId>%s</groupId><artifactId>%s</artifactId><version>%s</version></dependency>%n",
-                GROUP, artifact, version));
+        dependencies
+                .append("<dependency>")
+                .append(coordinates(artifact, version))
+                .append("</dependency>\n");
+    }
+
+    private static String coordinates(String artifact, String version) {
+        return "<groupId>" + GROUP + "</groupId><artifactId>" + artifact + "</artifactId><version>" + version
+                + "</version>";
     }
 
     private String everything() throws IOException {
@@ -74,12 +80,9 @@ final class ProgramRepository {
     }
 
     private static byte[] pom(String artifact, String version, String packaging, String inside) {
-        return String.format("""
-                        <project xmlns="http://maven.apache.org/POM/4.0.0">
-                        <modelVersion>4.0.0</modelVersion>
-                        <groupId>%s</groupId><artifactId>%s</artifactId><version>%s</version><packaging>%s</packaging>
-                        %s</project>
-                        """, GROUP, artifact, version, packaging, inside).getBytes(StandardCharsets.UTF_8);
+        String pom = "<project xmlns=\"http://maven.apache.org/POM/4.0.0\">\n<modelVersion>4.0.0</modelVersion>\n"
+                + coordinates(artifact, version) + "<packaging>" + packaging + "</packaging>\n" + inside + "</project>\n";
+        return pom.getBytes(StandardCharsets.UTF_8);
     }
 
     private void write(String artifact, String version, String kind, byte[] content) throws IOException {
