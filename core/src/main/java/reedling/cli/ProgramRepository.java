@@ -81,7 +81,8 @@ final class ProgramRepository {
 
     private static byte[] pom(String artifact, String version, String packaging, String inside) {
         String pom = "<project xmlns=\"http://maven.apache.org/POM/4.0.0\">\n<modelVersion>4.0.0</modelVersion>\n"
-                + coordinates(artifact, version) + "<packaging>" + packaging + "</packaging>\n" + inside + "</project>\n";
+                + coordinates(artifact, version) + "<packaging>" + packaging + "</packaging>\n" + inside
+                + "</project>\n";
         return pom.getBytes(StandardCharsets.UTF_8);
     }
 
