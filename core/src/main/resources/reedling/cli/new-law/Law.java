@@ -35,7 +35,7 @@ final class @Class@Law implements ContactLaw {
     public ContactKernel bind(MaterialPair pair, ContactKind kind, int historyColumn) {
         // The convenient way: one contact after the other.
         return new OneContact(pair.contactModulus(), dampingRatio).asKernel(Stage.NORMAL, historyColumn, 0);
-        // The fast way, the same law for whole blocks of contacts; put it in place of the line above:
+        // The way to full speed, the same law for whole blocks of contacts; put it in place of the line above:
         // return new @Class@Block(pair.contactModulus(), dampingRatio);
     }
 
