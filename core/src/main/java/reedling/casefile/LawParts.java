@@ -10,6 +10,7 @@ import reedling.contact.ContactLaw;
 import reedling.contact.ContactLawProvider;
 import reedling.contact.LawCombination;
 import reedling.contact.LawSet;
+import reedling.contact.NamedLaw;
 import reedling.contact.Stage;
 import reedling.error.ExitCode;
 import reedling.error.Finding;
@@ -86,7 +87,7 @@ record LawParts(Map<Stage, ContactLaw> byStage, List<Field> fields, Map<String, 
                         path,
                         () -> available.law(choice.name(), reading.where(path)).create(choice.parameters()))
                 .ifPresent(law -> {
-                    byStage.put(stage, law);
+                    byStage.put(stage, new NamedLaw(choice.name(), law));
                     plugins.put(choice.name(), law.historyVersion());
                 });
     }

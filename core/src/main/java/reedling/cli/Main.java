@@ -40,6 +40,8 @@ public final class Main {
         commandLine.addSubcommand(new ResumeCommand(ending));
         commandLine.addSubcommand(new RepeatCommand(ending));
         commandLine.addSubcommand(new CheckCommand());
+        commandLine.addSubcommand(new CertifyCommand());
+        commandLine.addSubcommand(new NewLawCommand());
         ServiceLoader.load(SubCommand.class).forEach(commandLine::addSubcommand);
         commandLine.setCaseInsensitiveEnumValuesAllowed(true);
         setUsageExitCode(commandLine);

@@ -3,12 +3,15 @@ package reedling.cli;
 
 import java.io.PrintWriter;
 import java.util.List;
+import java.util.Map;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
+import reedling.conform.LoadedLaws;
 import reedling.plugin.Parameter;
+import reedling.plugin.PluginCatalogue;
 import reedling.plugin.PluginDescription;
 
 /** Lists every plugin with where it came from and what it takes. */
@@ -30,20 +33,23 @@ final class PluginsCommand implements Runnable {
 
     @Override
     public void run() {
-        List<PluginDescription> plugins = pluginFolder.load().descriptions();
+        PluginCatalogue catalogue = pluginFolder.load();
+        List<PluginDescription> plugins = catalogue.descriptions();
+        Map<String, String> stages = LoadedLaws.stages(catalogue);
         PrintWriter out = spec.commandLine().getOut();
         if (json) {
-            out.println(PluginsJson.of(plugins));
+            out.println(PluginsJson.of(plugins, stages));
         } else if (plugins.isEmpty()) {
             out.println("No plugins were found.");
         } else {
-            plugins.forEach(plugin -> print(out, plugin));
+            plugins.forEach(plugin -> print(out, plugin, stages));
         }
         out.flush();
     }
 
-    private static void print(PrintWriter out, PluginDescription plugin) {
-        out.printf("%-9s %s %s%n", plugin.kind(), plugin.name(), plugin.version());
+    private static void print(PrintWriter out, PluginDescription plugin, Map<String, String> stages) {
+        String stage = plugin.kind().equals("contact") ? ", stage " + stages.get(plugin.name()) : "";
+        out.printf("%-9s %s %s%s%n", plugin.kind(), plugin.name(), plugin.version(), stage);
         out.printf("          %s%n", plugin.summary());
         out.printf("          Source: %s%n", plugin.source());
         out.printf("          Jar: %s%n", plugin.jar());

@@ -3,7 +3,9 @@ package reedling.cli;
 
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.stream.Collectors;
+import org.jspecify.annotations.Nullable;
 import reedling.plugin.Parameter;
 import reedling.plugin.PluginDescription;
 
@@ -12,14 +14,20 @@ final class PluginsJson {
 
     private PluginsJson() {}
 
-    static String of(List<PluginDescription> plugins) {
-        return plugins.stream().map(PluginsJson::plugin).collect(Collectors.joining(",\n ", "[", "]"));
+    /**
+     * @param stages stage of each contact law by its name
+     */
+    static String of(List<PluginDescription> plugins, Map<String, String> stages) {
+        return plugins.stream()
+                .map(plugin -> plugin(plugin, plugin.kind().equals("contact") ? stages.get(plugin.name()) : null))
+                .collect(Collectors.joining(",\n ", "[", "]"));
     }
 
-    private static String plugin(PluginDescription plugin) {
+    private static String plugin(PluginDescription plugin, @Nullable String stage) {
         String parameters =
                 plugin.parameters().stream().map(PluginsJson::parameter).collect(Collectors.joining(", "));
         return "{" + member("name", plugin.name()) + ", " + member("kind", plugin.kind()) + ", "
+                + (stage == null ? "" : member("stage", stage) + ", ")
                 + member("version", plugin.version()) + ", " + member("jar", plugin.jar()) + ", "
                 + member("summary", plugin.summary()) + ", " + member("source", plugin.source())
                 + ", \"parameters\": [" + parameters + "]}";

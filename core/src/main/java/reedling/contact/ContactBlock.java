@@ -32,6 +32,7 @@ public final class ContactBlock {
     private double reach;
     private boolean energyDue;
     private double shortestDuration = Double.POSITIVE_INFINITY;
+    private final ContactRow row = new ContactRow(this);
 
     /** Index of the first row of a column in {@link #columns()}. */
     public static int at(int column) {
@@ -40,6 +41,11 @@ public final class ContactBlock {
 
     public double[] columns() {
         return columns;
+    }
+
+    /** The window for laws that look at one row after the other. */
+    ContactRow row() {
+        return row;
     }
 
     /** Eight rows of a column from {@code row}, a multiple of 8, as a vector. */

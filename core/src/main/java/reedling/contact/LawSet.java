@@ -145,4 +145,10 @@ public final class LawSet {
     public double largestDampingRatio() {
         return largestDampingRatio;
     }
+
+    /** Name of the law of a stage for messages: that of its plugin, else its class. */
+    public String name(Stage stage) {
+        ContactLaw law = Objects.requireNonNull(laws.get(stage));
+        return law instanceof NamedLaw named ? named.name() : law.getClass().getName();
+    }
 }

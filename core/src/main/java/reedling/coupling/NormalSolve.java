@@ -75,7 +75,8 @@ final class NormalSolve implements RowStage {
             DoubleVector halfOverMass = half.mul(load(c, Column.INVERSE_MASS, r));
 
             DoubleVector speed = halfOverMass.neg().fma(elastic, closing).div(halfOverMass.fma(damping, one));
-            DoubleVector total = Lanes.larger(damping.fma(speed, elastic), Lanes.smaller(elastic, least))
+            // in this order a force that is not a number stays one, and the guard sees it
+            DoubleVector total = Lanes.larger(Lanes.smaller(elastic, least), damping.fma(speed, elastic))
                     .mul(touch);
             DoubleVector dashpot = total.sub(elastic.mul(touch));
             store(total, c, Column.NORMAL_FORCE, r);
@@ -118,7 +119,7 @@ final class NormalSolve implements RowStage {
             double speed = Math.fma(-halfOverMass, elastic, closing) / Math.fma(halfOverMass, damping, 1.0);
             double pull = elastic < leastForce ? elastic : leastForce;
             double raw = Math.fma(damping, speed, elastic);
-            double total = (raw > pull ? raw : pull) * touch;
+            double total = (pull > raw ? pull : raw) * touch;
             double dashpot = total - elastic * touch;
             c[at(Column.NORMAL_FORCE) + r] = total;
 

@@ -76,7 +76,11 @@ final class StageLine {
         @Override
         public void run(RowRange rows) {
             ContactBlock block = rows.block();
-            kernel.apply(block);
+            try {
+                kernel.apply(block);
+            } catch (RuntimeException | LinkageError thrown) {
+                throw RowFault.of(kernel, rows, thrown);
+            }
         }
     }
 }

@@ -24,7 +24,9 @@ public enum ExitCode {
     /** A guard stopped the run: not a number, overlap too deep, grain lost, structure torn. */
     GUARD(76),
     /** A checkpoint is damaged or belongs to another version or case. */
-    CHECKPOINT(78);
+    CHECKPOINT(78),
+    /** A check that was asked for found something; what is in the report. */
+    FOUND(79);
 
     private final int number;
 

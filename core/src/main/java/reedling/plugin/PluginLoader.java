@@ -133,7 +133,13 @@ public final class PluginLoader {
     private static Finding brokenProvider(String jar, Throwable failure) {
         Throwable cause = failure.getCause() == null ? failure : failure.getCause();
         String reason = cause == failure ? String.valueOf(failure.getMessage()) : failure.getMessage() + ": " + cause;
-        return new Finding(jar, "plugin", "unusable (" + reason + ")", "", "Repair the plugin, or take the jar away.");
+        boolean incomplete = failure instanceof NoClassDefFoundError
+                || cause instanceof ClassNotFoundException
+                || cause instanceof NoClassDefFoundError;
+        String remedy = incomplete
+                ? "A class is missing: put the library that has it inside the plugin's jar, or correct the service file."
+                : "Repair the plugin, or take the jar away.";
+        return new Finding(jar, "plugin", "unusable (" + reason + ")", "", remedy);
     }
 
     private void add(PluginService<?> service, Provider provider, String jar) {

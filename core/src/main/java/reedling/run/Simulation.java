@@ -6,13 +6,17 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import reedling.check.EnergyLedger;
+import reedling.check.LawBlame;
 import reedling.check.StateGuard;
 import reedling.checkpoint.Persistent;
 import reedling.checkpoint.SectionReader;
 import reedling.checkpoint.SectionWriter;
+import reedling.contact.LawFault;
 import reedling.coupling.Interactions;
 import reedling.coupling.MoveTally;
 import reedling.coupling.PastStep;
+import reedling.coupling.RowFault;
+import reedling.error.ReedlingException;
 import reedling.parallel.WorkerTeam;
 import reedling.probe.GrainWatch;
 import reedling.time.StepControl;
@@ -123,7 +127,7 @@ public final class Simulation {
         StepStart start = new StepStart(step, time, past, travel, largestSpeed, report);
 
         // force
-        stepper.look(start);
+        look(start);
         bookContacts(true);
         double strain = report ? model.structure().strainEnergy() : 0;
         ledger.walls(interactions.walls().sumLoads(), interactions.facets(), past.coarse());
@@ -146,6 +150,30 @@ public final class Simulation {
         closeStep(next, fine);
     }
 
+    private void look(StepStart start) {
+        try {
+            stepper.look(start);
+        } catch (RowFault fault) {
+            throw blame().thrown(fault, step, time);
+        } catch (LawFault fault) {
+            throw blame().thrown(fault, step, time);
+        }
+    }
+
+    private void fineForce(double past) {
+        try {
+            interactions.fineForce(past, team);
+        } catch (RowFault fault) {
+            throw blame().thrown(fault, step, time);
+        } catch (LawFault fault) {
+            throw blame().thrown(fault, step, time);
+        }
+    }
+
+    private LawBlame blame() {
+        return new LawBlame(interactions, model.grains(), model.laws());
+    }
+
     /**
      * Takes the further fine steps of the structure and the grains near it. What is left of the step is divided anew when a
      * contact that began, or is about to, needs shorter ones.
@@ -157,7 +185,7 @@ public final class Simulation {
         double done = firstFine;
         int left = fineSteps - 1;
         while (left > 0) {
-            interactions.fineForce(fine, team);
+            fineForce(fine);
             bookContacts(false);
             double limit = survey.fine(structureStep);
             double coming = fine;
@@ -232,13 +260,17 @@ public final class Simulation {
     }
 
     private void closeStep(double next, double fine) {
-        StateGuard.motion(
-                interactions.moves(),
-                interactions.lists().chunks(),
-                model.grains(),
-                model.structure().nodes(),
-                step,
-                time);
+        try {
+            StateGuard.motion(
+                    interactions.moves(),
+                    interactions.lists().chunks(),
+                    model.grains(),
+                    model.structure().nodes(),
+                    step,
+                    time);
+        } catch (ReedlingException stop) {
+            throw blame().refined(stop, step, time);
+        }
         double begun = time;
         time += next;
         step++;

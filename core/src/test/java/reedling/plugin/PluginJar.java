@@ -24,6 +24,7 @@ final class PluginJar {
 
     private final Map<String, String> sources = new LinkedHashMap<>();
     private String provider = "";
+    private String leftOut = "";
 
     /** A jar with one working greeting: class {@code site.<className>}, of the given name and API level. */
     static PluginJar greeting(String className, String name, String apiLevel) {
@@ -49,6 +50,12 @@ final class PluginJar {
         return this;
     }
 
+    /** Compiles a class but leaves it out of the jar. */
+    PluginJar leavingOut(String className) {
+        leftOut = className.replace('.', '/') + ".class";
+        return this;
+    }
+
     /** Adds to the text of the provider's class body. */
     PluginJar with(String member) {
         sources.computeIfPresent(
@@ -66,7 +73,10 @@ final class PluginJar {
             compile(work);
             try (Stream<Path> classes = Files.walk(work)) {
                 for (Path path : classes.filter(Files::isRegularFile).toList()) {
-                    entry(out, work.relativize(path).toString().replace('\\', '/'), Files.readAllBytes(path));
+                    String name = work.relativize(path).toString().replace('\\', '/');
+                    if (!name.equals(leftOut)) {
+                        entry(out, name, Files.readAllBytes(path));
+                    }
                 }
             }
             if (!provider.isEmpty()) {

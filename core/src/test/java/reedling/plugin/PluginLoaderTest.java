@@ -112,6 +112,16 @@ class PluginLoaderTest {
     }
 
     @Test
+    void missingLibraryIsReportedWithJarAndRemedy() throws IOException {
+        Path jar = PluginJar.greeting("Needy", "needy", "API_LEVEL")
+                .with("{ lib.Library.load(); }")
+                .source("lib.Library", "package lib; public class Library { public static void load() {} }")
+                .leavingOut("lib.Library")
+                .write(folder.resolve("needy.jar"));
+        assertThat(text(failure())).contains(jar.toString(), "lib/Library", "inside the plugin's jar");
+    }
+
+    @Test
     void fileThatIsNoJarIsReported() throws IOException {
         Path file = Files.writeString(folder.resolve("text.jar"), "not a zip archive");
         assertThat(text(failure())).contains(file.toString(), "not a readable jar");
