@@ -35,4 +35,31 @@ record NamedKernel(String name, ContactKernel kernel) implements ContactKernel {
             throw new LawFault(name, thrown);
         }
     }
+
+    @Override
+    public double reach(double largestRadius) {
+        try {
+            return kernel.reach(largestRadius);
+        } catch (RuntimeException | LinkageError thrown) {
+            throw new LawFault(name, thrown);
+        }
+    }
+
+    @Override
+    public boolean pulls() {
+        try {
+            return kernel.pulls();
+        } catch (RuntimeException | LinkageError thrown) {
+            throw new LawFault(name, thrown);
+        }
+    }
+
+    @Override
+    public boolean dashpotMayPull() {
+        try {
+            return kernel.dashpotMayPull();
+        } catch (RuntimeException | LinkageError thrown) {
+            throw new LawFault(name, thrown);
+        }
+    }
 }

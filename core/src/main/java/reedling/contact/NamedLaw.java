@@ -30,4 +30,13 @@ public record NamedLaw(String name, ContactLaw law) implements ContactLaw {
             throw new LawFault(name, thrown);
         }
     }
+
+    @Override
+    public List<String> cautions(MaterialPair pair, double radius) {
+        try {
+            return law.cautions(pair, radius);
+        } catch (RuntimeException | LinkageError thrown) {
+            throw new LawFault(name, thrown);
+        }
+    }
 }

@@ -63,4 +63,19 @@ record PerContactKernel(PerContactLaw law, Stage stage, int historyColumn, int h
     public double dampingRatio() {
         return law.dampingRatio();
     }
+
+    @Override
+    public double reach(double largestRadius) {
+        return law.reach(largestRadius);
+    }
+
+    @Override
+    public boolean pulls() {
+        return law.pulls();
+    }
+
+    @Override
+    public boolean dashpotMayPull() {
+        return law.dashpotMayPull();
+    }
 }

@@ -5,7 +5,7 @@ package reedling.contact;
  * A law for a single contact, bound to a material pair, as the convenient way to write one; {@link #asKernel} makes a
  * {@link ContactKernel} of it. It is not vectorised: {@code reedling certify} prints what that costs.
  *
- * <p>It is called for touching rows only. For the others, and before each call, the outputs of its stage stand at 0 (the
+ * <p>It is called for rows in reach only: with reach 0, those that touch. For the others, and before each call, the outputs of its stage stand at 0 (the
  * contact radius at a value that keeps quotients finite) and what it remembers is forgotten when the contact ends.
  *
  * <p>Threads: immutable, called by many workers at once, each with a row of its own.
@@ -23,6 +23,21 @@ public interface PerContactLaw {
     /** As {@link ContactKernel#dampingRatio}; asked of normal laws only. */
     default double dampingRatio() {
         return 0;
+    }
+
+    /** As {@link ContactKernel#reach}; asked of normal laws only. */
+    default double reach(double largestRadius) {
+        return 0;
+    }
+
+    /** As {@link ContactKernel#pulls}; asked of normal laws only. */
+    default boolean pulls() {
+        return dashpotMayPull();
+    }
+
+    /** As {@link ContactKernel#dashpotMayPull}; asked of normal laws only. */
+    default boolean dashpotMayPull() {
+        return false;
     }
 
     /**
