@@ -119,7 +119,8 @@ final class PairBench implements AutoCloseable {
         int row = rowOf[body];
         int at = GrainRow.at(row) + GrainRow.X;
         double[] rows = grains.rows();
-        rows[at] = centres[from] + spacing * (body / 2);
+        int couple = body / 2;
+        rows[at] = centres[from] + spacing * couple;
         rows[at + 1] = centres[from + 1];
         rows[at + 2] = centres[from + 2];
         grains.velocity(row, velocities[from], velocities[from + 1], velocities[from + 2]);
