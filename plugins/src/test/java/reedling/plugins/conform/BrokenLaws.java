@@ -23,7 +23,7 @@ import reedling.plugins.contact.MindlinProvider;
 /** Built-in laws with one thing broken in each. */
 final class BrokenLaws {
 
-    private static final ParameterValues NONE = new ParameterValues(Map.of());
+    private static final ParameterValues NONE = ParameterValues.of(new HertzProvider(), Map.of());
 
     private BrokenLaws() {}
 

@@ -35,7 +35,7 @@ import reedling.wall.Wall;
 /** A law that breaks in a run stops it with the law's name, the two bodies, the step and the time. */
 class BrokenLawStopsRunTest {
 
-    private static final ParameterValues NONE = new ParameterValues(Map.of());
+    private static final ParameterValues NONE = ParameterValues.of(new HertzProvider(), Map.of());
     private static final double[] REST = {0, 0, 0};
 
     /** What is done to one row. */
