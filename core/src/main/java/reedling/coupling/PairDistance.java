@@ -50,8 +50,7 @@ final class PairDistance implements RowStage {
             DoubleVector radii = Tile.take1(de, e2);
 
             DoubleVector distance = dx.fma(dx, dy.fma(dy, dz.mul(dz))).sqrt();
-            DoubleVector inverseBoth = one.div(distance.mul(radii)); // one division for two quotients
-            DoubleVector inverse = inverseBoth.mul(radii);
+            DoubleVector inverse = one.div(distance);
             DoubleVector overlap = radii.sub(distance);
             store(dx.mul(inverse), c, Column.NORMAL, r);
             store(dy.mul(inverse), c, Column.NORMAL + 1, r);
@@ -59,7 +58,7 @@ final class PairDistance implements RowStage {
             store(overlap, c, Column.OVERLAP, r);
             store(zero.blend(one, edge.lt(overlap)), c, Column.TOUCH, r);
             store(inverse, c, INVERSE_DISTANCE, r);
-            DoubleVector inverseRadii = inverseBoth.mul(distance);
+            DoubleVector inverseRadii = one.div(radii); // not from the distance: R* of a contact keeps its bits
             store(inverseRadii, c, INVERSE_RADII, r);
             store(distance.mul(inverseRadii), c, SHORTENING, r);
             store(radii, c, RADII, r);
@@ -72,8 +71,7 @@ final class PairDistance implements RowStage {
             double radii = c[at(Column.OVERLAP) + r];
 
             double distance = Math.sqrt(Math.fma(dx, dx, Math.fma(dy, dy, dz * dz)));
-            double inverseBoth = 1.0 / (distance * radii);
-            double inverse = inverseBoth * radii;
+            double inverse = 1.0 / distance;
             double overlap = radii - distance;
             c[at(Column.NORMAL) + r] = dx * inverse;
             c[at(Column.NORMAL + 1) + r] = dy * inverse;
@@ -81,7 +79,7 @@ final class PairDistance implements RowStage {
             c[at(Column.OVERLAP) + r] = overlap;
             c[at(Column.TOUCH) + r] = farthest < overlap ? 1.0 : 0.0;
             c[at(INVERSE_DISTANCE) + r] = inverse;
-            double inverseRadii = inverseBoth * distance;
+            double inverseRadii = 1.0 / radii;
             c[at(INVERSE_RADII) + r] = inverseRadii;
             c[at(SHORTENING) + r] = distance * inverseRadii;
             c[at(RADII) + r] = radii;

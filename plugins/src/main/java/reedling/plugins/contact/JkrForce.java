@@ -2,15 +2,10 @@
 package reedling.plugins.contact;
 
 import static reedling.contact.ContactBlock.at;
-import static reedling.contact.ContactBlock.load;
-import static reedling.contact.ContactBlock.store;
 
-import jdk.incubator.vector.DoubleVector;
-import jdk.incubator.vector.VectorMask;
 import reedling.contact.Column;
 import reedling.contact.ContactBlock;
 import reedling.contact.ContactKernel;
-import reedling.math.Lanes;
 import reedling.math.Roots;
 
 /**
@@ -19,7 +14,8 @@ import reedling.math.Roots;
  *
  * <p>z is the larger root of z^4 - z = D. With t = sqrt(D - D_tear), z is smooth in t down to the fold; the start value
  * z^2 = z_f^2 + b t + (1 - b) t^2 / (t + 1.45) is exact in value and slope at the fold and in the limit of large t, and
- * within 0.2 % between, so that three Newton steps reach the last digits everywhere.
+ * within 0.2 % between, so that three Newton steps reach the last digits everywhere. A plain loop: its roots and quotients
+ * make a vector form too long for one compile unit, and its vectors became objects.
  */
 record JkrForce(JkrScale scale) implements ContactKernel {
 
@@ -33,11 +29,7 @@ record JkrForce(JkrScale scale) implements ContactKernel {
     @Override
     public void apply(ContactBlock block) {
         rememberRoots(block);
-        if (Lanes.VECTORISED) {
-            vector(block);
-        } else {
-            scalar(block);
-        }
+        force(block);
     }
 
     /** Third roots of R* of new rows; R* of a contact does not change. */
@@ -52,59 +44,7 @@ record JkrForce(JkrScale scale) implements ContactKernel {
         }
     }
 
-    private void vector(ContactBlock block) {
-        double[] c = block.columns();
-        double[] history = block.history();
-        DoubleVector zero = DoubleVector.zero(Lanes.SPECIES);
-        DoubleVector one = DoubleVector.broadcast(Lanes.SPECIES, 1.0);
-        DoubleVector least = DoubleVector.broadcast(Lanes.SPECIES, LEAST);
-        DoubleVector apart = DoubleVector.broadcast(Lanes.SPECIES, APART);
-        for (int r = 0; r < block.rows(); r += Lanes.TILE) {
-            DoubleVector overlap = load(c, Column.OVERLAP, r);
-            DoubleVector radius = load(c, Column.EFFECTIVE_RADIUS, r);
-            DoubleVector q = DoubleVector.fromArray(Lanes.SPECIES, history, block.historyAt(r, scale.root()));
-            DoubleVector before = DoubleVector.fromArray(Lanes.SPECIES, history, block.historyAt(r, scale.joined()));
-
-            // 1 larger root of z^4 - z = D
-            DoubleVector d = overlap.mul(scale.overlap()).div(q);
-            DoubleVector fold = d.sub(JkrLaw.TEAR);
-            DoubleVector t = Lanes.larger(fold, least).sqrt();
-            DoubleVector z = t.mul(t)
-                    .mul(1 - SLOPE)
-                    .div(t.add(BEND))
-                    .add(t.mul(SLOPE))
-                    .add(FOLD_SQUARED)
-                    .sqrt();
-            z = newton(newton(newton(z, d), d), d);
-
-            // 2 joined while it was, or touches, and has not torn
-            VectorMask<Double> joined =
-                    zero.lt(before).or(zero.lt(overlap)).and(zero.lt(fold)).and(zero.lt(load(c, Column.TOUCH, r)));
-            store(zero.blend(one, joined), c, Column.LOST_ENERGY, r);
-
-            // 3 contact radius, force, load, energy
-            DoubleVector squared = z.mul(z);
-            DoubleVector cube = squared.mul(z);
-            DoubleVector area = q.mul(q).mul(scale.length()).mul(squared);
-            area = apart.blend(area, joined);
-            store(area, c, Column.CONTACT_RADIUS, r);
-            store(area.mul(2 * scale.modulus()), c, Column.STIFFNESS, r);
-            DoubleVector force = radius.mul(scale.force()).mul(cube).mul(cube.sub(1.5));
-            store(zero.blend(force, joined), c, Column.ELASTIC_FORCE, r);
-            store(zero.blend(radius.mul(scale.load()), joined), c, Column.ADHESIVE_LOAD, r);
-            DoubleVector shape = cube.mul(0.4).sub(1.0).mul(cube).add(0.375).mul(squared.mul(squared));
-            DoubleVector energy = shape.mul(4.0 / 3).add(0.3).mul(radius.mul(q).mul(scale.energy()));
-            store(zero.blend(energy, joined), c, Column.STORED_ENERGY, r);
-        }
-    }
-
-    private static DoubleVector newton(DoubleVector z, DoubleVector d) {
-        DoubleVector squared = z.mul(z);
-        DoubleVector value = squared.mul(squared).sub(z.add(d));
-        return z.sub(value.div(squared.mul(z).mul(4.0).sub(1.0)));
-    }
-
-    private void scalar(ContactBlock block) {
+    private void force(ContactBlock block) {
         double[] c = block.columns();
         double[] history = block.history();
         for (int r = 0; r < block.rows(); r++) {

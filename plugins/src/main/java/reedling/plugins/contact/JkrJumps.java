@@ -55,7 +55,8 @@ record JkrJumps(JkrScale scale) implements ContactKernel {
     private double tear(double[] c, int r, double step, double q) {
         double apart = -c[at(Column.CLOSING) + r] * step;
         double beyond = JkrLaw.TEAR * q / scale.overlap() - c[at(Column.OVERLAP) + r];
-        if (apart > beyond) {
+        boolean inOwnReach = beyond < -JkrLaw.TEAR * q / scale.overlap(); // that of the largest grains decides nothing
+        if (apart > beyond && inOwnReach) {
             double force = TEAR_FORCE * scale.force() * (q * q * q);
             c[at(Column.ELASTIC_FORCE) + r] = force * (0.5 - beyond / apart);
         }

@@ -60,7 +60,8 @@ record JkrPace(JkrScale scale, double alpha, double perImpact) implements Contac
             DoubleVector q = DoubleVector.fromArray(Lanes.SPECIES, block.history(), block.historyAt(r, scale.root()));
             VectorMask<Double> joined =
                     zero.lt(DoubleVector.fromArray(Lanes.SPECIES, block.history(), block.historyAt(r, scale.joined())));
-            store(load(c, Column.STIFFNESS, r).mul(mass).sqrt().mul(dashpot), c, Column.DAMPING, r);
+            store(
+                    zero.blend(load(c, Column.STIFFNESS, r).mul(mass).sqrt().mul(dashpot), joined), c, Column.DAMPING, r);
 
             DoubleVector depth = radius.mul(q).mul(WELL * scale.energy());
             DoubleVector above = load(c, Column.STORED_ENERGY, r).add(depth).mul(2.0);
@@ -86,7 +87,7 @@ record JkrPace(JkrScale scale, double alpha, double perImpact) implements Contac
             double closing = c[at(Column.CLOSING) + r];
             double q = block.history()[block.historyAtRow(r, scale.root())];
             boolean joined = block.history()[block.historyAtRow(r, scale.joined())] > 0;
-            c[at(Column.DAMPING) + r] = Math.sqrt(c[at(Column.STIFFNESS) + r] * mass) * dashpot;
+            c[at(Column.DAMPING) + r] = joined ? Math.sqrt(c[at(Column.STIFFNESS) + r] * mass) * dashpot : 0;
 
             double depth = radius * q * (WELL * scale.energy());
             double above = (c[at(Column.STORED_ENERGY) + r] + depth) * 2.0;

@@ -2,16 +2,10 @@
 package reedling.plugins.contact;
 
 import static reedling.contact.ContactBlock.at;
-import static reedling.contact.ContactBlock.load;
-import static reedling.contact.ContactBlock.store;
 
-import jdk.incubator.vector.DoubleVector;
-import jdk.incubator.vector.VectorMask;
-import jdk.incubator.vector.VectorOperators;
 import reedling.contact.Column;
 import reedling.contact.ContactBlock;
 import reedling.contact.ContactKernel;
-import reedling.math.Lanes;
 
 /**
  * The well of {@link LennardJonesLaw}. With p = (s/x)^6:
@@ -50,46 +44,13 @@ record LennardJonesKernel(double depth, double zero, double contact, double cuto
 
     @Override
     public void apply(ContactBlock block) {
-        if (Lanes.VECTORISED) {
-            vector(block);
-        } else {
-            scalar(block);
-        }
+        addForce(block);
         if (block.energyDue()) {
             addStoredEnergy(block);
         }
     }
 
-    private void vector(ContactBlock block) {
-        double[] c = block.columns();
-        double shift = forceAtCutoff();
-        double perForce = 24 * depth / zero;
-        DoubleVector nothing = DoubleVector.zero(Lanes.SPECIES);
-        DoubleVector core = DoubleVector.broadcast(Lanes.SPECIES, CORE * zero);
-        DoubleVector distance = DoubleVector.broadcast(Lanes.SPECIES, contact);
-        DoubleVector swing = nothing;
-        DoubleVector travel = nothing;
-        for (int r = 0; r < block.rows(); r += Lanes.TILE) {
-            DoubleVector x = Lanes.larger(distance.sub(load(c, Column.OVERLAP, r)), core);
-            VectorMask<Double> near = x.lt(cutoff).and(nothing.lt(load(c, Column.TOUCH, r)));
-            DoubleVector u = nothing.add(zero).div(x);
-            DoubleVector squared = u.mul(u);
-            DoubleVector p = squared.mul(squared).mul(squared);
-            DoubleVector force = u.mul(p).mul(p.mul(2.0).sub(1.0)).mul(perForce).sub(shift);
-            force = nothing.blend(force, near);
-            store(load(c, Column.ELASTIC_FORCE, r).add(force), c, Column.ELASTIC_FORCE, r);
-            store(load(c, Column.ADHESIVE_LOAD, r).sub(force), c, Column.ADHESIVE_LOAD, r);
-            DoubleVector slope = squared.mul(p).mul(p.mul(26.0).sub(7.0)).mul(perForce / zero);
-            slope = nothing.blend(slope, near);
-            store(load(c, Column.STIFFNESS, r).add(Lanes.larger(slope, nothing)), c, Column.STIFFNESS, r);
-            swing = Lanes.larger(slope.abs().div(load(c, Column.EFFECTIVE_MASS, r)), swing);
-            DoubleVector speed = load(c, Column.CLOSING, r).abs().div(x);
-            travel = Lanes.larger(nothing.blend(speed, near), travel);
-        }
-        report(block, swing.reduceLanes(VectorOperators.MAX), travel.reduceLanes(VectorOperators.MAX));
-    }
-
-    private void scalar(ContactBlock block) {
+    private void addForce(ContactBlock block) {
         double[] c = block.columns();
         double shift = forceAtCutoff();
         double perForce = 24 * depth / zero;
