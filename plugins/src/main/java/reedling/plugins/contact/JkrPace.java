@@ -60,8 +60,7 @@ record JkrPace(JkrScale scale, double alpha, double perImpact) implements Contac
             DoubleVector q = DoubleVector.fromArray(Lanes.SPECIES, block.history(), block.historyAt(r, scale.root()));
             VectorMask<Double> joined =
                     zero.lt(DoubleVector.fromArray(Lanes.SPECIES, block.history(), block.historyAt(r, scale.joined())));
-            store(
-                    zero.blend(load(c, Column.STIFFNESS, r).mul(mass).sqrt().mul(dashpot), joined), c, Column.DAMPING, r);
+            store(zero.blend(load(c, Column.STIFFNESS, r).mul(mass).sqrt().mul(dashpot), joined), c, Column.DAMPING, r);
 
             DoubleVector depth = radius.mul(q).mul(WELL * scale.energy());
             DoubleVector above = load(c, Column.STORED_ENERGY, r).add(depth).mul(2.0);
