@@ -33,14 +33,17 @@ public record LawBlame(Interactions interactions, GrainStore grains, LawSet laws
     private static final int MOMENT = 4;
     private static final int COLUMNS = 7;
 
-    /** The stop for what a law threw in a row of contacts. */
-    public ReedlingException thrown(RowFault fault, long step, double time) {
+    /** The stop for what a law threw, in a row of contacts or outside one: a {@link RowFault} or {@link LawFault}. */
+    public ReedlingException thrown(RuntimeException fault, long step, double time) {
+        return fault instanceof RowFault inRow ? thrown(inRow, step, time) : thrown((LawFault) fault, step, time);
+    }
+
+    private ReedlingException thrown(RowFault fault, long step, double time) {
         Throwable cause = fault.getCause() == null ? fault : fault.getCause();
         return stop(step, time, bodies(fault.segment(), fault.row()), fault.law(), LawFault.words(cause), cause);
     }
 
-    /** The stop for what a law threw outside a row. */
-    public ReedlingException thrown(LawFault fault, long step, double time) {
+    private ReedlingException thrown(LawFault fault, long step, double time) {
         Throwable cause = fault.getCause() == null ? fault : fault.getCause();
         return stop(step, time, "bodies about to touch", fault.law(), LawFault.words(cause), cause);
     }

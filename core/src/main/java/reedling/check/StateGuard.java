@@ -4,6 +4,7 @@ package reedling.check;
 import java.util.List;
 import java.util.Locale;
 import reedling.coupling.ContactTally;
+import reedling.coupling.Interactions;
 import reedling.coupling.MoveTally;
 import reedling.error.ExitCode;
 import reedling.error.Finding;
@@ -51,8 +52,9 @@ public final class StateGuard {
     }
 
     /** Checks that all grains and nodes still have finite velocities after a move. */
-    public static void motion(
-            List<MoveTally> tallies, List<Chunk> chunks, GrainStore grains, NodeStore nodes, long step, double time) {
+    public static void motion(Interactions interactions, GrainStore grains, NodeStore nodes, long step, double time) {
+        List<MoveTally> tallies = interactions.moves();
+        List<Chunk> chunks = interactions.lists().chunks();
         for (int k = 0; k < tallies.size(); k++) {
             if (!tallies.get(k).finite()) {
                 Chunk chunk = chunks.get(k);

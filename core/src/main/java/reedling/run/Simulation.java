@@ -153,9 +153,7 @@ public final class Simulation {
     private void look(StepStart start) {
         try {
             stepper.look(start);
-        } catch (RowFault fault) {
-            throw blame().thrown(fault, step, time);
-        } catch (LawFault fault) {
+        } catch (RowFault | LawFault fault) {
             throw blame().thrown(fault, step, time);
         }
     }
@@ -163,9 +161,7 @@ public final class Simulation {
     private void fineForce(double past) {
         try {
             interactions.fineForce(past, team);
-        } catch (RowFault fault) {
-            throw blame().thrown(fault, step, time);
-        } catch (LawFault fault) {
+        } catch (RowFault | LawFault fault) {
             throw blame().thrown(fault, step, time);
         }
     }
@@ -261,13 +257,7 @@ public final class Simulation {
 
     private void closeStep(double next, double fine) {
         try {
-            StateGuard.motion(
-                    interactions.moves(),
-                    interactions.lists().chunks(),
-                    model.grains(),
-                    model.structure().nodes(),
-                    step,
-                    time);
+            StateGuard.motion(interactions, model.grains(), model.structure().nodes(), step, time);
         } catch (ReedlingException stop) {
             throw blame().refined(stop, step, time);
         }
