@@ -35,7 +35,12 @@ public record LawBlame(Interactions interactions, GrainStore grains, LawSet laws
 
     /** The stop for what a law threw, in a row of contacts or outside one: a {@link RowFault} or {@link LawFault}. */
     public ReedlingException thrown(RuntimeException fault, long step, double time) {
-        return fault instanceof RowFault inRow ? thrown(inRow, step, time) : thrown((LawFault) fault, step, time);
+        if (fault instanceof RowFault inRow) {
+            return thrown(inRow, step, time);
+        }
+        return fault instanceof LawFault outside
+                ? thrown(outside, step, time)
+                : stop(step, time, "bodies in contact", "contact law", LawFault.words(fault), fault);
     }
 
     private ReedlingException thrown(RowFault fault, long step, double time) {
